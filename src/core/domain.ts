@@ -11,8 +11,10 @@ export class DomainError extends Error {
     readonly argument: string,
     readonly value: unknown,
     readonly requirement: string,
+    /** What came, in words, where the value alone would not tell: "2 of 60 cells hold text". */
+    came = `${showValue(value)} was given`,
   ) {
-    super(`${argument} must be ${requirement}; ${showValue(value)} was given.`);
+    super(`${argument} must be ${requirement}; ${came}.`);
   }
 }
 

@@ -1,0 +1,49 @@
+import { compensatedSum } from "../numeric/compensatedSum";
+
+/** The numbers that were scored, in the order in which they came, with what is derived from them worked out once, when first asked for. */
+export class Sample {
+  readonly count: number;
+  #sorted?: Float64Array;
+  #mean?: number;
+  #sumOfSquares?: number;
+
+  /** Takes the array as it is: the caller must not change it afterwards. */
+  constructor(readonly values: Float64Array) {
+    this.count = values.length;
+  }
+
+  /** The values in rising order. */
+  get sorted(): Float64Array {
+    return (this.#sorted ??= this.values.slice().sort());
+  }
+
+  get minimum(): number {
+    return this.sorted[0]!;
+  }
+
+  get maximum(): number {
+    return this.sorted[this.count - 1]!;
+  }
+
+  /** The mean, corrected by the mean of the residuals: exact to the last digits also where the values share many leading digits. */
+  get mean(): number {
+    if (this.#mean === undefined) {
+      const first = compensatedSum(this.values) / this.count;
+      this.#mean = Number.isFinite(first)
+        ? first + compensatedSum(this.values.map((x) => x - first)) / this.count
+        : first;
+    }
+    return this.#mean;
+  }
+
+  /** Sum of squared deviations from the mean. */
+  get sumOfSquares(): number {
+    const { mean } = this;
+    return (this.#sumOfSquares ??= compensatedSum(this.values.map((x) => (x - mean) * (x - mean))));
+  }
+
+  /** The sample standard deviation, divisor n − 1. */
+  get sd(): number {
+    return Math.sqrt(this.sumOfSquares / (this.count - 1));
+  }
+}
