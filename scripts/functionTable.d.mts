@@ -1,0 +1,2 @@
+import type { FunctionEntry } from "../src/sheet/functionTable";
+export function functionTable(): FunctionEntry[];
