@@ -1,5 +1,5 @@
 // The table of functions, read from the JSDoc above each cell function in src/functions.
-// `node scripts/functionTable.mjs` writes src/functions/functions.json; a test calls functionTable() and compares.
+// `npm run table` writes src/functions/functions.json, with --check it only compares; a test calls functionTable() and compares.
 import { readFileSync, readdirSync, writeFileSync } from "node:fs";
 import { basename, dirname, join } from "node:path";
 import { fileURLToPath, pathToFileURL } from "node:url";
@@ -92,6 +92,12 @@ function text(comment) {
 
 if (import.meta.url === pathToFileURL(process.argv[1] ?? "").href) {
   const table = functionTable();
-  writeFileSync(join(folder, "functions.json"), `${JSON.stringify(table, null, 1)}\n`);
+  const path = join(folder, "functions.json");
+  const text = `${JSON.stringify(table, null, 1)}\n`;
+  if (!process.argv.includes("--check")) writeFileSync(path, text);
+  else if (readFileSync(path, "utf8") !== text) {
+    console.error("functions.json is not what the JSDoc says. Run: npm run table");
+    process.exitCode = 1;
+  }
   console.log(`${table.length} functions`);
 }

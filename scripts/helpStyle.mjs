@@ -1,0 +1,127 @@
+// The one style sheet of the help pages.
+export const helpStyle = `:root {
+  color-scheme: light dark;
+  --ink: #1b242c;
+  --quiet: #55616c;
+  --paper: #ffffff;
+  --rule: #d3d9de;
+  --accent: #0a4a66;
+}
+@media (prefers-color-scheme: dark) {
+  :root {
+    --ink: #e4e9ed;
+    --quiet: #a3afb9;
+    --paper: #151b20;
+    --rule: #36414a;
+    --accent: #8cc9e2;
+  }
+}
+* {
+  box-sizing: border-box;
+}
+body {
+  margin: 0 auto;
+  padding: 1.5rem 1rem 4rem;
+  max-width: 44rem;
+  background: var(--paper);
+  color: var(--ink);
+  font: 1rem/1.55 system-ui, sans-serif;
+  font-variant-numeric: tabular-nums;
+}
+a {
+  color: var(--accent);
+}
+nav,
+.topic,
+.kind,
+.gives {
+  color: var(--quiet);
+  font-size: 0.875rem;
+}
+h1 {
+  margin: 0.25rem 0 0.5rem;
+  font-size: 1.6rem;
+  font-weight: 600;
+  line-height: 1.2;
+}
+h2 {
+  margin: 2rem 0 0.5rem;
+  font-size: 1rem;
+  font-weight: 600;
+}
+.lead {
+  margin: 0;
+  font-size: 1.15rem;
+}
+.caution {
+  margin-top: 1.5rem;
+  padding-left: 1rem;
+  border-left: 3px solid var(--accent);
+}
+.caution h2 {
+  margin-top: 0;
+}
+.topic,
+.gives {
+  margin: 0.5rem 0 0;
+}
+pre {
+  margin: 0.25rem 0;
+  white-space: pre-wrap;
+  overflow-wrap: anywhere;
+}
+code {
+  font: 0.925rem/1.5 ui-monospace, monospace;
+}
+ul {
+  margin: 0;
+  padding-left: 1.1rem;
+}
+.names {
+  list-style: none;
+  padding: 0;
+  font-size: 0.925rem;
+}
+dl {
+  margin: 0;
+}
+dt {
+  margin-top: 0.75rem;
+}
+dd {
+  margin: 0;
+}
+.example {
+  padding: 0.5rem 0;
+  border-top: 1px solid var(--rule);
+}
+.value {
+  margin: 0;
+  font-weight: 600;
+}
+table {
+  border-collapse: collapse;
+}
+td {
+  padding: 0.15rem 1.5rem 0.15rem 0;
+  border-bottom: 1px solid var(--rule);
+}
+.number {
+  text-align: right;
+}
+@media print {
+  :root {
+    --ink: #000;
+    --quiet: #333;
+    --paper: #fff;
+    --accent: #000;
+  }
+  nav,
+  .names {
+    display: none;
+  }
+  .example {
+    break-inside: avoid;
+  }
+}
+`;
