@@ -24,6 +24,6 @@ export function readShape(cell: Cell, argument = "shape"): Shape {
   if (!boxcox) throw new DomainError(argument, cell, REQUIREMENT);
   if (boxcox[1] === undefined) return { kind: "boxcox" };
   const power = Number(boxcox[1]);
-  if (!(power >= -5 && power <= 5)) throw new DomainError(argument, cell, "boxcox(power) with a power from -5 to 5");
+  if (!Number.isFinite(power)) throw new DomainError(argument, cell, REQUIREMENT);
   return { kind: "boxcox", power };
 }

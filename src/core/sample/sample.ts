@@ -7,14 +7,22 @@ export class Sample {
   #mean?: number;
   #sumOfSquares?: number;
 
-  /** Takes the array as it is: the caller must not change it afterwards. */
-  constructor(readonly values: Float64Array) {
+  /** Takes the array as it is: the caller must not change it afterwards. `sort` where the order is known more cheaply than by sorting. */
+  constructor(
+    readonly values: Float64Array,
+    private readonly sort = () => values.slice().sort(),
+  ) {
     this.count = values.length;
+  }
+
+  /** The sample carried through a rising function; its order is carried along. */
+  mapped(rising: (value: number) => number): Sample {
+    return new Sample(this.values.map(rising), () => this.sorted.map(rising));
   }
 
   /** The values in rising order. */
   get sorted(): Float64Array {
-    return (this.#sorted ??= this.values.slice().sort());
+    return (this.#sorted ??= this.sort());
   }
 
   get minimum(): number {
