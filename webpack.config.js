@@ -1,13 +1,14 @@
 // Three builds into dist/: the add-in (host files, functions, task pane, help), the trial page, the command line.
 // A build whose entry isn't there is left out. WEIRMARK_ORIGIN says where the add-in will be served from.
-const { chmodSync, existsSync } = require("node:fs");
+const { chmodSync, existsSync, readFileSync } = require("node:fs");
 const { join } = require("node:path");
 const CopyPlugin = require("copy-webpack-plugin");
 const HtmlPlugin = require("html-webpack-plugin");
 const MiniCssExtractPlugin = require("mini-css-extract-plugin");
 const TerserPlugin = require("terser-webpack-plugin");
-const { BannerPlugin, Compilation, optimize, sources } = require("webpack");
+const { BannerPlugin, Compilation, DefinePlugin, optimize, sources } = require("webpack");
 
+const TABLE = "src/functions/functions.json";
 const DEFAULT_ORIGIN = "https://localhost:3000";
 const origin = (process.env.WEIRMARK_ORIGIN || DEFAULT_ORIGIN).replace(/\/+$/, "");
 const at = (...parts) => join(__dirname, ...parts);
@@ -83,17 +84,24 @@ class MakeExecutable {
   }
 }
 
+/** The names of the functions that may spill: the functions bundle needs no more of the table. */
+function spillingFunctions() {
+  const table = JSON.parse(readFileSync(at(TABLE), "utf8"));
+  return JSON.stringify(table.filter(({ result }) => result === "matrix").map(({ name }) => name));
+}
+
 function addIn(mode, hostFiles) {
   const entry = present({
     functions: at("src/hosts/excel/functions.ts"),
-    taskpane: at("src/hosts/excel/taskpane.ts"),
+    taskpane: at("src/taskpane/excel.ts"),
   });
-  const page = at("src/hosts/excel/taskpane.html");
+  const page = at("src/taskpane/taskpane.html");
   return build("add-in", mode, entry, {
     // The host's manifest names functions.js, so it keeps its plain name; the rest is loaded by hash.
     output: { filename: "[name].js", chunkFilename: "pane/[name].[contenthash:8].js" },
     plugins: [
-      new GeneratedFiles(at("src/functions/functions.json"), () => hostFiles(origin)),
+      new DefinePlugin({ SPILLING_FUNCTIONS: DefinePlugin.runtimeValue(spillingFunctions, [at(TABLE)]) }),
+      new GeneratedFiles(at(TABLE), () => hostFiles(origin)),
       new MiniCssExtractPlugin({ filename: "[name].css", chunkFilename: "pane/[name].[contenthash:8].css" }),
       new CopyPlugin({
         patterns: [

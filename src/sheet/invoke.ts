@@ -95,7 +95,7 @@ function handedBlank(cell: Cell, blanks: BlankPolicy): Cell {
 }
 
 /** The result as cells: a 1 × 1 table is its one value, nothing is "", a number that is none is a fault. */
-function plainResult(result: unknown): Cell | Cell[][] {
+export function plainResult(result: unknown): Cell | Cell[][] {
   if (!Array.isArray(result)) return plainCell(result);
   if (result.length > MOST_ROWS) throw new Error(`a result of ${result.length} rows does not fit a sheet`);
   const rows = (result as unknown[][]).map((row) => row.map(plainCell));

@@ -1,0 +1,1 @@
+export function adviceFor(platform: string): string | undefined;
