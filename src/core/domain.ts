@@ -79,3 +79,18 @@ export function requirePositive(argument: string, value: number): void {
 export function requireNotNegative(argument: string, value: number): void {
   if (!(value >= 0 && value < Infinity)) throw new DomainError(argument, value, "0 or a number above 0");
 }
+
+/** Fails only for what is no number: ±Infinity, where a distribution function has its limits, may pass. NaN fails. */
+export function requireReal(argument: string, value: number): void {
+  if (typeof value !== "number" || Number.isNaN(value)) throw new DomainError(argument, value, "a number");
+}
+
+/** Fails unless `value` is a whole number, negative ones included. */
+export function requireInteger(argument: string, value: number): void {
+  if (!Number.isSafeInteger(value)) throw new DomainError(argument, value, "a whole number");
+}
+
+/** Fails unless `value` is above zero; Infinity, where a distribution has its limit, may pass. NaN fails. */
+export function requireDegrees(argument: string, value: number): void {
+  if (!(value > 0)) throw new DomainError(argument, value, "a number above 0");
+}
