@@ -1,9 +1,20 @@
 import type { FunctionEntry } from "../sheet/functionTable";
-import { invoke, type Argument, type BlankPolicy, type Invocation, type Outcome } from "../sheet/invoke";
+import {
+  invoke,
+  type Argument,
+  type CellFunction,
+  type BlankPolicy,
+  type Invocation,
+  type Outcome,
+} from "../sheet/invoke";
+import { WORKINGS } from "./audit.workings";
 import table from "./functions.json";
-import { implementations } from "./index";
+import { implementations as immediate } from "./index";
 
 export const functionTable = table as readonly FunctionEntry[];
+
+/** Every cell function by name, WORKINGS among them. */
+export const implementations: Readonly<Record<string, CellFunction>> = { ...immediate, WORKINGS };
 
 const entries = new Map(functionTable.map((entry) => [entry.name, entry]));
 

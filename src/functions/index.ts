@@ -1,5 +1,8 @@
 import type { CellFunction } from "../sheet/invoke";
 import * as audit from "./audit";
 
-/** Every cell function by name. The names are the table's: a test compares the two. */
+/**
+ * The cell functions by name, all but WORKINGS: what the host loads before the first formula calculates. `call.ts` adds WORKINGS, whose
+ * derivations and texts would make that bundle twice as large.
+ */
 export const implementations: Readonly<Record<string, CellFunction>> = { ...audit };

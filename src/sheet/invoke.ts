@@ -30,12 +30,23 @@ export function invoke(
   invocation: Invocation = {},
 ): Outcome {
   try {
-    const cells = prepareArguments(entry, given, blanks);
-    if (entry.takesAddresses) cells.push(invocation);
-    return { value: plainResult(implementation(...cells)) };
+    return { value: run(entry, implementation, given, blanks, invocation) };
   } catch (failure) {
     return failureOutcome(failure);
   }
+}
+
+/** The same call, but what is refused is thrown: for functions that call another one. */
+export function run(
+  entry: FunctionEntry,
+  implementation: CellFunction,
+  given: readonly Argument[],
+  blanks: BlankPolicy = "null",
+  invocation: Invocation = {},
+): Cell | Cell[][] {
+  const cells = prepareArguments(entry, given, blanks);
+  if (entry.takesAddresses) cells.push(invocation);
+  return plainResult(implementation(...cells));
 }
 
 /** An exception of core as the error value and message that a cell shows. */

@@ -1,6 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { callFunction, functionTable } from "../../src/functions/call";
-import { implementations } from "../../src/functions/index";
+import { callFunction, functionTable, implementations } from "../../src/functions/call";
 import { functionTable as generate } from "../../scripts/functionTable.mjs";
 import { callParts, expectOutcome, parseArgument } from "../support/cases";
 

@@ -1,5 +1,4 @@
 import { failureOutcome, plainResult, type CellFunction } from "../../sheet/invoke";
-import type { Cell } from "../../sheet/cell";
 
 /** What the host's runtime gives for registering cell functions (the global `CustomFunctions`). */
 export interface Registry {
@@ -19,15 +18,21 @@ export function associateAll(
 ): void {
   for (const [id, implementation] of Object.entries(implementations)) {
     const spills = spilling.includes(id);
+    // A function declared to spill must hand over rows also where it gives one value.
+    const handOver = (result: unknown) => {
+      const plain = plainResult(result);
+      return spills && !Array.isArray(plain) ? [[plain]] : plain;
+    };
+    const refuse = (failure: unknown) => {
+      throw hostError(registry, failure);
+    };
     registry.associate(id, (...cells) => {
-      let result: Cell | Cell[][];
       try {
-        result = plainResult(implementation(...cells));
+        const result = implementation(...cells);
+        return result instanceof Promise ? result.then(handOver).catch(refuse) : handOver(result);
       } catch (failure) {
-        throw hostError(registry, failure);
+        return refuse(failure);
       }
-      // A function declared to spill must hand over rows also where it gives one value.
-      return spills && !Array.isArray(result) ? [[result]] : result;
     });
   }
 }

@@ -1,7 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { DomainError, NoAnswerError } from "../../../src/core/domain";
-import { implementations } from "../../../src/functions/index";
-import { functionTable } from "../../../src/functions/call";
+import { functionTable, implementations } from "../../../src/functions/call";
 import { associateAll } from "../../../src/hosts/excel/associate";
 import { cellsForHost, cellsFromHost } from "../../../src/hosts/excel/cells";
 
@@ -52,6 +51,18 @@ describe("registering with Excel", () => {
     expect(registered.get("ONE")!()).toBe(3);
     // null in a table would show as 0.
     expect(registered.get("ROWS")!()).toEqual([["a", ""]]);
+  });
+
+  test("waits for a function that is loaded when first asked for, and hands on its refusals", async () => {
+    const registered = register(
+      { LATE: async () => 7, BAD: async () => fail(new DomainError("name", "X", "a function")) },
+      ["LATE"],
+    );
+    await expect(registered.get("LATE")!()).resolves.toEqual([[7]]);
+    await expect(registered.get("BAD")!()).rejects.toMatchObject({
+      code: "#VALUE!",
+      message: 'name must be a function; "X" was given.',
+    });
   });
 
   test("never lets a number that is none into a cell", () => {
