@@ -1,0 +1,11 @@
+import { enCutoff } from "./en.cutoff";
+import { enPane } from "./en.pane";
+
+export const en = { ...enPane, ...enCutoff };
+
+/** What every language has to say: the same keys, and the same things to put in. */
+export type Texts = {
+  readonly [Key in keyof typeof en]: (typeof en)[Key] extends (...given: infer Given) => string
+    ? (...given: Given) => string
+    : string;
+};
