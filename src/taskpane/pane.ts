@@ -50,7 +50,6 @@ function heading(texts: Texts, parts: readonly PanePart[]): HTMLElement {
   return element(
     "header",
     {},
-    element("h1", {}, texts.paneName),
     element(
       "nav",
       { "aria-label": texts.jumpTo },

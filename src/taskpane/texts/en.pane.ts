@@ -3,7 +3,6 @@ export const enPane = {
   languageName: "English",
   percentGap: "",
   // The pane as a whole
-  paneName: "Weirmark",
   jumpTo: "Go to",
   language: "Language",
   listAnd: (before: string, last: string) => `${before} and ${last}`,
