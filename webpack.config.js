@@ -6,7 +6,7 @@ const CopyPlugin = require("copy-webpack-plugin");
 const HtmlPlugin = require("html-webpack-plugin");
 const MiniCssExtractPlugin = require("mini-css-extract-plugin");
 const TerserPlugin = require("terser-webpack-plugin");
-const { BannerPlugin, Compilation, DefinePlugin, optimize, sources } = require("webpack");
+const { BannerPlugin, Compilation, DefinePlugin, IgnorePlugin, optimize, sources } = require("webpack");
 
 const TABLE = "src/functions/functions.json";
 const DEFAULT_ORIGIN = "https://localhost:3000";
@@ -125,6 +125,8 @@ function trialPage(mode) {
   return build("trial", mode, entry, {
     output: { filename: "trial/[name].[contenthash:8].js", chunkFilename: "trial/[name].[contenthash:8].js" },
     plugins: [
+      // Hyphenation of seventy languages that this page never asks for.
+      new IgnorePlugin({ resourceRegExp: /^\.\/(?!en-)[a-z-]+(-\d+)?-[\w-]{8}\.js$/, contextRegExp: /engine-render/ }),
       new MiniCssExtractPlugin({
         filename: "trial/[name].[contenthash:8].css",
         chunkFilename: "trial/[name].[contenthash:8].css",

@@ -1,3 +1,4 @@
+import type { Nullable } from "@univerjs/core";
 import {
   ArrayValueObject,
   BooleanValueObject,
@@ -12,8 +13,8 @@ import { isCellError, type Cell } from "../../sheet/cell";
 import type { Argument } from "../../sheet/invoke";
 
 /** One value of the engine as a cell: a blank stays null, which the engine itself would turn into 0. */
-function cellOf(value: BaseValueObject | null | undefined): Cell {
-  if (value === null || value === undefined || value.isNull()) return null;
+function cellOf(value: Nullable<BaseValueObject>): Cell {
+  if (!value || value.isNull()) return null;
   if (value.isError()) return { code: (value as ErrorValueObject).getErrorType() };
   return value.getValue() as Cell;
 }

@@ -1,0 +1,115 @@
+import { CommandType, type CustomData, type Univer } from "@univerjs/core";
+import type { FUniver } from "@univerjs/core/facade";
+import { FormulaDataModel, type FWorksheet } from "@univerjs/preset-sheets-core";
+import { parseAddress, type Area } from "../../sheet/address";
+import type { Picture, Port } from "../port";
+import { callCells } from "./callCells";
+import { cellData } from "./cellData";
+import type { MessageBook } from "./messageBook";
+import type { PictureLayer } from "./pictureLayer";
+import { readArea, type ReadFrom } from "./readArea";
+
+export interface TrialHost {
+  readonly api: FUniver;
+  readonly univer: Univer;
+  readonly messages: MessageBook;
+  readonly pictures: PictureLayer;
+  /** Called after a change that the engine doesn't know of. */
+  keep(): void;
+  dark(): boolean;
+}
+
+/** The port of the trial sheet. */
+export function trialPort({ api, univer, messages, pictures, keep, dark }: TrialHost): Port {
+  const book = api.getActiveWorkbook()!;
+  const from: ReadFrom = { formulas: univer.__getInjector().get(FormulaDataModel), messages };
+
+  const place = (address: string): { sheet: FWorksheet; area: Area } => {
+    const area = parseAddress(address);
+    if (!area) throw new Error(`"${address}" is no address`);
+    const sheet = area.sheet === undefined ? book.getActiveSheet() : book.getSheetByName(area.sheet);
+    if (!sheet) throw new Error(`there is no sheet "${area.sheet}"`);
+    return { sheet, area };
+  };
+
+  return {
+    kind: "trial",
+    async selection() {
+      await api.getFormula().onCalculationResultApplied();
+      const sheet = book.getActiveSheet();
+      const ranges = sheet.getSelection()?.getActiveRangeList() ?? [];
+      if (ranges.length !== 1) return undefined;
+      const range = ranges[0]!;
+      const area = {
+        top: range.getRow(),
+        left: range.getColumn(),
+        bottom: range.getLastRow(),
+        right: range.getLastColumn(),
+      };
+      return readArea(from, sheet, area, true);
+    },
+    onChange(listener) {
+      const stops = [
+        api.addEvent(api.Event.SelectionChanged, () => listener("selection")),
+        api.addEvent(api.Event.ActiveSheetChanged, () => listener("selection")),
+        api.onCommandExecuted((command) => {
+          if (command.type === CommandType.MUTATION && command.id.startsWith("sheet.mutation.")) listener("cells");
+        }),
+      ];
+      return () => stops.forEach((stop) => stop.dispose());
+    },
+    async read(address) {
+      await api.getFormula().onCalculationResultApplied();
+      const { sheet, area } = place(address);
+      const whole = area.bottom >= sheet.getMaxRows() || area.right >= sheet.getMaxColumns();
+      return readArea(from, sheet, area, whole);
+    },
+    async write(address, cells) {
+      const { sheet, area } = place(address);
+      const columns = Math.max(...cells.map((row) => row.length));
+      const data = cells.map((row) => Array.from({ length: columns }, (_, column) => cellData(row[column])));
+      if (area.top + cells.length > sheet.getMaxRows()) sheet.setRowCount(area.top + cells.length);
+      if (area.left + columns > sheet.getMaxColumns()) sheet.setColumnCount(area.left + columns);
+      sheet.getRange(area.top, area.left, cells.length, columns).setValues(data);
+      await api.getFormula().onCalculationResultApplied();
+    },
+    async select(address) {
+      const { sheet, area } = place(address);
+      book.setActiveSheet(sheet);
+      const bottom = Math.min(area.bottom, sheet.getMaxRows() - 1);
+      const right = Math.min(area.right, sheet.getMaxColumns() - 1);
+      sheet.getRange(area.top, area.left, bottom - area.top + 1, right - area.left + 1).activate();
+      sheet.scrollToCell(area.top, area.left);
+    },
+    async sheetNames() {
+      return book.getSheets().map((sheet) => sheet.getSheetName());
+    },
+    async addSheet(name) {
+      const taken = new Set(book.getSheets().map((sheet) => sheet.getSheetName().toLowerCase()));
+      let free = name;
+      for (let count = 2; taken.has(free.toLowerCase()); count++) free = `${name} ${count}`;
+      book.insertSheet(free);
+      return free;
+    },
+    async insertPicture(address: string, picture: Picture) {
+      const { sheet, area } = place(address);
+      pictures.add({ sheetId: sheet.getSheetId(), row: area.top, column: area.left, picture });
+    },
+    async calls() {
+      await api.getFormula().onCalculationResultApplied();
+      return book.getSheets().flatMap((sheet) => callCells(from, sheet));
+    },
+    theme: () => (dark() ? "dark" : "light"),
+    separators: () => ({ decimal: ".", argument: "," }),
+    readSetting: async (key) => settings(book.getCustomMetadata())[key],
+    async keepSetting(key, value) {
+      const custom = book.getCustomMetadata() ?? {};
+      book.setCustomMetadata({ ...custom, settings: { ...settings(custom), [key]: value } });
+      keep();
+    },
+  };
+}
+
+function settings(custom: CustomData | undefined): Record<string, unknown> {
+  return (custom?.["settings"] as Record<string, unknown> | undefined) ?? {};
+}
