@@ -31,6 +31,7 @@ export interface HistogramInput {
 }
 
 const TOP = 42;
+const BARE_TOP = 12;
 const BOTTOM = 46;
 const LEFT = 34;
 const RIGHT = 12;
@@ -41,12 +42,13 @@ export function histogram(input: HistogramInput, { width, height }: Size): Pictu
   const { sorted, curve, mark, words, decimal } = input;
   const bins = binScores(sorted);
   const floor = height - BOTTOM;
+  const top = mark ? TOP : BARE_TOP;
   const [low, high] = shownRange(bins, mark);
   const x = scaleLinear([low, high], [LEFT, width - RIGHT]);
   const density = curve && curveDensity(curve, (high - low) * 1e-5);
   const perShare = sorted.length * bins.width;
   const tallest = Math.max(...bins.counts, density ? perShare * highest(density, low, high) : 0);
-  const y = scaleLinear([0, tallest * 1.03], [floor, TOP]);
+  const y = scaleLinear([0, tallest * 1.03], [floor, top]);
   const curveParts = density ? [path("curve", curveLine(density, perShare, x, y))] : [];
   return {
     width,

@@ -1,5 +1,6 @@
 import type { Block, Port } from "../../hosts/port";
 import { formatAddress, parseAddress } from "../../sheet/address";
+import { isBlank, isCellError, type Cell } from "../../sheet/cell";
 import type { Observable } from "../observable";
 import { cellAbove, numberColumns, readColumn, type Column } from "./readColumn";
 
@@ -61,8 +62,8 @@ export function followSelection(
     if (!block) return selection.set({ kind: "nothing" });
     selected.set(block.address);
     if (held) return;
-    const places = numberColumns(block);
-    const best = places.find((place) => (readColumn(block, place)?.count ?? 0) >= FEWEST_NUMBERS);
+    const places = numberColumns(block, FEWEST_NUMBERS);
+    const best = places[0];
     if (best === undefined) {
       const letters = columnOf(block.address);
       return selection.set({ kind: "no-numbers", address: block.address, letters });
@@ -74,7 +75,8 @@ export function followSelection(
   async function readAgain(address: string): Promise<void> {
     const block = await port.read(address);
     const taken = readColumn(block, 0);
-    if (taken) column.set({ ...taken, heading: taken.heading || (column.get()?.heading ?? "") });
+    const before = column.get();
+    if (taken && before && !sameCells(taken, before)) column.set({ ...taken, heading: before.heading });
   }
 
   const stop = port.onChange((what) => {
@@ -96,13 +98,22 @@ export function followSelection(
     takeColumn: (letters) => latest(port.read(wholeColumn(letters, selected.get())), readSelection),
     async takePlace(block, place) {
       await take(block, place);
-      selection.set({ kind: "columns", block, places: numberColumns(block), place });
+      selection.set({ kind: "columns", block, places: numberColumns(block, FEWEST_NUMBERS), place });
     },
     stop() {
       clearTimeout(timer);
       stop();
     },
   };
+}
+
+/** Some other cell changed: nothing to compute or draw anew. */
+function sameCells(a: Column, b: Column): boolean {
+  const alike = (one: Cell, other: Cell) =>
+    one === other ||
+    (isCellError(one) && isCellError(other) && one.code === other.code) ||
+    (isBlank(one) && isBlank(other));
+  return a.cells.length === b.cells.length && a.cells.every(([cell], row) => alike(cell, b.cells[row]![0]));
 }
 
 function headingIn(block: Block | undefined): string {

@@ -1,5 +1,6 @@
 import { formatAddress, parseAddress, type Area } from "../../sheet/address";
 import { isBlank, type Cell } from "../../sheet/cell";
+import { sampleOf } from "../../sheet/sampleMemo";
 import type { Block } from "../../hosts/port";
 
 /** One column as the pane takes it: where its scores stand, its heading, and what is no score in it. */
@@ -24,11 +25,11 @@ export interface Offender {
   readonly cell: Cell;
 }
 
-/** The columns of a block that hold at least one number, by their place in it. */
-export function numberColumns({ values }: Block): number[] {
-  const found = new Set<number>();
-  for (const row of values) row.forEach((cell, index) => typeof cell === "number" && found.add(index));
-  return [...found].sort((a, b) => a - b);
+/** The columns of a block that hold at least `least` numbers, by their place in it. */
+export function numberColumns({ values }: Block, least = 1): number[] {
+  const counts = (values[0] ?? []).map(() => 0);
+  for (const row of values) for (let i = 0; i < row.length; i++) if (typeof row[i] === "number") counts[i]!++;
+  return counts.flatMap((count, place) => (count >= least ? [place] : []));
 }
 
 /**
@@ -67,7 +68,8 @@ export function readColumn(block: Block, place: number): Column | undefined {
     blanks,
     offenders,
     values,
-    sorted: values.slice().sort(),
+    // The cell functions meet the same scores under the same memory: sorted once for all.
+    sorted: sampleOf(values).sorted,
   };
 }
 

@@ -63,9 +63,19 @@ function shapeFields(
   };
   const logit = () => `logit(${bounds.low},${bounds.high})`;
   const boundFields = [bound(texts.shapeLow, "low", lowest), bound(texts.shapeHigh, "high", highest)];
-  const showBounds = (kind: string) => boundFields.forEach((one) => (one.hidden = kind !== "logit"));
   const kind = first.replace(/\(.*/, "");
-  showBounds(kind);
+  const about = element("p", { class: "hint wide" });
+  const abouts: Readonly<Record<string, string>> = {
+    normal: texts.aboutNormal,
+    lognormal: texts.aboutLognormal,
+    logit: texts.aboutLogit,
+    boxcox: texts.aboutBoxcox,
+  };
+  const showKind = (chosen: string) => {
+    boundFields.forEach((one) => (one.hidden = chosen !== "logit"));
+    about.textContent = abouts[chosen] ?? "";
+  };
+  showKind(kind);
   const shapes = choice(
     texts.shape,
     [
@@ -76,10 +86,9 @@ function shapeFields(
     ],
     kind,
     (value) => {
-      showBounds(value);
+      showKind(value);
       changed(value === "logit" ? logit() : value);
     },
   );
-  shapes.root.classList.add("wide");
-  return [shapes.root, ...boundFields];
+  return [shapes.root, ...boundFields, about];
 }

@@ -17,13 +17,9 @@ export function scoresPicture(answer: CutoffAnswer, { texts, numbers }: PaneCont
   const name = heading === "" ? address : heading;
   const ends = (value: number) => (report ? markText(value, report, numbers) : numbers.telling(value));
   const middle = (sorted[(count - 1) >> 1]! + sorted[count >> 1]!) / 2;
+  const [all, low, high] = [numbers.count(count), numbers.telling(sorted[0]!), numbers.telling(sorted[count - 1]!)];
   const sentences = [
-    texts.pictureSentence(
-      numbers.count(count),
-      numbers.telling(sorted[0]!),
-      numbers.telling(sorted[count - 1]!),
-      numbers.telling(middle),
-    ),
+    low === high ? texts.pictureAllAlike(all, low) : texts.pictureSentence(all, low, high, numbers.telling(middle)),
   ];
   let mark: HistogramMark | undefined;
   if (report) {

@@ -99,8 +99,11 @@ export function formulaTarget(context: PaneContext): FormulaTarget {
   return {
     root,
     show(next, range) {
+      const same = next?.text === formula?.text;
       formula = next;
       reads = range;
+      // Cells changed, perhaps by the very formula just put in: what was said of it stays.
+      if (same) return;
       shown.value = next ? localFormula(next.text, numbers.separators) : "";
       copied.textContent = "";
       fill(answer);

@@ -8,10 +8,14 @@ export const enCutoff = {
   betterHigh: "a higher score",
   betterLow: "a lower score",
   shape: "Shape of the scores",
-  shapeNormal: "normal: even on both sides",
-  shapeLognormal: "lognormal: a long upper end, above 0",
-  shapeLogit: "logit: between two bounds",
-  shapeBoxcox: "boxcox: power fitted to the scores",
+  shapeNormal: "normal",
+  shapeLognormal: "lognormal",
+  shapeLogit: "logit, two bounds",
+  shapeBoxcox: "boxcox, fitted",
+  aboutNormal: "Normal: scores spread alike to both sides.",
+  aboutLognormal: "Lognormal: a long upper end, as prices have it; all scores above 0.",
+  aboutLogit: "Logit: scores crowd towards a bound; all lie between the two.",
+  aboutBoxcox: "Boxcox: a power of the scores, fitted to them; all above 0.",
   shapeLow: "Lowest possible",
   shapeHigh: "Highest possible",
   shapeFitted:
@@ -63,6 +67,7 @@ export const enCutoff = {
   pictureTitle: (heading: string) => `Scores and cutoff: ${heading}`,
   pictureSentence: (count: string, low: string, high: string, middle: string) =>
     `${count} scores from ${low} to ${high}, half of them above ${middle}.`,
+  pictureAllAlike: (count: string, value: string) => `${count} scores, all of them ${value}.`,
   pictureMark: (mark: string, lower: string, upper: string) =>
     `The cutoff stands at ${mark}, its limits at ${lower} and ${upper}.`,
   pictureCutoff: (mark: string) => `cutoff ${mark}`,
