@@ -1,0 +1,62 @@
+import { requireCount } from "../domain";
+import { findRoot } from "../numeric/findRoot";
+import { gatedEntries, millsRatio, type GatedEntries } from "./gatedLikelihood";
+import type { Sample } from "./sample";
+
+export interface GatedCurve {
+  readonly entries: GatedEntries;
+  /** The gate in deviations from the mean. */
+  readonly gateScore: number;
+  readonly mean: number;
+  readonly sd: number;
+  readonly meanError: number;
+  readonly sdError: number;
+}
+
+/**
+ * Mean and standard deviation of a normal curve of which `below` entries are only known to lie below a gate, by maximum likelihood, with
+ * standard errors from the observed information.
+ *
+ * Domain     at least two different scores, none below the gate; below a whole number, 0 included.
+ * Edges      below = 0 is the plain maximum likelihood: divisor n, errors s/√n and s/√(2n).
+ * Method     With z the gate in deviations, r(z) = φ/Φ and Y = (below/scored) r(z), the likelihood equations leave one unknown:
+ *            S²(Y − z)² = d²(1 − Y(Y − z)), d and S² the mean and variance (divisor n) of the scores above the gate. The likelihood is
+ *            concave in (mean/sd, 1/sd), so there is one root; it is bracketed between −∞ and where Y = z, hence always found. Newton in
+ *            (mean, sd), the usual way, runs off where most entries lie below the gate.
+ * Accuracy   1e-11 relative, at 1 % and at 95 % below the gate too; test/core/sample/gatedCurve.test.ts.
+ * Reference  Cohen (1959), Simplified estimators for the normal distribution when samples are singly censored or truncated,
+ *            Technometrics 1, 217–237; Olsen (1978), Econometrica 46, 1211–1215 (concavity).
+ *
+ * @throws {DomainError} naming gate or below_count.
+ */
+export function gatedCurve(sample: Sample, gate: number, below: number): GatedCurve {
+  requireCount("below_count", below);
+  const entries = gatedEntries(sample, gate, below);
+  const { scored, distance, spread } = entries;
+  const share = below / scored;
+  const pull = (z: number) => share * millsRatio(z);
+  const equation = (z: number) => {
+    const w = pull(z) - z;
+    return spread * spread * w * w - distance * distance * (1 - pull(z) * w);
+  };
+  const most = below === 0 ? 0 : findRoot((z) => z - pull(z), 0, pull(0));
+  let least = -1;
+  while (!(equation(least) > 0)) least *= 2;
+  const gateScore = below === 0 ? -distance / spread : findRoot(equation, least, most);
+  const sd = distance / (pull(gateScore) - gateScore);
+  const mean = entries.average - pull(gateScore) * sd;
+  return { entries, gateScore, mean, sd, ...standardErrors(entries, gateScore, sd) };
+}
+
+/** From the second derivatives of the log-likelihood in mean and deviation, everything in units of the deviation. */
+function standardErrors({ scored, below, distance, spread }: GatedEntries, z: number, sd: number) {
+  const r = millsRatio(z);
+  const slope = -r * (z + r);
+  const centre = distance / sd + z;
+  const square = (spread / sd) ** 2 + centre * centre;
+  const inMean = scored - below * slope;
+  const mixed = 2 * scored * centre - below * (r + z * slope);
+  const inSd = scored * (3 * square - 1) - below * (2 * r * z + z * z * slope);
+  const determinant = inMean * inSd - mixed * mixed;
+  return { meanError: sd * Math.sqrt(inSd / determinant), sdError: sd * Math.sqrt(inMean / determinant) };
+}
