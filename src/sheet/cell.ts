@@ -1,3 +1,5 @@
+import { ordinal } from "../core/ordinal";
+
 /**
  * What a cell can hold, without any host.
  *
@@ -21,7 +23,5 @@ export function isCellError(cell: unknown): cell is CellError {
 
 /** The place of a cell in a range read row by row, in words: 1 → "the 1st cell". */
 export function ordinalCell(position: number): string {
-  const tens = position % 100;
-  const suffix = tens >= 11 && tens <= 13 ? "th" : (["th", "st", "nd", "rd"][position % 10] ?? "th");
-  return `the ${position}${suffix} cell`;
+  return `the ${ordinal(position)} cell`;
 }

@@ -27,14 +27,14 @@ export function normalDeviate(random: SeededRandom): number {
   const low = random.word();
   const layer = low & 255;
   // The top bit of the place is its sign: choosing the sign by a branch costs as much as all the rest.
-  const x = ((random.word() | 0) * 0x200000 + (low >>> 11)) * TWO_TO_MINUS_52 * widths[layer]!;
-  return Math.abs(x) < widths[layer + 1]! ? x : outsideTheCore(random, layer, x);
+  const x = ((random.word() | 0) * 0x200000 + (low >>> 11)) * TWO_TO_MINUS_52 * widths[layer];
+  return Math.abs(x) < widths[layer + 1] ? x : outsideTheCore(random, layer, x);
 }
 
 /** The rare part: x lies beside the layer above, so it counts only under the curve; else another layer and place are drawn. */
 function outsideTheCore(random: SeededRandom, layer: number, x: number): number {
   if (layer === 0) return x < 0 ? -tailDeviate(random) : tailDeviate(random);
-  const height = heights[layer]! + random.fraction() * (heights[layer + 1]! - heights[layer]!);
+  const height = heights[layer] + random.fraction() * (heights[layer + 1] - heights[layer]);
   return height < portableExpMinus((x * x) / 2) ? x : normalDeviate(random);
 }
 
@@ -50,8 +50,8 @@ function layOut(): void {
   widths[0] = AREA / portableExpMinus((TAIL * TAIL) / 2);
   widths[1] = TAIL;
   for (let i = 1; i < LAYERS; i++) {
-    heights[i] = portableExpMinus((widths[i]! * widths[i]!) / 2);
-    if (i < LAYERS - 1) widths[i + 1] = Math.sqrt(-2 * portableLog(heights[i]! + AREA / widths[i]!));
+    heights[i] = portableExpMinus((widths[i] * widths[i]) / 2);
+    if (i < LAYERS - 1) widths[i + 1] = Math.sqrt(-2 * portableLog(heights[i] + AREA / widths[i]));
   }
   heights[LAYERS] = 1;
 }

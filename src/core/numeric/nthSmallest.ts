@@ -10,15 +10,15 @@ export function nthSmallest(values: Float64Array, n: number, end = values.length
   let low = 0;
   let high = end - 1;
   while (low < high) {
-    const pivot = middleOf(values[low]!, values[(low + high) >>> 1]!, values[high]!);
+    const pivot = middleOf(values[low], values[(low + high) >>> 1], values[high]);
     let i = low;
     let j = high;
     while (i <= j) {
-      while (values[i]! < pivot) i++;
-      while (values[j]! > pivot) j--;
+      while (values[i] < pivot) i++;
+      while (values[j] > pivot) j--;
       if (i <= j) {
-        const held = values[i]!;
-        values[i++] = values[j]!;
+        const held = values[i];
+        values[i++] = values[j];
         values[j--] = held;
       }
     }
@@ -26,7 +26,7 @@ export function nthSmallest(values: Float64Array, n: number, end = values.length
     else if (n >= i) low = i;
     else break;
   }
-  return values[n]!;
+  return values[n];
 }
 
 function middleOf(a: number, b: number, c: number): number {

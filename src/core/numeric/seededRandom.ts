@@ -23,11 +23,11 @@ export class SeededRandom {
   /** The next 32 bits, a whole number from 0 to 2³² − 1. */
   word(): number {
     const state = this.state;
-    const a = state[0]!;
-    const b = state[1]!;
-    const c = state[2]! ^ a;
-    const d = state[3]! ^ b;
-    const sum = a + state[3]!;
+    const a = state[0];
+    const b = state[1];
+    const c = state[2] ^ a;
+    const d = state[3] ^ b;
+    const sum = a + state[3];
     state[0] = a ^ d;
     state[1] = b ^ c;
     state[2] = c ^ (b << 9);

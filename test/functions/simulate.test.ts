@@ -1,0 +1,5 @@
+import { describe } from "vitest";
+import { testCases } from "../support/cases";
+describe("the public cases", () => {
+  testCases("simulate.json");
+});
