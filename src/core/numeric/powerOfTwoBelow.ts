@@ -9,6 +9,6 @@ export function powerOfTwoBelow(x: number): number {
   if (!(size > 0 && size < Infinity)) return 1;
   let power = 1;
   while (power > size) power /= 2;
-  while (power <= size / 2) power *= 2;
+  while (power <= size - power) power *= 2;
   return power;
 }
