@@ -1,5 +1,6 @@
 import * as audit from "./audit";
+import * as plan from "./plan";
 import type { Workings } from "./workingsCall";
 
 /** The workings of each cell function, by its name. */
-export const workings: Readonly<Record<string, Workings>> = { ...audit };
+export const workings: Readonly<Record<string, Workings>> = { ...plan, ...audit };
