@@ -1,19 +1,19 @@
 // The one style sheet of the help pages.
 export const helpStyle = `:root {
   color-scheme: light dark;
-  --ink: #1b242c;
-  --quiet: #55616c;
+  --ink: #1c2024;
+  --quiet: #565e66;
   --paper: #ffffff;
-  --rule: #d3d9de;
-  --accent: #0a4a66;
+  --rule: #c3cad0;
+  --accent: #0b4a6b;
 }
 @media (prefers-color-scheme: dark) {
   :root {
-    --ink: #e4e9ed;
-    --quiet: #a3afb9;
-    --paper: #151b20;
-    --rule: #36414a;
-    --accent: #8cc9e2;
+    --ink: #e8eaec;
+    --quiet: #aab3bb;
+    --paper: #16191c;
+    --rule: #4a535b;
+    --accent: #86c5e6;
   }
 }
 * {

@@ -1,6 +1,6 @@
 import type { Book } from "../hosts/trial/book";
 import { applicantsSheet } from "./book/applicants";
-import { bidsSheet } from "./book/bids";
+import { bidsSheet, SCORES } from "./book/bids";
 import { criteriaSheet } from "./book/criteria";
 import { marksSheet, planSheet, riskSheet, searchSheet } from "./book/groups";
 import { proofSheet, watchSheet } from "./book/watch";
@@ -20,3 +20,6 @@ export const exampleBook: Book = {
     proofSheet,
   ],
 };
+
+/** What is selected when it is opened for the first time. */
+export const firstColumn = SCORES;

@@ -8,7 +8,7 @@ import { startSheet } from "../hosts/trial/startSheet";
 import { trialPort } from "../hosts/trial/trialPort";
 import type { FunctionSet } from "../hosts/trial/functionSet";
 import { showSelectedCell } from "./cellLine";
-import { exampleBook } from "./exampleBook";
+import { exampleBook, firstColumn } from "./exampleBook";
 
 const functions: FunctionSet = {
   table: functionTable,
@@ -20,7 +20,8 @@ export async function openTrial(): Promise<void> {
   const grid = document.getElementById("grid")!;
   const scheme = matchMedia("(prefers-color-scheme: dark)");
   const messages = messageBook();
-  const snapshot = (await readKeptBook()) ?? bookSnapshot(exampleBook);
+  const kept = await readKeptBook();
+  const snapshot = kept ?? bookSnapshot(exampleBook);
   const { api, univer } = startSheet(grid, snapshot, functions, messages, scheme.matches);
   scheme.addEventListener("change", () => api.toggleDarkMode(scheme.matches));
 
@@ -31,8 +32,13 @@ export async function openTrial(): Promise<void> {
   });
   const pictures = pictureLayer(api, grid, keep);
   const port = trialPort({ api, univer, messages, pictures, keep, dark: () => scheme.matches });
+  // On the first visit the pane has something to answer at once.
+  if (!kept) await port.select(firstColumn);
   showSelectedCell(port, document.getElementById("cell")!);
   // For the browser tests, and for whoever wants to look at the engine from the console.
   Object.assign(globalThis, { weirmarkTrial: { port, api } });
   document.body.dataset["state"] = "computed";
+  const { mountPane } = await import("../taskpane/pane");
+  mountPane(document.getElementById("pane")!, port);
+  performance.mark("pane");
 }

@@ -8,11 +8,12 @@ const LEAST_ROWS = 200;
 const LEAST_COLUMNS = 26;
 const RULE = { s: 1, cl: { rgb: "#9aa5ae" } } as const;
 const CENTRE = 2;
+const MIDDLE = 2;
 
 const STYLES: Readonly<Record<BookStyle, IStyleData>> = {
   title: { fs: 14, bl: 1 },
-  note: { cl: { rgb: "#55616c" } },
-  caution: { cl: { rgb: "#0a4a66" }, bl: 1 },
+  note: { cl: { rgb: "#565e66" } },
+  caution: { cl: { rgb: "#0b4a6b" }, bl: 1 },
   heading: { bl: 1, bd: { b: RULE } },
   centred: { ht: CENTRE },
 };
@@ -26,7 +27,7 @@ export function bookSnapshot(book: Book): IWorkbookData {
     appVersion: "1",
     locale: LocaleType.EN_US,
     styles: {},
-    defaultStyle: { ff: "Arial", fs: 10 },
+    defaultStyle: { ff: "Arial", fs: 10, vt: MIDDLE },
     sheetOrder: sheets.map(({ id }) => id),
     sheets: Object.fromEntries(sheets.map((sheet) => [sheet.id, sheet])),
   };

@@ -10,7 +10,7 @@ export function descriptions(table: readonly FunctionEntry[]): IFunctionInfo[] {
     functionName: `WEIR.${name}`,
     functionType: USER_FUNCTION,
     description,
-    abstract: description,
+    abstract: firstSentence(description),
     functionParameter: parameters.map((parameter) => ({
       name: parameter.name,
       detail: parameter.description,
@@ -19,4 +19,9 @@ export function descriptions(table: readonly FunctionEntry[]): IFunctionInfo[] {
       repeat: 0,
     })),
   }));
+}
+
+/** The list of suggestions shows this under each name: with more than a sentence it would hold three names at most. */
+function firstSentence(text: string): string {
+  return /^.*?[.](?= [A-Z]|$)/.exec(text)?.[0] ?? text;
 }

@@ -33,15 +33,18 @@ export function pictureLayer(api: FUniver, grid: HTMLElement, changed: () => voi
   /** Puts each picture where its cell is now. */
   const move = (): void => {
     const sheet = book.getActiveSheet();
-    const canvas = grid.querySelector("canvas")?.getBoundingClientRect();
+    const canvas = grid.querySelector("canvas[id^=univer-sheet]")?.getBoundingClientRect();
     if (!canvas) return;
     const box = grid.getBoundingClientRect();
     const zoom = sheet.getZoom();
     const first = sheet.getRange(0, 0).getCellRect();
     layer.style.inset = `${canvas.top - box.top + first.top * zoom}px ${box.right - canvas.right}px ${box.bottom - canvas.bottom}px ${canvas.left - box.left + first.left * zoom}px`;
     const scroll = sheet.getScrollState();
-    const start = sheet.getRange(scroll.sheetViewStartRow, scroll.sheetViewStartColumn).getCellRect();
-    const unfrozen = sheet.getRange(sheet.getFrozenRows(), sheet.getFrozenColumns()).getCellRect();
+    // The engine counts scrolled rows and columns from behind the frozen ones.
+    const rows = sheet.getFrozenRows();
+    const columns = sheet.getFrozenColumns();
+    const start = sheet.getRange(rows + scroll.sheetViewStartRow, columns + scroll.sheetViewStartColumn).getCellRect();
+    const unfrozen = sheet.getRange(rows, columns).getCellRect();
     const down = start.top + scroll.offsetY - unfrozen.top;
     const across = start.left + scroll.offsetX - unfrozen.left;
     for (const figure of layer.querySelectorAll<HTMLElement>("figure")) {

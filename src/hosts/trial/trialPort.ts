@@ -8,6 +8,7 @@ import { cellData } from "./cellData";
 import type { MessageBook } from "./messageBook";
 import type { PictureLayer } from "./pictureLayer";
 import { readArea, type ReadFrom } from "./readArea";
+import { settledAfterChanges } from "./settled";
 
 export interface TrialHost {
   readonly api: FUniver;
@@ -22,6 +23,7 @@ export interface TrialHost {
 /** The port of the trial sheet. */
 export function trialPort({ api, univer, messages, pictures, keep, dark }: TrialHost): Port {
   const book = api.getActiveWorkbook()!;
+  const settled = settledAfterChanges(api);
   const from: ReadFrom = { formulas: univer.__getInjector().get(FormulaDataModel), messages };
 
   const place = (address: string): { sheet: FWorksheet; area: Area } => {
@@ -35,7 +37,7 @@ export function trialPort({ api, univer, messages, pictures, keep, dark }: Trial
   return {
     kind: "trial",
     async selection() {
-      await api.getFormula().onCalculationResultApplied();
+      await settled();
       const sheet = book.getActiveSheet();
       const ranges = sheet.getSelection()?.getActiveRangeList() ?? [];
       if (ranges.length !== 1) return undefined;
@@ -59,7 +61,7 @@ export function trialPort({ api, univer, messages, pictures, keep, dark }: Trial
       return () => stops.forEach((stop) => stop.dispose());
     },
     async read(address) {
-      await api.getFormula().onCalculationResultApplied();
+      await settled();
       const { sheet, area } = place(address);
       const whole = area.bottom >= sheet.getMaxRows() || area.right >= sheet.getMaxColumns();
       return readArea(from, sheet, area, whole);
@@ -71,7 +73,7 @@ export function trialPort({ api, univer, messages, pictures, keep, dark }: Trial
       if (area.top + cells.length > sheet.getMaxRows()) sheet.setRowCount(area.top + cells.length);
       if (area.left + columns > sheet.getMaxColumns()) sheet.setColumnCount(area.left + columns);
       sheet.getRange(area.top, area.left, cells.length, columns).setValues(data);
-      await api.getFormula().onCalculationResultApplied();
+      await settled();
     },
     async select(address) {
       const { sheet, area } = place(address);
@@ -96,7 +98,7 @@ export function trialPort({ api, univer, messages, pictures, keep, dark }: Trial
       pictures.add({ sheetId: sheet.getSheetId(), row: area.top, column: area.left, picture });
     },
     async calls() {
-      await api.getFormula().onCalculationResultApplied();
+      await settled();
       return book.getSheets().flatMap((sheet) => callCells(from, sheet));
     },
     theme: () => (dark() ? "dark" : "light"),
