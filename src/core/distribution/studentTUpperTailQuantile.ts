@@ -1,6 +1,7 @@
 import { requireDegrees, requireProbability } from "../domain";
 import { betaInverse } from "../special/betaInverse";
 import { normalScore } from "../special/normalScore";
+import { studentTUpperTail } from "./studentTUpperTail";
 
 /**
  * The t with P(T > t) = p for Student's t with `df` degrees of freedom.
@@ -19,6 +20,10 @@ export function studentTUpperTailQuantile(p: number, df: number): number {
   if (p === 0.5) return 0;
   if (df === Infinity) return normalScore(p);
   if (p > 0.5) return -studentTUpperTailQuantile(1 - p, df);
+  // So far out the tail is its leading power of t to the last digit, and t² may overflow.
+  const far = 1e15 * Math.sqrt(df);
+  const beyond = studentTUpperTail(far, df);
+  if (p <= beyond) return far * (beyond / p) ** (1 / df);
   const z = normalScore(p);
   const start = df > 2 ? (z * (1 + (z * z + 1) / (4 * df))) ** 2 / df : undefined;
   return Math.sqrt(df) * Math.sqrt(betaInverse(2 * (0.5 - p), 2 * p, 0.5, df / 2, start));

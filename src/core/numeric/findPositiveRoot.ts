@@ -1,5 +1,7 @@
 import { UnsettledError } from "../domain";
 
+const CAP = 300;
+
 /** A function and its first two derivatives at a point. */
 export interface Taylor {
   value: number;
@@ -16,30 +18,28 @@ export interface Taylor {
  * Accuracy   the last step is below 1e-7 and Halley's error is its cube: a rounding of `at` and no more.
  * Reference  Halley's method: Traub (1964), Iterative Methods for the Solution of Equations.
  *
- * @throws {UnsettledError} after 200 rounds.
+ * @throws {UnsettledError} after 300 rounds.
  */
 export function findPositiveRoot(start: number, rising: boolean, at: (x: number) => Taylor): number {
   let low = 0;
   let high = Infinity;
-  let x = Math.min(Math.max(start, 1e-300), 1e300);
+  let x = start;
   let stride = 2;
-  for (let round = 0; round < 200; round++) {
+  for (let round = 0; round < CAP; round++) {
     const { value, slope, curvature } = at(x);
     if (value === 0) return x;
     if (value < 0 === rising) low = x;
     else high = x;
     const newton = -value / slope;
     const bend = 1 + (0.5 * newton * curvature) / slope;
-    const step = newton / (bend > 0.5 && bend < 2 ? bend : bend >= 2 ? 2 : 0.5);
-    let next = x * Math.exp(step);
-    if (Math.abs(step) < 1e-7) return next;
-    if (!(next > low && next < high)) {
-      if (low > 0 && high < Infinity) next = Math.sqrt(low) * Math.sqrt(high);
-      else next = low > 0 ? low * stride : high / stride;
-      stride *= stride;
-    }
-    if (next === x || !(next > 0 && next < Infinity)) return x;
-    x = next;
+    const step = newton / Math.min(Math.max(bend, 0.5), 2);
+    if (Math.abs(step) < 1e-7) return x * Math.exp(step);
+    // Where a tail is flat the step may lead out of the range of numbers.
+    x *= Math.exp(Math.min(Math.max(step, -30), 30));
+    if (x > low && x < high) continue;
+    if (low > 0 && high < Infinity) x = Math.sqrt(low) * Math.sqrt(high);
+    else x = low > 0 ? low * stride : high / stride;
+    stride *= 2;
   }
   throw new UnsettledError("The search for a quantile");
 }

@@ -17,23 +17,29 @@ import { normalScore } from "./normalScore";
 export function betaInverse(lower: number, upper: number, a: number, b: number, start?: number): number {
   if (lower === 0) return 0;
   if (upper === 0) return Infinity;
+  const logBeta = logGamma(a) + logGamma(b) - logGamma(a + b);
+  const logX = (Math.log(lower) + Math.log(a) + logBeta) / a;
+  const logY = (Math.log(upper) + Math.log(b) + logBeta) / b;
+  // So near to an end the leading power is the whole function; the result may be below the smallest number.
+  if (logX < -500 || logY < -500) return Math.exp(logX < logY ? logX : -logY);
   const isLower = lower <= upper;
-  return findPositiveRoot(start ?? startingOdds(lower, upper, a, b), isLower, (odds) => {
-    const x = odds / (1 + odds);
-    const y = 1 / (1 + odds);
-    const lambda = productDifference(a, 1, b, odds) / (1 + odds);
-    const tails = betaTails(a, b, x, y, lambda);
-    const tail = isLower ? tails.lower : tails.upper;
-    const slope = ((isLower ? 1 : -1) * betaFactor(a, b, x, y, lambda)) / tail;
-    return { value: Math.log(tail / (isLower ? lower : upper)), slope, curvature: slope * (lambda - slope) };
-  });
+  return findPositiveRoot(
+    start ?? startingOdds(lower, upper, a, b, Math.exp(logX), Math.exp(logY)),
+    isLower,
+    (odds) => {
+      const x = odds / (1 + odds);
+      const y = 1 / (1 + odds);
+      const lambda = productDifference(a, 1, b, odds) / (1 + odds);
+      const tails = betaTails(a, b, x, y, lambda);
+      const tail = isLower ? tails.lower : tails.upper;
+      const slope = ((isLower ? 1 : -1) * betaFactor(a, b, x, y, lambda)) / tail;
+      return { value: Math.log(tail / (isLower ? lower : upper)), slope, curvature: slope * (lambda - slope) };
+    },
+  );
 }
 
-function startingOdds(lower: number, upper: number, a: number, b: number): number {
-  const logBeta = logGamma(a) + logGamma(b) - logGamma(a + b);
-  const x = Math.exp((Math.log(lower) + Math.log(a) + logBeta) / a);
+function startingOdds(lower: number, upper: number, a: number, b: number, x: number, y: number): number {
   if (x < 0.1 && x * b < 0.5 * (a + 1)) return x / (1 - x);
-  const y = Math.exp((Math.log(upper) + Math.log(b) + logBeta) / b);
   if (y < 0.1 && y * a < 0.5 * (b + 1)) return (1 - y) / y;
   if (!(a > 0.6 && b > 0.6)) return a / b;
   const z = lower < upper ? normalScore(lower) : -normalScore(upper);

@@ -53,10 +53,10 @@ export function betaTails(a: number, b: number, x: number, y: number, lambda: nu
   }
   if (lambda >= 0) {
     const lower = betaFactor(a, b, x, y, lambda) * fraction(a, b, x, y, lambda);
-    return { lower, upper: 1 - lower };
+    return { lower, upper: Math.max(0, 1 - lower) };
   }
   const upper = betaFactor(a, b, x, y, lambda) * fraction(b, a, y, x, -lambda);
-  return { lower: 1 - upper, upper };
+  return { lower: Math.max(0, 1 - upper), upper };
 }
 
 /** I_x(a, b) over x^a·y^b/B(a, b), for λ ≥ 0. */
@@ -87,7 +87,7 @@ function fraction(a: number, b: number, x: number, y: number, lambda: number): n
     bn = bnp1 / nextB;
     anp1 = next;
     bnp1 = 1;
-    if (Math.abs(next - value) <= 2 ** -52 * next) return next;
+    if (Math.abs(next - value) <= 2 ** -50 * next) return next;
     value = next;
   }
   throw new UnsettledError("The incomplete beta fraction");

@@ -45,7 +45,7 @@ export function bivariateNormalLower(h: number, k: number, rho: number): number 
   };
   const from = Math.max(low, peak > low ? edge(peak, -1) : low);
   const to = edge(peak, 1);
-  const panels = Math.max(3, Math.ceil((to - from) / 2.5));
+  const panels = Math.max(2, Math.ceil((to - from) / 1.5));
   const { nodes, weights } = gaussLegendre(20);
   const width = (to - from) / panels;
   let sum = 0;

@@ -16,8 +16,11 @@ import { normalScore } from "./normalScore";
 export function gammaInverse(lower: number, upper: number, shape: number): number {
   if (lower === 0) return 0;
   if (upper === 0) return Infinity;
+  const logSmall = (Math.log(lower) + logGamma(shape + 1)) / shape;
+  // So near to 0 the leading power of x is the whole function; x itself may be below the smallest number.
+  if (logSmall < -600) return Math.exp(logSmall);
   const isLower = lower <= upper;
-  return findPositiveRoot(start(lower, upper, shape), isLower, (x) => {
+  return findPositiveRoot(start(lower, upper, shape, Math.exp(logSmall)), isLower, (x) => {
     const tails = gammaTails(x, shape);
     const tail = isLower ? tails.lower : tails.upper;
     const slope = ((isLower ? 1 : -1) * shape * gammaFactor(x, shape)) / tail;
@@ -25,8 +28,7 @@ export function gammaInverse(lower: number, upper: number, shape: number): numbe
   });
 }
 
-function start(lower: number, upper: number, shape: number): number {
-  const small = Math.exp((Math.log(lower) + logGamma(shape + 1)) / shape);
+function start(lower: number, upper: number, shape: number, small: number): number {
   if (small < 0.2 * (shape + 1)) return small * Math.exp(small / (shape + 1));
   const z = lower < upper ? -normalScore(lower) : normalScore(upper);
   const cube = 1 - 1 / (9 * shape) + z / (3 * Math.sqrt(shape));

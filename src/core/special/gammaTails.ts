@@ -43,7 +43,7 @@ function below(x: number, a: number): Tails {
     sum += term;
   }
   const lower = sum * gammaFactor(x, a);
-  return { lower, upper: 1 - lower };
+  return { lower, upper: Math.max(0, 1 - lower) };
 }
 
 function above(x: number, a: number): Tails {
@@ -62,7 +62,7 @@ function above(x: number, a: number): Tails {
     if (Math.abs(c * d - 1) < 2 * EPSILON * 2) break;
   }
   const upper = (a * gammaFactor(x, a)) / value;
-  return { lower: 1 - upper, upper };
+  return { lower: Math.max(0, 1 - upper), upper };
 }
 
 function smallShape(x: number, a: number): Tails {

@@ -45,17 +45,20 @@ export function noncentralTTails(t: number, df: number, ncp: number): Noncentral
       const tau = direction * j * step;
       const bend = stretch && Math.exp(-tau);
       const u = centre + (stretch ? (tau - bend + 1) / 2 : tau);
-      const s = Math.expm1(u);
-      const x = sign * (t - ncp + t * s);
-      const weight = Math.exp(df * (log1pMinus(s) - (s * s) / 2)) * (stretch ? (1 + bend) / 2 : 1);
+      const near = Math.abs(u) < 0.5;
+      // Next to 1, s − 1 carries the digits: df·s² and t·s − ncp are differences of large numbers there.
+      const s1 = near ? Math.expm1(u) : Math.exp(u) - 1;
+      const s = near ? 1 + s1 : Math.exp(u);
+      const x = sign * (near ? t - ncp + t * s1 : t * s - ncp);
+      const logWeight = near ? log1pMinus(s1) - (s1 * s1) / 2 : u - (s * s - 1) / 2;
+      const weight = Math.exp(df * logWeight) * (stretch ? (1 + bend) / 2 : 1);
       const half = weight * expSquare(x, -0.5);
-      const beyond = x < 0 ? 0.5 * half * erfcx(-x * Math.SQRT1_2) : weight - 0.5 * half * erfcx(x * Math.SQRT1_2);
-      const point = half * (1 + s);
-      tail += beyond;
+      const size = x < 0 ? 0.5 * half * erfcx(-x * Math.SQRT1_2) : weight - 0.5 * half * erfcx(x * Math.SQRT1_2);
+      const point = half * s;
+      tail += size;
       density += point;
-      slope -= point * (1 + s) * sign * x;
-      const size = beyond;
-      if (size < 1e-18 * tail && size <= before) break;
+      slope -= point * s * sign * x;
+      if (size <= 1e-18 * tail && size <= before) break;
       before = size;
     }
   }
