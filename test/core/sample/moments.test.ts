@@ -1,0 +1,33 @@
+import { describe, expect, test } from "vitest";
+import { moments } from "../../../src/core/sample/moments";
+import { Sample } from "../../../src/core/sample/sample";
+
+const of = (values: readonly number[]) => moments(new Sample(Float64Array.from(values)));
+
+describe("moments", () => {
+  test("by hand: 1, 2, 6 has G1 = (3/(2·1)) Σz³ with z = (−2, −1, 3)/√7, that is 1.5 · 18/7^1.5", () => {
+    expect(of([1, 2, 6]).skewness).toBeCloseTo((1.5 * 18) / 7 ** 1.5, 14);
+  });
+
+  test("by hand: 1, 2, 3, 4 has G2 = (4·5/(3·2·1)) Σz⁴ − 3·9/(2·1) with s² = 5/3, that is −1.2", () => {
+    const fourths = (2 * 1.5 ** 4 + 2 * 0.5 ** 4) / (5 / 3) ** 2;
+    expect(of([1, 2, 3, 4]).excessKurtosis).toBeCloseTo((20 / 6) * fourths - 13.5, 13);
+    expect(of([1, 2, 3, 4]).excessKurtosis).toBeCloseTo(-1.2, 13);
+  });
+
+  test("too few scores have none", () => {
+    expect(of([1, 2])).toEqual({ skewness: undefined, excessKurtosis: undefined });
+    expect(of([1, 2, 4]).excessKurtosis).toBeUndefined();
+  });
+
+  test("law: unit and origin are immaterial, the mirror image turns the skewness, far from zero too", () => {
+    const values = [3.5, 4.25, 4.5, 6.75, 12.5, 5.25];
+    const plain = of(values);
+    const far = of(values.map((x) => 1e9 + x * 4));
+    const mirror = of(values.map((x) => -x));
+    expect(far.skewness).toBeCloseTo(plain.skewness!, 11);
+    expect(far.excessKurtosis).toBeCloseTo(plain.excessKurtosis!, 11);
+    expect(mirror.skewness).toBeCloseTo(-plain.skewness!, 13);
+    expect(mirror.excessKurtosis).toBeCloseTo(plain.excessKurtosis!, 13);
+  });
+});
