@@ -118,7 +118,7 @@ function columnIndex(letters: string): number {
   return [...letters].reduce((index, letter) => index * 26 + letter.charCodeAt(0) - 64, 0) - 1;
 }
 
-function cellAt(columns: CaseFile["columns"], row: number, column: number): Cell {
+export function cellAt(columns: CaseFile["columns"], row: number, column: number): Cell {
   const cell = row === 1 ? columns[column]?.heading : columns[column]?.cells[row - 2];
   if (cell === undefined || cell === "") return null;
   return typeof cell === "string" && /^#(N\/A|VALUE!|REF!|DIV\/0!|NUM!|NAME\?|NULL!)$/.test(cell)

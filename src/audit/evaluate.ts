@@ -1,0 +1,57 @@
+import { isCellError, type Cell } from "../sheet/cell";
+import type { BlankPolicy } from "../sheet/invoke";
+import type { Sheet, Workbook } from "../sheet/workbook";
+import { UnknownFunction } from "./evaluateNode";
+import { Evaluation, STEPS } from "./evaluation";
+import { readFormula } from "./readFormula";
+import { intersect } from "./reference";
+import { errorCell, isArray, NotKnown, Reference, UnreadableFormula } from "./value";
+
+/** Where a formula stands, and how it is to be taken. */
+export interface FormulaPlace {
+  readonly workbook: Workbook;
+  readonly sheet: Sheet;
+  readonly row: number;
+  readonly column: number;
+  readonly shift?: { readonly rows: number; readonly columns: number };
+  /** An old-style formula, which takes one cell of a range where one is wanted. */
+  readonly single?: boolean;
+  readonly blanks?: BlankPolicy;
+}
+
+/** A value as a cell would show it (errors are values), or the reason why it can't be known or read. */
+export type Answer =
+  | { readonly value: Cell | Cell[][] }
+  | { readonly notKnown: string; readonly unknownFunction?: UnknownFunction }
+  | { readonly unreadable: string };
+
+/** Evaluates a formula on the stored values of a workbook, as if it stood in the given cell. Never throws. */
+export function evaluate(formula: string, place: FormulaPlace): Answer {
+  const source = formula.startsWith("=") ? formula : `=${formula}`;
+  const { workbook, sheet, row, column, shift = { rows: 0, columns: 0 }, single = false, blanks = "null" } = place;
+  try {
+    const ast = readFormula(source);
+    const budget = { steps: STEPS };
+    const at = new Evaluation({ workbook, sheet, row, column, shift, single, blanks, source, names: [], budget });
+    const value = at.value(ast);
+    const shown = single && value instanceof Reference ? intersect(value, at) : value;
+    return { value: asShown(at.cells(shown)) };
+  } catch (failure) {
+    if (failure instanceof UnreadableFormula) return { unreadable: failure.message };
+    if (failure instanceof UnknownFunction) return { notKnown: failure.message, unknownFunction: failure };
+    if (failure instanceof NotKnown) return { notKnown: failure.message };
+    // The stack is the last limit: nothing that a file holds may end the program.
+    if (failure instanceof RangeError) return { notKnown: "it is nested too deep" };
+    throw failure;
+  }
+}
+
+/** A blank that a formula leads to is shown as 0. */
+function asShown(value: Cell | readonly (readonly Cell[])[]): Cell | Cell[][] {
+  return isArray(value) ? value.map((row) => row.map(shownCell)) : shownCell(value);
+}
+
+function shownCell(cell: Cell): Cell {
+  if (cell === null || cell === undefined) return 0;
+  return isCellError(cell) && cell.message === undefined ? errorCell(cell.code) : cell;
+}

@@ -1,0 +1,85 @@
+import type { AstExpression } from "@borgar/fx/xlsx";
+import type { Cell, Range } from "../sheet/cell";
+import type { BlankPolicy } from "../sheet/invoke";
+import type { Sheet, Workbook } from "../sheet/workbook";
+import { unwrapped } from "./broadcast";
+import { evaluateNode } from "./evaluateNode";
+import { cellsOf, intersect } from "./reference";
+import { isArray, NotKnown, Reference, type Value } from "./value";
+
+/** A name given by LET, and the ones given before it. */
+export interface Scope {
+  readonly name: string;
+  readonly value: Value;
+  readonly outer?: Scope;
+}
+
+/** Where and how a formula is evaluated. */
+export interface Setting {
+  readonly workbook: Workbook;
+  readonly sheet: Sheet;
+  /** The cell that the formula stands in. */
+  readonly row: number;
+  readonly column: number;
+  readonly blanks: BlankPolicy;
+  /** The text that is being evaluated, with its "=". */
+  readonly source: string;
+  /** How far relative references move: in a shared formula, and in a name. */
+  readonly shift: { readonly rows: number; readonly columns: number };
+  /** True in an old-style formula, where an operator takes the one cell of a range that stands in line with its own. */
+  readonly single: boolean;
+  readonly scope?: Scope;
+  /** The defined names that are being worked out. */
+  readonly names: readonly string[];
+  /** Steps left, for the formula as a whole. */
+  readonly budget: { steps: number };
+}
+
+export const STEPS = 20_000_000;
+
+/** One formula being evaluated on stored values. */
+export class Evaluation {
+  constructor(readonly setting: Setting) {}
+
+  /** The same evaluation with something changed: a name more in scope, arrays allowed. */
+  with(changes: Partial<Setting>): Evaluation {
+    return new Evaluation({ ...this.setting, ...changes });
+  }
+
+  get withArrays(): Evaluation {
+    return this.setting.single ? this.with({ single: false }) : this;
+  }
+
+  value(node: AstExpression | null): Value {
+    const value = node === null ? null : evaluateNode(node, this);
+    this.spend(isArray(value) ? value.length * (value[0]?.length ?? 0) : 1);
+    return value;
+  }
+
+  /** Counts steps, so that no formula of a file can keep the reader busy for ever. */
+  spend(steps: number): void {
+    if ((this.setting.budget.steps -= steps) < 0) throw new NotKnown("it takes too many steps");
+  }
+
+  /** The cells behind a value, as one value where there is one. */
+  cells(value: Value): Cell | Range {
+    return value instanceof Reference ? unwrapped(cellsOf(value, this)) : unwrapped(value);
+  }
+
+  /** The same as an operator sees it: in an old-style formula one cell of a range. */
+  operand(value: Value): Cell | Range {
+    return this.setting.single && value instanceof Reference ? this.cells(intersect(value, this)) : this.cells(value);
+  }
+
+  /** Always rows of cells. */
+  rows(value: Value): Range {
+    const cells = this.cells(value);
+    return isArray(cells) ? cells : [[cells]];
+  }
+
+  /** One cell: the first of an array. */
+  cell(value: Value): Cell {
+    const cells = this.operand(value);
+    return isArray(cells) ? (cells[0]?.[0] ?? null) : cells;
+  }
+}

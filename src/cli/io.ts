@@ -1,0 +1,22 @@
+/** The outside world of a command: what it writes to, what it may read. */
+export interface Io {
+  out(text: string): void;
+  err(text: string): void;
+  /** The bytes of a file, or of standard input for "-". */
+  read(path: string): Promise<Uint8Array>;
+}
+
+/** What ends a command: a sentence for the user. Nothing was judged, so the exit code is 2. */
+export class Stop extends Error {
+  override readonly name = "Stop";
+}
+
+export interface Command {
+  readonly name: string;
+  /** What stands behind its name. */
+  readonly usage: string;
+  readonly summary: string;
+  /** The whole help text below the usage. */
+  readonly help: string;
+  run(args: readonly string[], io: Io): Promise<number>;
+}

@@ -1,0 +1,40 @@
+import type { Cell } from "../../sheet/cell";
+import { UnusableFile } from "./unusableFile";
+import { unescapeText } from "./xlsxStrings";
+
+/** The value of a `<c>`, from its `<v>` and the letter of its kind (ECMA-376, ST_CellType). Null where there is none. */
+export function storedValue(text: string, kind: string | undefined, strings: readonly string[]): Cell {
+  switch (kind) {
+    case "s": {
+      const shared = strings[Number(text)];
+      if (shared === undefined)
+        throw new UnusableFile(`The file is damaged: it has no text number ${text.slice(0, 20)}.`);
+      return shared;
+    }
+    case "str":
+    case "inlineStr":
+      return unescapeText(text);
+    case "b":
+      return text.trim() === "1" || text.trim() === "true";
+    case "e":
+      return { code: text.trim() };
+    case "d":
+      return dateSerial(text.trim());
+    case undefined:
+    case "n": {
+      if (text.trim() === "") return null;
+      const number = Number(text);
+      if (!Number.isFinite(number))
+        throw new UnusableFile(`The file is damaged: a number cell holds “${text.slice(0, 40)}”.`);
+      return number;
+    }
+    default:
+      throw new UnusableFile(`The file is damaged: it has a cell of the unknown kind “${kind.slice(0, 20)}”.`);
+  }
+}
+
+/** An ISO date as the number of days that a cell counts in, from 1900. */
+function dateSerial(text: string): Cell {
+  const time = Date.parse(/[Tt]/.test(text) ? text.replace(/Z?$/, "Z") : `${text}T00:00:00Z`);
+  return Number.isNaN(time) ? text : time / 86_400_000 + 25_569;
+}
