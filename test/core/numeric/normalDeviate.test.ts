@@ -45,7 +45,11 @@ describe("normalDeviate", () => {
     const draws = Float64Array.from({ length: 200_000 }, () => normalDeviate(random)).sort();
     let distance = 0;
     draws.forEach((x, i) => {
-      distance = Math.max(distance, Math.abs(normalCdf(x) - i / draws.length), Math.abs(normalCdf(x) - (i + 1) / draws.length));
+      distance = Math.max(
+        distance,
+        Math.abs(normalCdf(x) - i / draws.length),
+        Math.abs(normalCdf(x) - (i + 1) / draws.length),
+      );
     });
     expect(kolmogorovUpperTail(distance * Math.sqrt(draws.length))).toBeGreaterThan(0.001);
   });

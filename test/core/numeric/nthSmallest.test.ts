@@ -4,7 +4,10 @@ import { nthSmallest } from "../../../src/core/numeric/nthSmallest";
 
 describe("nthSmallest", () => {
   test("law: it is what stands there after sorting, also with ties, and no value is lost", () => {
-    const numbers = fc.array(fc.oneof(fc.integer({ min: -5, max: 5 }), fc.double({ noNaN: true })), { minLength: 1, maxLength: 60 });
+    const numbers = fc.array(fc.oneof(fc.integer({ min: -5, max: 5 }), fc.double({ noNaN: true })), {
+      minLength: 1,
+      maxLength: 60,
+    });
     fc.assert(
       fc.property(numbers, fc.nat(), (values, at) => {
         const n = at % values.length;
