@@ -1,0 +1,136 @@
+import { DomainError } from "../domain";
+import { findRoot } from "../numeric/findRoot";
+import type { MissCost } from "./missCosts";
+import { chanceSlack } from "./reachesChance";
+
+/** Products that the recursion may take: about a tenth of a second. */
+const MOST_WORK = 20_000_000;
+const STRIDE = 500;
+
+export interface MissCostQuantile {
+  readonly units: number;
+  /** The chance that the misses pay no more than these units. */
+  readonly reached: number;
+}
+
+/**
+ * The smallest number of units that covers what all misses before the last hit pay, with the chance asked for.
+ *
+ * Domain     checked by searchBudget.
+ * Edges      more than 20 million products (units × kinds of miss) are refused by the name of fraction.
+ * Method     The misses are negative binomial in number, so their total g is a compound distribution: s·g(s) = Σ qⱼ(s + (hits − 1)Cⱼ)
+ *            g(s − Cⱼ), all terms positive. fraction^hits would underflow: it is carried as a power of two. For one hit g becomes a power
+ *            of the root of Σ qⱼ e^{λCⱼ} = 1: e^{λs}g(s) is an average of the span before it, so once a whole span agrees it stays so, and
+ *            the rest of the way is one logarithm.
+ * Accuracy   the exact unit, chances within 1e-12; test/core/method/searchBudget.test.ts.
+ * Reference  Panjer (1981), Recursive evaluation of a family of compound distributions, ASTIN Bulletin 12.
+ *
+ * @throws {DomainError}
+ */
+export function missCostQuantile(
+  misses: readonly MissCost[],
+  fraction: number,
+  chance: number,
+  hits: number,
+): MissCostQuantile {
+  const paying = misses.filter((kind) => kind.units > 0);
+  if (paying.length === 0) return { units: 0, reached: 1 };
+  const span = Math.max(...paying.map((kind) => kind.units));
+  // A miss that pays nothing only lengthens the search: left out, and the others scaled up.
+  const paid = paying.reduce((sum, kind) => sum + kind.share, fraction);
+  const units = Int32Array.from(paying, (kind) => kind.units);
+  const shares = Float64Array.from(paying, (kind) => kind.share / paid);
+  const bends = shares.map((share, j) => share * (hits - 1) * units[j]);
+  const rate = hits === 1 ? tailRate(units, shares, fraction / paid) : 0;
+  const target = chance - chanceSlack(chance);
+  const mask = 2 ** Math.ceil(Math.log2(span + 1)) - 1;
+  const steps = Math.floor(MOST_WORK / paying.length);
+  if (span > steps || (hits > 1 && outOfReach(steps, units, shares, fraction / paid, hits, target))) refuse(fraction);
+
+  const ring = new Float64Array(mask + 1);
+  const start = scaledPower(fraction / paid, hits);
+  let { exponent } = start;
+  ring[0] = start.value;
+  let sum = ring[0];
+  let lost = 0;
+  let factor = 2 ** exponent;
+  for (let s = 0; ;) {
+    if (sum * factor >= target) return { units: s, reached: Math.min(1, sum * factor) };
+    if (rate > 0 && s >= 2 * span && s % span === 0 && settled(ring, mask, s, span, rate)) {
+      const tail = ring[s & mask] / Math.expm1(rate);
+      const more = Math.max(0, Math.ceil(Math.log(tail / (1 - target)) / rate));
+      return { units: s + more, reached: 1 - tail * Math.exp(-rate * more) };
+    }
+    if (++s > steps) refuse(fraction);
+    const each = 1 / s;
+    let g = 0;
+    for (let j = 0; j < units.length; j++) g += (shares[j] + bends[j] * each) * ring[(s - units[j]) & mask];
+    ring[s & mask] = g;
+    const term = g - lost;
+    const next = sum + term;
+    lost = next - sum - term;
+    sum = next;
+    if (exponent < 0 && sum > 2 ** STRIDE) {
+      for (let i = 0; i <= mask; i++) ring[i] *= 2 ** -STRIDE;
+      sum *= 2 ** -STRIDE;
+      lost *= 2 ** -STRIDE;
+      exponent += STRIDE;
+      factor = 2 ** exponent;
+    }
+  }
+}
+
+/** The root λ of Σ shareⱼ e^{λ unitsⱼ} = 1, the shares summing to 1 − rest; by expm1, as λ may be 1e-9. */
+function tailRate(units: Int32Array, shares: Float64Array, rest: number): number {
+  const excess = (rate: number) => shares.reduce((sum, share, j) => sum + share * Math.expm1(rate * units[j]), -rest);
+  const bounds = shares.map((share, j) => Math.log1p(rest / share) / units[j]);
+  return findRoot(excess, 0, Math.min(...bounds));
+}
+
+/** Whether Chernoff's bound e^{θs}(p/(1 − Σ qⱼe^{−θCⱼ}))^hits says that no s within `steps` can reach the target: known before the work. */
+function outOfReach(
+  steps: number,
+  units: Int32Array,
+  shares: Float64Array,
+  rest: number,
+  hits: number,
+  target: number,
+): boolean {
+  for (let tilt = 1; tilt > 1e-20; tilt /= 2) {
+    const thinned = shares.reduce((sum, share, j) => sum - share * Math.expm1(-tilt * units[j]), rest);
+    if (tilt * steps + hits * Math.log(rest / thinned) < Math.log(target)) return true;
+  }
+  return false;
+}
+
+/** Whether e^{λs}·g(s) is the same over the last span. */
+function settled(ring: Float64Array, mask: number, s: number, span: number, rate: number): boolean {
+  let least = Infinity;
+  let most = 0;
+  for (let back = 0; back < span; back++) {
+    const level = ring[(s - back) & mask] * Math.exp(-rate * back);
+    if (level < least) least = level;
+    if (level > most) most = level;
+  }
+  return most <= least * (1 + 1e-13);
+}
+
+/** base^n as value · 2^exponent, the value between 2⁻⁵⁰⁰ and 1. */
+function scaledPower(base: number, n: number): { value: number; exponent: number } {
+  const chunk = Math.max(1, Math.floor(-STRIDE / Math.log2(base)));
+  let value = 1;
+  let exponent = 0;
+  for (let left = n; left > 0; left -= chunk) {
+    value *= base ** Math.min(chunk, left);
+    if (value < 2 ** -STRIDE) {
+      value *= 2 ** STRIDE;
+      exponent -= STRIDE;
+    }
+  }
+  return { value, exponent };
+}
+
+function refuse(fraction: number): never {
+  const requirement = `large enough for a search within ${MOST_WORK / 1e6} million units of cost (or the costs rounded to a coarser unit)`;
+  throw new DomainError("fraction", fraction, requirement);
+}
