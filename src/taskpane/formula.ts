@@ -1,6 +1,13 @@
 import type { Separators } from "../hosts/port";
 import type { Cell } from "../sheet/cell";
 
+/** A formula and how many cells its result takes. */
+export interface Formula {
+  readonly text: string;
+  readonly rows: number;
+  readonly columns: number;
+}
+
 /** One argument of a formula: an address or other text to stand as it is, a value, or undefined for one left out. */
 export type FormulaArgument = { readonly reference: string } | Exclude<Cell, object | null> | undefined;
 

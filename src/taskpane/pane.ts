@@ -10,6 +10,8 @@ import { keptQuestion } from "./cutoff/question";
 import { button } from "./dom/choice";
 import { element, fill } from "./dom/element";
 import type { PanePart } from "./dom/part";
+import { keptSearch } from "./search/searchQuestion";
+import { searchPart } from "./search/searchPart";
 import { numbersFor } from "./numbers";
 import { observable } from "./observable";
 import { en, type Texts } from "./texts/en";
@@ -27,7 +29,8 @@ export function mountPane(root: HTMLElement, port: Port): void {
 }
 
 async function start(root: HTMLElement, port: Port, texts: Texts): Promise<void> {
-  const kept = await port.readSetting("cutoff").catch(() => undefined);
+  const kept = (key: string) => port.readSetting(key).catch(() => undefined);
+  const [cutoff, searched] = await Promise.all([kept("cutoff"), kept("search")]);
   const context: PaneContext = {
     port,
     call: (name, given) => callFunction(name, given),
@@ -35,18 +38,22 @@ async function start(root: HTMLElement, port: Port, texts: Texts): Promise<void>
     numbers: numbersFor(port.separators(), texts.percentGap),
     column: observable<Column | undefined>(undefined),
     selected: observable<string | undefined>(undefined),
-    question: observable(keptQuestion(kept)),
+    question: observable(keptQuestion(cutoff)),
     answer: observable<CutoffAnswer | undefined>(undefined),
   };
   const selection = observable<Selection>({ kind: "reading" });
   const follower = followSelection(port, context.column, context.selected, selection);
-  const parts = [columnPart(context, follower), cutoffPart(context)];
+  const parts = [
+    columnPart(context, follower),
+    cutoffPart(context),
+    searchPart(context, observable(keptSearch(searched))),
+  ];
   root.lang = "en";
   fill(root, heading(texts, parts), ...parts.map(({ root: section }) => section));
 }
 
 function heading(texts: Texts, parts: readonly PanePart[]): HTMLElement {
-  const names = [texts.scoresHeading, texts.cutoffHeading];
+  const names = [texts.scoresHeading, texts.cutoffHeading, texts.searchHeading];
   return element(
     "header",
     {},

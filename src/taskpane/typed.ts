@@ -21,15 +21,15 @@ export function typedNumber(typed: string, decimal: Decimal): number | undefined
   return Number(pointed);
 }
 
-/** Reads a fraction: `5%`, `5 %`, `0.05`, `0,05`. A bare 5 is asked back, never taken for 5 %. */
-export function typedFraction(typed: string, decimal: Decimal): Typed {
+/** Reads a fraction: `5%`, `5 %`, `0.05`, `0,05`. A bare 5 is asked back, never taken for 5 %. With `whole` 100 % may be typed too. */
+export function typedFraction(typed: string, decimal: Decimal, whole = false): Typed {
   if (typed.trim() === "") return { problem: "empty" };
   const percent = /[%٪﹪％]\s*$/.test(typed);
   const number = typedNumber(typed.replace(/[%٪﹪％]\s*$/, ""), decimal);
   if (number === undefined) return { problem: "no-number" };
   // Through decimal text: 5.7 / 100 is not the 0.057 that a cell would hold.
   const value = percent ? Number(`${number}e-2`) : number;
-  if (value > 0 && value < 1) return { value };
+  if (value > 0 && (value < 1 || (whole && value === 1))) return { value };
   return { problem: !percent && number >= 1 && number < 100 ? "percent-sign-missing" : "not-between" };
 }
 

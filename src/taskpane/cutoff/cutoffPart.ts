@@ -2,6 +2,7 @@ import type { PaneContext } from "../context";
 import { part, type PanePart } from "../dom/part";
 import { answerCutoff } from "./answerCutoff";
 import { answerView } from "./answerView";
+import { closerLook } from "./closerLook";
 import { intoSheet } from "./intoSheet";
 import { questionForm } from "./questionForm";
 
@@ -17,5 +18,12 @@ export function cutoffPart(context: PaneContext): PanePart {
     ask();
     void port.keepSetting("cutoff", asked).catch(() => undefined);
   });
-  return part("cutoff", texts.cutoffHeading, questionForm(context), answerView(context), intoSheet(context));
+  return part(
+    "cutoff",
+    texts.cutoffHeading,
+    questionForm(context),
+    answerView(context),
+    closerLook(context),
+    intoSheet(context),
+  );
 }

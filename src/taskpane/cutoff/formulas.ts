@@ -1,12 +1,5 @@
-import { formulaText, type FormulaArgument } from "../formula";
+import { formulaText, type Formula, type FormulaArgument } from "../formula";
 import type { CutoffQuestion } from "./question";
-
-export interface Formula {
-  readonly text: string;
-  /** How many cells the result takes. */
-  readonly rows: number;
-  readonly columns: number;
-}
 
 export const FORMULA_KINDS = ["report", "cutoff", "limits", "safe", "next"] as const;
 export type FormulaKind = (typeof FORMULA_KINDS)[number];

@@ -20,6 +20,14 @@ export function part(name: string, heading: string, ...children: readonly Child[
   };
 }
 
+/** A fold whose inside is worked out only while it is open: `draw` is called on opening, and by `refresh` while open. */
+export function lazyFold(words: string, draw: () => void, ...children: readonly Child[]) {
+  const root = fold(words, false, ...children);
+  const refresh = () => root.open && draw();
+  root.addEventListener("toggle", refresh);
+  return { root, refresh };
+}
+
 /** What is only shown on request, under its own words. */
 export function fold(words: string, open: boolean, ...children: readonly Child[]): HTMLDetailsElement {
   return element("details", { open }, element("summary", {}, words), ...children);

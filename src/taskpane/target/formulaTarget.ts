@@ -1,10 +1,9 @@
 import { parseAddress } from "../../sheet/address";
 import type { PaneContext } from "../context";
-import type { Formula } from "../cutoff/formulas";
 import { button } from "../dom/choice";
-import { element, fill, newId } from "../dom/element";
+import { element, fill } from "../dom/element";
 import { field } from "../dom/field";
-import { localFormula } from "../formula";
+import { localFormula, type Formula } from "../formula";
 import { cellShown, checkTarget, type TargetCheck } from "./targetCells";
 
 export interface FormulaTarget {
@@ -18,8 +17,7 @@ export function formulaTarget(context: PaneContext): FormulaTarget {
   const { texts, numbers, port, selected } = context;
   let formula: Formula | undefined;
   let reads: string | undefined;
-  const id = newId("formula");
-  const shown = element("textarea", { id, readonly: true, rows: 2, spellcheck: "false", class: "formula" });
+  const shown = element("code", { class: "formula" });
   const answer = element("div", { "aria-live": "polite" });
   const cell = field(texts.targetCell, "", () => fill(answer));
   const say = (words: string, ...more: HTMLElement[]) => fill(answer, element("p", {}, words), ...more);
@@ -73,9 +71,9 @@ export function formulaTarget(context: PaneContext): FormulaTarget {
   const copy = button(
     texts.copy,
     () => {
-      shown.select();
+      getSelection()?.selectAllChildren(shown);
       // Where the pane may not write to the clipboard, the text stands selected for the user's own copy.
-      navigator.clipboard?.writeText(shown.value).then(
+      navigator.clipboard?.writeText(shown.textContent ?? "").then(
         () => (copied.textContent = texts.copied),
         () => undefined,
       );
@@ -85,7 +83,8 @@ export function formulaTarget(context: PaneContext): FormulaTarget {
   const root = element(
     "div",
     { class: "target" },
-    element("div", { class: "field wide" }, element("label", { for: id }, texts.formulaShown), shown),
+    element("p", { class: "formula-label" }, texts.formulaShown),
+    shown,
     element("p", { class: "actions" }, copy, copied),
     element("div", { class: "fields" }, cell.root),
     element(
@@ -104,7 +103,7 @@ export function formulaTarget(context: PaneContext): FormulaTarget {
       reads = range;
       // Cells changed, perhaps by the very formula just put in: what was said of it stays.
       if (same) return;
-      shown.value = next ? localFormula(next.text, numbers.separators) : "";
+      shown.textContent = next ? localFormula(next.text, numbers.separators) : "";
       copied.textContent = "";
       fill(answer);
     },

@@ -1,7 +1,7 @@
 import type { Port } from "../../hosts/port";
 import { formatAddress, parseAddress, type Area } from "../../sheet/address";
+import type { Formula } from "../formula";
 import { isBlank, isCellError, type Cell } from "../../sheet/cell";
-import type { Formula } from "../cutoff/formulas";
 
 /** What stands in the way of a formula at a cell, or nothing. */
 export type TargetCheck =

@@ -1,7 +1,9 @@
 import { enCutoff } from "./en.cutoff";
 import { enPane } from "./en.pane";
+import { enPictures } from "./en.pictures";
+import { enSearch } from "./en.search";
 
-export const en = { ...enPane, ...enCutoff };
+export const en = { ...enPane, ...enCutoff, ...enPictures, ...enSearch };
 
 /** What every language has to say: the same keys, and the same things to put in. */
 export type Texts = {

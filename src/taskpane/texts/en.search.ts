@@ -1,0 +1,71 @@
+/** The words of the search: what it takes, what it costs, when to stop. */
+export const enSearch = {
+  searchHeading: "Search",
+  searchAim: (fraction: string) => `For entries of the top ${fraction}, the share asked for under Cutoff.`,
+  hits: "Hits wanted",
+  searchChance: "Chance to be sure of",
+  arrivals: "Entries arriving a period",
+  arrivalsHint: "if the time matters; a period is a day, a week …",
+  stages: "Stages of assessing one entry",
+  stagesHint: "Everyone reaches the first. Costs are in any unit you like: money, hours.",
+  stageReach: (number: string) => `Share reaching stage ${number}`,
+  stageCost: (number: string) => `Cost of stage ${number}`,
+  addStage: "Add a stage",
+  removeStage: "Take the last one away",
+
+  searchLooks: (looks: string, chance: string) => `Plan for ${looks} looks: enough with a chance of ${chance}`,
+  searchEstimated: (count: string, half: string) =>
+    `It takes into account that the mark is only an estimate from ${count} scores. An even chance takes ${half} looks.`,
+  searchKnown: (expected: string, half: string) =>
+    `${expected} on average, ${half} for an even chance, if the mark is exact. A mark estimated from scores takes more.`,
+  searchAverage: (expected: string) => `With an exact mark the average would be ${expected}.`,
+  searchBudget: (budget: string, chance: string) =>
+    `A budget of ${budget} is enough for the search with a chance of ${chance}; looks that teach the mark come on top.`,
+  searchPeriods: (periods: string, chance: string) =>
+    `It takes no more than ${periods} periods with a chance of ${chance}.`,
+  loadHeading: "Load and cost, on average",
+  loadAll: "all stages",
+  loadStage: "Stage",
+  loadLearning: "While learning",
+  loadSearching: "While searching",
+  loadTotal: "Total",
+  loadCost: "Cost",
+  loadNote: (count: string) => `Learning: the ${count} scores of the column. Without a column nothing is learnt.`,
+
+  chanceTitle: "Chance of a hit by look",
+  chanceTitleHits: (hits: string) => `Chance of ${hits} hits by look`,
+  chanceSentence: (half: string, most: string, chance: string) =>
+    `The chance rises to one half at ${half} looks and to ${chance} at ${most}.`,
+  chanceLooks: "looks",
+  chanceUp: "chance",
+  chanceEstimated: "mark estimated",
+  chanceKnown: "mark known",
+  chancePoint: (chance: string, looks: string) => `${chance} at ${looks}`,
+  chanceTableLooks: "Looks",
+  chanceTableChance: "Chance",
+  chanceTableKnown: "If the mark were known",
+
+  reserveHeading: "When to stop looking",
+  reserveNeeds: "Needs a column of scores of the normal shape.",
+  lookCost: "Cost of a look, in points of the score",
+  looksLeft: "Looks left at most",
+  reserveHigh: (reserve: string) => `Accept the first entry scoring ${reserve} or more.`,
+  reserveLow: (reserve: string) => `Accept the first entry scoring ${reserve} or less.`,
+  reserveWhy:
+    "Below that, going on looking brings more than it costs; above, less. It takes the curve as known: with an estimated one it promises somewhat too much.",
+  scheduleHeading: "The mark as looks run out",
+  scheduleLooks: "Looks left",
+  scheduleAccept: "Accept from",
+  scheduleAcceptLow: "Accept up to",
+  scheduleExpected: "Expected result",
+  scheduleChance: "Chance this look is accepted",
+  scheduleLast: "any",
+
+  searchInto: "Into the sheet",
+  putLooks: "the looks to plan for",
+  putLoad: "load and cost by stage",
+  putBudget: "the budget",
+  putPeriods: "the periods",
+  putReserve: "the score to accept from",
+  putSchedule: "the schedule of marks",
+} as const;
