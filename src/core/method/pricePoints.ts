@@ -18,7 +18,8 @@ export interface PricePoints {
 export function pricePoints(prices: Float64Array, points: number, lowest?: number): PricePoints {
   requirePositive("points", points);
   requireEach(prices, "above 0", (price) => price > 0);
-  const least = lowest ?? prices.reduce((low, price) => (price >= low ? low : price), NaN);
+  // Started at NaN: a price is taken where none was there before, a blank (NaN) never.
+  const least = lowest ?? prices.reduce((low, price) => (low <= price || Number.isNaN(price) ? low : price), NaN);
   if (lowest !== undefined) requirePositive("lowest", lowest);
   requireEach(prices, `at or above lowest (${least})`, (price) => price >= least);
   // points × lowest first, as on paper, unless that leaves the range of numbers.

@@ -10,6 +10,12 @@ describe("pricePoints", () => {
     expect([...points]).toEqual([32, NaN, 40, 20]);
   });
 
+  test("the lowest price is found on either side of a blank, and among none there is none", () => {
+    expect(pricePoints(of(800, NaN, 1600, NaN), 40).lowest).toBe(800);
+    expect(pricePoints(of(NaN, 1600, NaN, 800), 40).lowest).toBe(800);
+    expect([...pricePoints(of(NaN, NaN), 40).points]).toEqual([NaN, NaN]);
+  });
+
   test("the lowest price may be written down beforehand", () => {
     expect([...pricePoints(of(1000), 40, 500).points]).toEqual([20]);
   });
