@@ -1,5 +1,5 @@
 import type { Port } from "../hosts/port";
-import type { Argument, Outcome } from "../sheet/invoke";
+import type { Argument, Invocation, Outcome } from "../sheet/invoke";
 import type { Column } from "./column/readColumn";
 import type { CutoffAnswer } from "./cutoff/answerCutoff";
 import type { CutoffQuestion } from "./cutoff/question";
@@ -8,7 +8,7 @@ import type { Observable } from "./observable";
 import type { Texts } from "./texts/en";
 
 /** Calls a cell function by name, as a cell would; undefined where this build has no such function. */
-export type Call = (name: string, given: readonly Argument[]) => Outcome | undefined;
+export type Call = (name: string, given: readonly Argument[], invocation?: Invocation) => Outcome | undefined;
 
 /** What the parts of the pane share. */
 export interface PaneContext {

@@ -12,6 +12,7 @@ import { element, fill } from "./dom/element";
 import type { PanePart } from "./dom/part";
 import { keptSearch } from "./search/searchQuestion";
 import { searchPart } from "./search/searchPart";
+import { functionsPart } from "./functions/functionsPart";
 import { numbersFor } from "./numbers";
 import { observable } from "./observable";
 import { en, type Texts } from "./texts/en";
@@ -33,7 +34,7 @@ async function start(root: HTMLElement, port: Port, texts: Texts): Promise<void>
   const [cutoff, searched] = await Promise.all([kept("cutoff"), kept("search")]);
   const context: PaneContext = {
     port,
-    call: (name, given) => callFunction(name, given),
+    call: (name, given, invocation) => callFunction(name, given, "null", invocation),
     texts,
     numbers: numbersFor(port.separators(), texts.percentGap),
     column: observable<Column | undefined>(undefined),
@@ -47,13 +48,14 @@ async function start(root: HTMLElement, port: Port, texts: Texts): Promise<void>
     columnPart(context, follower),
     cutoffPart(context),
     searchPart(context, observable(keptSearch(searched))),
+    functionsPart(context),
   ];
   root.lang = "en";
   fill(root, heading(texts, parts), ...parts.map(({ root: section }) => section));
 }
 
 function heading(texts: Texts, parts: readonly PanePart[]): HTMLElement {
-  const names = [texts.scoresHeading, texts.cutoffHeading, texts.searchHeading];
+  const names = [texts.scoresHeading, texts.cutoffHeading, texts.searchHeading, texts.functionsHeading];
   return element(
     "header",
     {},

@@ -79,3 +79,12 @@ export function cellAbove(address: string): string | undefined {
   if (!area || area.top === 0) return undefined;
   return formatAddress({ ...area, top: area.top - 1, bottom: area.top - 1, right: area.left });
 }
+
+/** The address of a block without its first row, where that holds only texts and numbers stand below: headings are no data. */
+export function withoutHeading({ address, values }: Block): string {
+  const area = parseAddress(address);
+  const [first, ...rest] = values;
+  const texts = first !== undefined && first.every((cell) => typeof cell === "string" || isBlank(cell));
+  const numbers = rest.some((row) => row.some((cell) => typeof cell === "number"));
+  return area && texts && numbers ? formatAddress({ ...area, top: area.top + 1 }) : address;
+}

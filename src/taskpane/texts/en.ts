@@ -1,9 +1,10 @@
 import { enCutoff } from "./en.cutoff";
+import { enFunctions } from "./en.functions";
 import { enPane } from "./en.pane";
 import { enPictures } from "./en.pictures";
 import { enSearch } from "./en.search";
 
-export const en = { ...enPane, ...enCutoff, ...enPictures, ...enSearch };
+export const en = { ...enPane, ...enCutoff, ...enPictures, ...enSearch, ...enFunctions };
 
 /** What every language has to say: the same keys, and the same things to put in. */
 export type Texts = {
