@@ -1,9 +1,9 @@
 import { requireCount, requireFinite, requireNotNegative, requirePositive } from "../domain";
 import { normalUpperTail } from "../distribution/normalUpperTail";
+import { directionOf, type Better } from "./better";
 import { MOST_LOOKS } from "./mostLooks";
 import { representable } from "./representable";
 import { unitNormalLoss } from "./unitNormalLoss";
-import { directionOf, type Better } from "./better";
 
 export interface ReserveStep {
   readonly looksLeft: number;

@@ -1,7 +1,7 @@
 import { DomainError, UnsettledError, requireFinite, requireNotNegative, requirePositive } from "../domain";
 import { normalCdf } from "../distribution/normalCdf";
-import { unitNormalLoss } from "./unitNormalLoss";
 import { directionOf, type Better } from "./better";
+import { unitNormalLoss } from "./unitNormalLoss";
 
 export interface ReserveScore {
   /** The reserve in standard units, counted in the direction of better. */
