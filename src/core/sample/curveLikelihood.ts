@@ -34,7 +34,7 @@ function logJacobian({ values }: Sample, { shape, power = 0 }: Curve): number {
   if (shape.kind === "normal") return 0;
   if (shape.kind === "logit") {
     const { low, high } = shape;
-    return compensatedSum(values.map((x) => Math.log((high - low) / (x - low)) - Math.log(high - x)));
+    return compensatedSum(values, (x) => Math.log((high - low) / (x - low) / (high - x)));
   }
-  return (power - 1) * compensatedSum(values.map(Math.log));
+  return (power - 1) * compensatedSum(values, Math.log);
 }

@@ -1,8 +1,9 @@
 import { DomainError } from "../domain";
 import type { Curve } from "./curve";
 import { fitPower } from "./fitPower";
-import { Sample } from "./sample";
-import { logitScale, logRatio, NORMAL_SCALE, powerScale, type Scale } from "./scales";
+import { geometricMean } from "./geometricMean";
+import type { Sample } from "./sample";
+import { logitScale, logScale, NORMAL_SCALE, powerOfLog, powerScale, type Scale } from "./scales";
 import { shapeText, type Shape } from "./shape";
 
 const remembered = new WeakMap<Sample, Map<string, Curve>>();
@@ -29,8 +30,7 @@ export function fitCurve(argument: string, sample: Sample, shape: Shape): Curve 
 }
 
 function fit(argument: string, sample: Sample, shape: Shape): Curve {
-  const { scale, power } = scaleOf(argument, sample, shape);
-  const scaled = scale === NORMAL_SCALE ? sample : sample.mapped(scale.toScale);
+  const { scale, scaled, power } = scaledSample(argument, sample, shape);
   const { mean, sd } = scaled;
   const shownMean = scale.shownMean(mean);
   const shownSd = scale.shownSd(sd);
@@ -45,7 +45,7 @@ function fit(argument: string, sample: Sample, shape: Shape): Curve {
   }
   return {
     shape,
-    ...(shape.kind === "boxcox" && { power: power! }),
+    ...(power !== undefined && { power }),
     powerFitted: shape.kind === "boxcox" && shape.power === undefined,
     count: sample.count,
     mean,
@@ -58,31 +58,34 @@ function fit(argument: string, sample: Sample, shape: Shape): Curve {
   };
 }
 
-function scaleOf(argument: string, sample: Sample, shape: Shape): { scale: Scale; power?: number } {
-  if (shape.kind === "normal") return { scale: NORMAL_SCALE };
+function scaledSample(
+  argument: string,
+  sample: Sample,
+  shape: Shape,
+): { scale: Scale; scaled: Sample; power?: number } {
+  if (shape.kind === "normal") return { scale: NORMAL_SCALE, scaled: sample };
   if (shape.kind === "logit") {
-    const { low, high } = shape;
-    requireInside(argument, sample, shape, (x) => x > low && x < high, `strictly between ${low} and ${high}`);
-    return { scale: logitScale(low, high) };
+    requireInside(argument, sample, shape, shape.low, shape.high);
+    const scale = logitScale(shape.low, shape.high);
+    return { scale, scaled: sample.mapped(scale.toScale) };
   }
-  requireInside(argument, sample, shape, (x) => x > 0, "above 0");
-  const centre = Math.exp(new Sample(sample.values.map(Math.log)).mean);
-  if (shape.kind === "lognormal") return { scale: powerScale(0, centre) };
-  const power = shape.power ?? fitPower(sample.values.map((x) => logRatio(x, centre)));
-  return { scale: powerScale(power, centre), power };
+  requireInside(argument, sample, shape, 0, Infinity);
+  const centre = geometricMean(sample.values);
+  if (shape.kind === "lognormal") {
+    const scale = logScale(centre);
+    return { scale, scaled: sample.mapped(scale.toScale) };
+  }
+  const logs = fitCurve(argument, sample, { kind: "lognormal" }).scaled;
+  const power = shape.power ?? fitPower(logs.values);
+  return { scale: powerScale(power, centre), scaled: logs.mapped(powerOfLog(power)), power };
 }
 
-function requireInside(
-  argument: string,
-  { values, count }: Sample,
-  shape: Shape,
-  inside: (score: number) => boolean,
-  where: string,
-): void {
+function requireInside(argument: string, { values, count }: Sample, shape: Shape, low: number, high: number): void {
   let outside = 0;
   let first = NaN;
-  for (const score of values) if (!inside(score) && outside++ === 0) first = score;
+  for (let i = 0; i < count; i++) if (!(values[i]! > low && values[i]! < high) && outside++ === 0) first = values[i]!;
   if (outside > 0) {
+    const where = high === Infinity ? "above 0" : `strictly between ${low} and ${high}`;
     const came = `${outside} of ${count} ${outside === 1 ? "is" : "are"} not, the first is ${first}`;
     throw new DomainError(argument, first, `numbers ${where} for the shape "${shapeText(shape)}"`, came);
   }

@@ -20,9 +20,9 @@ export interface Moments {
  */
 export function moments({ values, count, mean, sd }: Sample): Moments {
   const n = count;
-  const z = values.map((x) => (x - mean) / sd);
-  const cubes = () => compensatedSum(z.map((v) => v * v * v));
-  const fourths = () => compensatedSum(z.map((v) => v * v * v * v));
+  const squared = (x: number) => ((x - mean) / sd) * ((x - mean) / sd);
+  const cubes = () => compensatedSum(values, (x) => squared(x) * ((x - mean) / sd));
+  const fourths = () => compensatedSum(values, (x) => squared(x) * squared(x));
   return {
     skewness: n < 3 ? undefined : (n / ((n - 1) * (n - 2))) * cubes(),
     excessKurtosis:

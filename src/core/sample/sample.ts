@@ -37,9 +37,7 @@ export class Sample {
   get mean(): number {
     if (this.#mean === undefined) {
       const first = compensatedSum(this.values) / this.count;
-      this.#mean = Number.isFinite(first)
-        ? first + compensatedSum(this.values.map((x) => x - first)) / this.count
-        : first;
+      this.#mean = Number.isFinite(first) ? first + compensatedSum(this.values, (x) => x - first) / this.count : first;
     }
     return this.#mean;
   }
@@ -47,7 +45,7 @@ export class Sample {
   /** Sum of squared deviations from the mean. */
   get sumOfSquares(): number {
     const { mean } = this;
-    return (this.#sumOfSquares ??= compensatedSum(this.values.map((x) => (x - mean) * (x - mean))));
+    return (this.#sumOfSquares ??= compensatedSum(this.values, (x) => (x - mean) * (x - mean)));
   }
 
   /** The sample standard deviation, divisor n − 1. */

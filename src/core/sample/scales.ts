@@ -11,40 +11,46 @@ const finite = (value: number) => (Number.isFinite(value) ? value : NaN);
 
 export const NORMAL_SCALE: Scale = { toScale: same, fromScale: same, shownMean: same, shownSd: same };
 
-/** ln((x − low)/(high − x)), as a difference of logarithms only where neither distance can vanish. */
+/** ln((x − low)/(high − x)); the way back is measured from the nearer bound, next to which a score keeps its digits. */
 export function logitScale(low: number, high: number): Scale {
+  const share = (point: number) => ((high - low) * Math.exp(point)) / (1 + Math.exp(point));
   return {
     toScale: (score) => (score > low && score < high ? Math.log((score - low) / (high - score)) : NaN),
-    fromScale: (point) =>
-      point < 0
-        ? low + (high - low) * (Math.exp(point) / (1 + Math.exp(point)))
-        : high - (high - low) * (Math.exp(-point) / (1 + Math.exp(-point))),
+    fromScale: (point) => (point < 0 ? low + share(point) : high - share(-point)),
     shownMean: same,
     shownSd: same,
   };
 }
 
-/** The logarithm of score / centre; through log1p near the centre, where the quotient has already lost the digits that tell scores apart. */
-export function logRatio(score: number, centre: number): number {
-  const ratio = (score - centre) / centre;
-  return Math.abs(ratio) < 0.5 ? Math.log1p(ratio) : Math.log(score / centre);
-}
-
-/** ((x/c)^λ − 1)/λ for a positive centre c; ln(x/c) where λ is 0. Shown as (x^λ − 1)/λ, or ln x. */
-export function powerScale(power: number, centre: number): Scale {
-  const logCentre = Math.log(centre);
-  const factor = Math.exp(power * logCentre);
-  const atCentre = power === 0 ? logCentre : Math.expm1(power * logCentre) / power;
+/** ln(x/c) for a positive centre c, shown as ln x; through log1p near the centre, where x/c has lost the digits that tell scores apart. */
+export function logScale(centre: number): Scale {
   return {
     toScale: (score) => {
-      const log = score > 0 ? logRatio(score, centre) : NaN;
-      return power === 0 ? log : Math.expm1(power * log) / power;
+      const ratio = score > 0 ? (score - centre) / centre : NaN;
+      return Math.abs(ratio) < 0.5 ? Math.log1p(ratio) : Math.log(score / centre);
     },
-    fromScale: (point) => {
-      const log = power === 0 ? point : power * point > -1 ? Math.log1p(power * point) / power : NaN;
-      return finite(centre * Math.exp(log));
-    },
-    shownMean: (mean) => atCentre + factor * mean,
+    fromScale: (point) => finite(centre * Math.exp(point)),
+    shownMean: (mean) => Math.log(centre) + mean,
+    shownSd: same,
+  };
+}
+
+/** (e^{λy} − 1)/λ of a point y of the logarithmic scale. */
+export function powerOfLog(power: number): (log: number) => number {
+  return power === 0 ? same : (log) => Math.expm1(power * log) / power;
+}
+
+/** ((x/c)^λ − 1)/λ for a positive centre c, shown as (x^λ − 1)/λ. */
+export function powerScale(power: number, centre: number): Scale {
+  const log = logScale(centre);
+  if (power === 0) return log;
+  const ofLog = powerOfLog(power);
+  const logCentre = Math.log(centre);
+  const factor = Math.exp(power * logCentre);
+  return {
+    toScale: (score) => ofLog(log.toScale(score)),
+    fromScale: (point) => (power * point > -1 ? log.fromScale(Math.log1p(power * point) / power) : NaN),
+    shownMean: (mean) => ofLog(logCentre) + factor * mean,
     shownSd: (sd) => factor * sd,
   };
 }
