@@ -33,9 +33,13 @@ export function readGrid(argument: string, range: Range): Grid {
 
 /** Numbers as cells in the shape of the grid; NaN becomes a blank. */
 export function gridCells({ columns }: Grid, values: Float64Array): Cell[][] {
-  return Array.from({ length: values.length / columns }, (_, row) =>
-    Array.from(values.subarray(row * columns, (row + 1) * columns), (value) => (Number.isNaN(value) ? "" : value)),
-  );
+  const cells: Cell[][] = [];
+  for (let start = 0; start < values.length; start += columns) {
+    const row: Cell[] = [];
+    for (let i = start; i < start + columns; i++) row.push(Number.isNaN(values[i]) ? "" : values[i]);
+    cells.push(row);
+  }
+  return cells;
 }
 
 /** Fails, naming the first of them, where a row is neither full nor empty. */

@@ -1,6 +1,5 @@
-import { UnsettledError } from "../domain";
-import { choleskyFactor, choleskySolve } from "../numeric/choleskyFactor";
 import { requireLinkedRatings } from "./requireLinkedRatings";
+import { solvePanel, type Side } from "./solvePanel";
 
 export interface PanelScores {
   readonly ratingCount: number;
@@ -38,7 +37,7 @@ export function panelScores(ratings: Float64Array, raters: number): PanelScores 
   const ratersAreFewer = raters <= entries;
   const fewer = ratersAreFewer ? byRater : byEntry;
   const more = ratersAreFewer ? byEntry : byRater;
-  const fewerEffects = solveFewer(ratings, middle, fewer, more);
+  const fewerEffects = solvePanel(ratings, middle, fewer, more);
   const moreEffects = meansWithout(ratings, middle, fewerEffects, fewer, more);
   const [raterEffects, scores] = ratersAreFewer ? [fewerEffects, moreEffects] : [moreEffects, fewerEffects];
   const surplus = meanOf(raterEffects);
@@ -47,49 +46,6 @@ export function panelScores(ratings: Float64Array, raters: number): PanelScores 
     raterEffects: raterEffects.map((effect) => effect - surplus),
     scores: scores.map((effect) => effect + surplus + middle),
   };
-}
-
-/** One direction of the table: how many lines it has, and how far apart they lie in the array. */
-interface Side {
-  readonly lines: number;
-  readonly step: number;
-}
-
-/** The effects of the shorter side, from the normal equations that are left when the longer one is eliminated. */
-function solveFewer(ratings: Float64Array, middle: number, fewer: Side, more: Side): Float64Array {
-  const rated = Int32Array.from({ length: fewer.lines }, (_, i) => i).filter((i) =>
-    hasRating(ratings, i * fewer.step, more),
-  );
-  const size = rated.length;
-  const matrix = new Float64Array(size * size);
-  const right = new Float64Array(size);
-  const present = new Int32Array(size);
-  for (let line = 0; line < more.lines; line++) {
-    let count = 0;
-    let sum = 0;
-    for (let i = 0; i < size; i++) {
-      const rating = ratings[line * more.step + rated[i] * fewer.step];
-      if (Number.isNaN(rating)) continue;
-      present[count++] = i;
-      sum += rating - middle;
-    }
-    for (let a = 0; a < count; a++) {
-      const i = present[a];
-      const row = i * size;
-      matrix[row + i] += 1;
-      right[i] += ratings[line * more.step + rated[i] * fewer.step] - middle - sum / count;
-      for (let b = 0; b <= a; b++) matrix[row + present[b]] -= 1 / count;
-    }
-  }
-  let trace = 0;
-  for (let i = 0; i < size; i++) trace += matrix[i * size + i];
-  const filling = (trace > 0 ? trace : 1) / (size * size);
-  for (let i = 0; i < matrix.length; i++) matrix[i] += filling;
-  if (choleskyFactor(matrix, size) >= 0) throw new UnsettledError("The panel's equations");
-  choleskySolve(matrix, size, right);
-  const effects = new Float64Array(fewer.lines).fill(NaN);
-  rated.forEach((line, i) => (effects[line] = right[i]));
-  return effects;
 }
 
 /** The effects of the longer side, given the shorter one's: means of what is left of the ratings. */
@@ -111,11 +67,6 @@ function meansWithout(
     }
     return sum / count;
   });
-}
-
-function hasRating(ratings: Float64Array, start: number, along: Side): boolean {
-  for (let i = 0; i < along.lines; i++) if (!Number.isNaN(ratings[start + i * along.step])) return true;
-  return false;
 }
 
 function meanOf(effects: Float64Array): number {
