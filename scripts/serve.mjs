@@ -38,7 +38,8 @@ function fileFor(root, url) {
     const path = decodeURIComponent(new URL(url, "http://localhost").pathname);
     if (path.includes("\0")) return undefined;
     let file = realpathSync(join(root, path));
-    if (statSync(file).isDirectory()) file = realpathSync(join(file, "index.html"));
+    // Without the slash the links of a folder's page would start one folder too high.
+    if (statSync(file).isDirectory() && path.endsWith("/")) file = realpathSync(join(file, "index.html"));
     // A link or an encoded ".." that leads out of the folder is no file of ours.
     return file.startsWith(realpathSync(root) + sep) && statSync(file).isFile() ? file : undefined;
   } catch {

@@ -36,7 +36,7 @@ export async function openTrial(): Promise<void> {
   if (!kept) await port.select(firstColumn);
   showSelectedCell(port, document.getElementById("cell")!);
   // For the browser tests, and for whoever wants to look at the engine from the console.
-  Object.assign(globalThis, { weirmarkTrial: { port, api } });
+  Object.assign(globalThis, { weirmarkTrial: { port, api, call: callFunction } });
   document.body.dataset["state"] = "computed";
   const { mountPane } = await import("../taskpane/pane");
   mountPane(document.getElementById("pane")!, port);

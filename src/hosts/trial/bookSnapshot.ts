@@ -46,6 +46,8 @@ function sheetSnapshot(sheet: BookSheet, index: number): Partial<IWorksheetData>
     columnCount: Math.max(LEAST_COLUMNS, sheet.columnWidths.length + 4),
     columnData: Object.fromEntries(sheet.columnWidths.map((w, column) => [column, { w }])),
     defaultRowHeight: 22,
+    // The line under frozen rows would cut the letters of their last row.
+    rowData: frozen > 0 ? { [frozen - 1]: { h: 26 } } : {},
     freeze: { startRow: frozen, startColumn: -1, ySplit: frozen, xSplit: 0 },
   };
 }

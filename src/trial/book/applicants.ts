@@ -109,9 +109,7 @@ export const applicantsSheet: BookSheet = {
       at: "A3",
       style: "caution",
       cells: [
-        [
-          "A mark over people is no decision. It can hit groups unequally: look at the rates on the right. Local law and licensed practice come first.",
-        ],
+        ["A mark over people is no decision and can hit groups unequally. Local law and licensed practice come first."],
       ],
     },
     {
@@ -146,8 +144,9 @@ export const applicantsSheet: BookSheet = {
       at: "F12",
       style: "note",
       cells: [
-        ["Below four fifths is a sign to look closer, not a finding: with two truly equal groups of 20 the ratio"],
-        ["falls below four fifths nearly half the time. With few people the p-values say how little is known."],
+        ["Below four fifths is a sign to look closer, not a finding: with two truly"],
+        ["equal groups of 20 the ratio falls below it nearly half the time."],
+        ["With few people the p-values say how little is known."],
       ],
     },
   ],

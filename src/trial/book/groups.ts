@@ -15,7 +15,7 @@ function sheet(name: string, title: string, columnWidths: readonly number[], blo
 export const planSheet = sheet(
   "Plan",
   "How many to score first",
-  [440, 88, 24, 190, 88, 24, 190, 96, 110, 190],
+  [400, 72, 24, 190, 72, 24, 190, 96, 110, 190],
   [
     ...answers(4, "Bids to score …", [
       ["until the spread is known to 10 %, with 95 % confidence", "=WEIR.SAMPLES_FOR_SD_PRECISION(10%)"],
@@ -25,18 +25,25 @@ export const planSheet = sheet(
       ["until a mark for 10 % lets through between 5 % and 18 %", "=WEIR.SAMPLES_FOR_CUTOFF_PRECISION(10%,5%,18%)"],
     ]),
     ...answers(11, "What 65 scores buy", [["the spread is known to", "=WEIR.SD_PRECISION(65)", "0.0%"]]),
-    ...table("D4", "A mark for 10 % from 65 scores", "=WEIR.CUTOFF_PRECISION(65,10%)"),
-    ...table("D9", "The bids’ scores", `=WEIR.SCORE_SUMMARY(${SCORES})`),
-    ...table("G4", "Are they normal?", `=WEIR.NORMALITY_CHECK(${SCORES})`),
-    ...table("G9", "Their curve", `=WEIR.SCORE_CURVE(${SCORES})`),
-    ...table("G20", "Which shape fits the prices best", `=WEIR.SHAPE_RANKING(${PRICES})`),
+    ...table("D4", "A mark for 10 % from 65 scores", "=WEIR.CUTOFF_PRECISION(65,10%)", { values: ["0.0%", "0.0%"] }),
+    ...table("D9", "The bids’ scores", `=WEIR.SCORE_SUMMARY(${SCORES})`, {
+      values: ["0", "0", "0.00", "0.00", "0.00", "0.0", "0.0", "0.0", "0.0", "0.0", "0.000", "0.000"],
+    }),
+    ...table("G4", "Are they normal?", `=WEIR.NORMALITY_CHECK(${SCORES})`, { values: ["0.0000", "0.000"] }),
+    ...table("G9", "Their curve", `=WEIR.SCORE_CURVE(${SCORES})`, {
+      values: ["", "0", "0.00", "0.00", "", "0.00", "0.00", "0.000", "0.000"],
+    }),
+    ...table("G20", "Which shape fits the prices best", `=WEIR.SHAPE_RANKING(${PRICES})`, {
+      rows: 3,
+      columns: ["", "0.0", "0.0", "0.000"],
+    }),
   ],
 );
 
 export const marksSheet = sheet(
   "Marks",
   "Where the mark stands",
-  [470, 88, 24, 150, 88],
+  [530, 72, 24, 130, 72],
   [
     ...answers(4, "Take the best 10 % of the bids", [
       [
@@ -46,7 +53,7 @@ export const marksSheet = sheet(
       ],
       ["the safe mark: with 95 % confidence no more than 10 %", `=WEIR.SAFE_CUTOFF(${SCORES},10%)`, "0.00"],
       [
-        "the mark that the next score clears with a chance of 10 %, on average over samples",
+        "the mark that the next score clears with a chance of 10 %, on average",
         `=WEIR.NEXT_SCORE_CUTOFF(${SCORES},10%)`,
         "0.00",
       ],
@@ -63,15 +70,17 @@ export const marksSheet = sheet(
       ],
       ["tolerance factor: 65 scores, 90 % covered, 95 % confidence", "=WEIR.TOLERANCE_FACTOR(65,90%)", "0.0000"],
     ]),
-    ...table("D4", "Limits of the mark", `=WEIR.CUTOFF_LIMITS(${SCORES},10%)`),
-    ...table("D9", "No curve assumed", `=WEIR.RANK_CUTOFF(${SCORES},10%)`),
+    ...table("D4", "Limits of the mark", `=WEIR.CUTOFF_LIMITS(${SCORES},10%)`, { values: ["0.00", "0.00", "0.00"] }),
+    ...table("D9", "No curve assumed", `=WEIR.RANK_CUTOFF(${SCORES},10%)`, {
+      values: ["0.00", "0.00", "0.00", "0.0%"],
+    }),
   ],
 );
 
 export const searchSheet = sheet(
   "Search",
   "How long it takes, and when to stop",
-  [440, 88, 24, 130, 110, 110, 88, 100, 24, 90, 150, 120, 200],
+  [400, 72, 24, 96, 160, 116, 160, 72, 24, 150, 150, 130],
   [
     ...answers(4, "One bid in ten is good enough", [
       ["bids to look at, on average, for 2 of them", "=WEIR.EXPECTED_TRIALS_TO_HIT(10%,2)"],
@@ -86,16 +95,19 @@ export const searchSheet = sheet(
       ["take the first score from, each look costing 0.5 points", "=WEIR.RESERVE_SCORE(64,10,0.5)", "0.00"],
       ["chance of taking the very best of 12, the curve known", "=WEIR.BEST_PICK_CHANCE(12)", "0.0%"],
     ]),
-    ...table("D13", "Six looks left", "=WEIR.RESERVE_SCHEDULE(64,10,6,0.5)"),
-    ...table("J4", "The very best of eight", "=WEIR.BEST_PICK_SCHEDULE(8)"),
-    ...table("J15", "Only ranks are seen, 20 looks", "=WEIR.RANK_ONLY_PLAN(20)"),
+    ...table("D13", "Six looks left", "=WEIR.RESERVE_SCHEDULE(64,10,6,0.5)", {
+      rows: 6,
+      columns: ["", "0.00", "0.00", "0.0%"],
+    }),
+    ...table("J4", "The very best of eight", "=WEIR.BEST_PICK_SCHEDULE(8)", { rows: 8, columns: ["", "", "0.0%"] }),
+    ...table("J15", "Only ranks are seen, 20 looks", "=WEIR.RANK_ONLY_PLAN(20)", { values: ["", "0.0%"] }),
   ],
 );
 
 export const riskSheet = sheet(
   "Risks",
   "What can go wrong",
-  [470, 88, 24, 200, 88, 24, 190, 88],
+  [450, 72, 24, 200, 72],
   [
     {
       at: "A3",
@@ -106,7 +118,7 @@ export const riskSheet = sheet(
     },
     ...answers(5, "A score is not the worth", [
       [
-        "truly in the top 10 % among the 10 % passed, score and worth correlate 0.6",
+        "truly in the top 10 % of those passed, score and worth correlating 0.6",
         "=WEIR.TRUE_TOP_AMONG_PASSED(10%,10%,0.6)",
         "0.0%",
       ],
@@ -116,7 +128,11 @@ export const riskSheet = sheet(
       ["mark with which at most 5 % of those passed are truly below 75", "=WEIR.GUARDED_CUTOFF(75,4.5,64,9)", "0.00"],
       ["raters needed for a reliability of 0.9, one alone having 0.6", "=WEIR.RATERS_NEEDED(0.6,0.9)"],
     ]),
-    ...table("D5", "A plain mark for 10 % from 65 scores", "=WEIR.CUTOFF_ERROR_RATES(65,10%)"),
-    ...table("D10", "9 of 60 passed here, 5 of 62 there", "=WEIR.PASS_RATE_RATIO(9,60,5,62)"),
+    ...table("D5", "A plain mark for 10 % from 65 scores", "=WEIR.CUTOFF_ERROR_RATES(65,10%)", {
+      values: ["0.0%", "0.0%", "0.0%"],
+    }),
+    ...table("D10", "9 of 60 passed here, 5 of 62 there", "=WEIR.PASS_RATE_RATIO(9,60,5,62)", {
+      values: ["0.0%", "0.0%", "0.00", "", "0.000", "0.00", "0.00"],
+    }),
   ],
 );

@@ -1,0 +1,1 @@
+export function hostFiles(origin: string): [path: string, text: string][];
