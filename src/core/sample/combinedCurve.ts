@@ -1,4 +1,5 @@
 import { requireCount, requireFinite, requireNotNegative } from "../domain";
+import { representable } from "../method/representable";
 
 export interface Batch {
   readonly count: number;
@@ -23,12 +24,13 @@ export function combinedCurve(one: Batch, two: Batch): Batch {
     requireNotNegative(`sd_${index + 1}`, batch.sd);
   });
   const count = one.count + two.count;
-  const apart = two.mean - one.mean;
+  const apart = representable("mean_2", two.mean, two.mean - one.mean);
   const mean = one.mean + apart * (two.count / count);
-  // Shares of the whole instead of sums of squares: counts of a million times large squares would overflow first.
+  // In units of the largest part no square overflows, and none vanishes beside it.
+  const unit = Math.max(one.sd, two.sd, Math.abs(apart)) || 1;
   const variance =
-    one.sd * one.sd * ((one.count - 1) / (count - 1)) +
-    two.sd * two.sd * ((two.count - 1) / (count - 1)) +
-    apart * apart * (one.count / count) * (two.count / (count - 1));
-  return { count, mean, sd: Math.sqrt(variance) };
+    (one.sd / unit) ** 2 * ((one.count - 1) / (count - 1)) +
+    (two.sd / unit) ** 2 * ((two.count - 1) / (count - 1)) +
+    (apart / unit) ** 2 * (one.count / count) * (two.count / (count - 1));
+  return { count, mean, sd: unit * Math.sqrt(variance) };
 }

@@ -40,6 +40,7 @@ describe("combinedCurve", () => {
     ["sd_1", { sd: -1 }, {}],
     ["sd_2", {}, { sd: NaN }],
     ["sd_2", {}, { sd: Infinity }],
+    ["mean_2", { mean: -1.5e308 }, { mean: 1.5e308 }],
   ])("refuses a bad %s", (argument, one, two) => {
     const good = { count: 3, mean: 1, sd: 1 };
     expect(() => combinedCurve({ ...good, ...one }, { ...good, ...two })).toThrow(
