@@ -2,7 +2,7 @@ import { isCellError, type Cell } from "../sheet/cell";
 import type { BlankPolicy } from "../sheet/invoke";
 import type { Sheet, Workbook } from "../sheet/workbook";
 import { UnknownFunction } from "./evaluateNode";
-import { Evaluation, STEPS } from "./evaluation";
+import { Evaluation, newBudget } from "./evaluation";
 import { readFormula } from "./readFormula";
 import { intersect } from "./reference";
 import { errorCell, isArray, NotKnown, Reference, UnreadableFormula } from "./value";
@@ -31,7 +31,7 @@ export function evaluate(formula: string, place: FormulaPlace): Answer {
   const { workbook, sheet, row, column, shift = { rows: 0, columns: 0 }, single = false, blanks = "null" } = place;
   try {
     const ast = readFormula(source);
-    const budget = { steps: STEPS };
+    const budget = newBudget();
     const at = new Evaluation({ workbook, sheet, row, column, shift, single, blanks, source, names: [], budget });
     const value = at.value(ast);
     const shown = single && value instanceof Reference ? intersect(value, at) : value;

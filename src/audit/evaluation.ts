@@ -31,11 +31,19 @@ export interface Setting {
   readonly scope?: Scope;
   /** The defined names that are being worked out. */
   readonly names: readonly string[];
-  /** Steps left, for the formula as a whole. */
-  readonly budget: { steps: number };
+  /** What the formula as a whole has left to spend, and the names that it has worked out already. */
+  readonly budget: Budget;
 }
 
-export const STEPS = 20_000_000;
+export interface Budget {
+  steps: number;
+  readonly names: Map<string, Value>;
+}
+
+/** About two seconds' worth. */
+export function newBudget(): Budget {
+  return { steps: 4_000_000, names: new Map() };
+}
 
 /** One formula being evaluated on stored values. */
 export class Evaluation {
@@ -52,7 +60,7 @@ export class Evaluation {
 
   value(node: AstExpression | null): Value {
     const value = node === null ? null : evaluateNode(node, this);
-    this.spend(isArray(value) ? value.length * (value[0]?.length ?? 0) : 1);
+    this.spend(isArray(value) ? 1 + (value.length * (value[0]?.length ?? 0)) / 4 : 1);
     return value;
   }
 

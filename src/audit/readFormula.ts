@@ -57,12 +57,14 @@ function refuseDepth(tokens: readonly Token[]): void {
 
 function reason(failure: unknown, text: string): string {
   const message = failure instanceof Error ? failure.message : String(failure);
-  const open = text.replace(/"[^"]*"/g, "").replace(/[^()]/g, "");
-  const missing = [...open].reduce((depth, bracket) => depth + (bracket === "(" ? 1 : -1), 0);
+  const bare = text.replace(/"[^"]*"/g, '""');
+  const missing = [...bare].reduce((depth, c) => depth + (c === "(" ? 1 : c === ")" ? -1 : 0), 0);
+  if (text.replace(/^=/, "").trim() === "") return "it is empty";
   if (missing > 0) return "a bracket is not closed";
   if (missing < 0) return "a bracket is closed that was never opened";
-  if (message.includes("got ;") || message.includes("Unexpected , operator"))
+  if (message.includes("Unexpected , operator") || bare.replace(/\{[^}]*\}/g, "").includes(";"))
     return "arguments are parted by commas, decimals by a point";
-  if (text.replace(/^=/, "").trim() === "") return "it is empty";
+  if (message.includes("(END)")) return "something stands behind its end";
+  if (message === "Invalid syntax") return "a sign or a value is missing or one too many";
   return message.charAt(0).toLowerCase() + message.slice(1);
 }

@@ -88,15 +88,21 @@ function nameValue(name: DefinedName, names: readonly string[], at: Evaluation):
   const key = `${name.sheet ?? ""}!${name.name.toLowerCase()}`;
   if (names.includes(key)) throw new NotKnown(`the name ${name.name} leads back to itself`);
   if (names.length >= MOST_NAMES_DEEP) throw new NotKnown(`names lead to names more than ${MOST_NAMES_DEEP} deep`);
-  const { row, column } = at.setting;
+  const { row, column, budget } = at.setting;
+  const known = budget.names.get(key);
+  if (known !== undefined) return known;
   const inside = at.with({
     names: [...names, key],
     shift: { rows: row, columns: column },
     source: `=${name.formula}`,
+    sheet:
+      name.sheet === undefined ? at.setting.sheet : (sheetNamed(at.setting.workbook, name.sheet) ?? at.setting.sheet),
     single: false,
     scope: undefined,
   });
-  return inside.value(readFormula(`=${name.formula}`));
+  const value = inside.value(readFormula(`=${name.formula}`));
+  budget.names.set(key, value);
+  return value;
 }
 
 function resolveTable(text: string, at: Evaluation): Value {
