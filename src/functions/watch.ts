@@ -71,7 +71,7 @@ const COMPARISON_LABELS = [
  * @param {any[][]} baseline The scores on which the mark was set; blanks are skipped.
  * @param {any[][]} recent The new scores; blanks are skipped.
  * @param {any} [item] One label alone, such as "Welch p-value". Left out: the whole table.
- * @returns {any[][]} Two columns, label and value: mean shift (recent − baseline), Welch t and its two-sided p-value, ratio of variances (recent/baseline), Brown-Forsythe p-value (empty where the distances from the medians don't vary, as with two scores each), Kolmogorov-Smirnov distance and p-value (exact up to 10,000 pairs of scores, else by the limiting law).
+ * @returns {any[][]} Two columns, label and value: mean shift (recent − baseline), Welch t and its two-sided p-value, ratio of variances (recent/baseline), Brown-Forsythe p-value (empty where the distances from the medians don't vary, as with two scores each), Kolmogorov-Smirnov distance and p-value (exact up to 10,000 pairs of scores, else by the limiting law, which errs on the large side).
  * @choices item "mean shift" "Welch t" "Welch p-value" "ratio of variances" "Brown-Forsythe p-value" "Kolmogorov-Smirnov distance" "Kolmogorov-Smirnov p-value"
  * @question Are this year's scores like last year's?
  * @question Does the mark still fit the new entries?

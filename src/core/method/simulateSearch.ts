@@ -22,7 +22,7 @@ const TWO_TO_32 = 0x100000000;
  * Method     A run draws its learning scores one by one from a standard normal (mean and sd of the true curve cancel out), sets the mark
  *            x̄ + k·s, and looks. A look is played by comparing a uniform number with the fraction q = P(Z > mark) that the mark really lets
  *            through: it passes when U < q, and the score that passed is truly top when U < fraction, for U is that score's upper tail.
- *            Comparing scores with the mark would say the same at five times the price. The first 3/fraction looks of a run are played so,
+ *            Comparing scores with the mark would say the same at three times the price. The first 3/fraction looks of a run are played so,
  *            one by one; if none passed, what is left of the run is drawn in one go from its exact law, the geometric, since looks forget
  *            what came before. So no mark, however badly it came out, can make a run long.
  * Accuracy   against the exact error rates and the exact mean number of looks, within the standard error of the simulation;

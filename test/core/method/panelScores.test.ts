@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { panelScores } from "../../../src/core/method/panelScores";
+import { relativeError } from "../../support/relativeError";
 
 const _ = NaN;
 const table = (...rows: number[][]) => Float64Array.from(rows.flat());
@@ -11,6 +12,42 @@ describe("panelScores", () => {
     [55, 75, 95].forEach((score, i) => expect(scores[i]).toBeCloseTo(score, 11));
     [5, -5].forEach((effect, i) => expect(raterEffects[i]).toBeCloseTo(effect, 11));
     expect(ratingCount).toBe(5);
+  });
+
+  test("twelve entries and four raters with half of the ratings: the exact solution in fractions (Python), to 1e-13", () => {
+    const rows = [
+      [36.7, 40.1, 56.1, _],
+      [_, _, 64.9, 41.2],
+      [43.9, _, _, _],
+      [_, 50.1, _, _],
+      [_, _, 69.4, _],
+      [_, _, _, _],
+      [49.5, _, _, _],
+      [_, 56.9, _, 40.5],
+      [82.8, 33.0, _, 64.8],
+      [52.3, _, 56.8, 71.1],
+      [53.1, _, 66.3, _],
+      [34.0, 79.7, _, 51.5],
+    ];
+    const exact = [
+      43.502572796170725,
+      50.125787794176304,
+      48.47437175907459,
+      51.37405265257279,
+      61.15929397686478,
+      NaN,
+      54.074371759074594,
+      50.533167132030314,
+      62.94690200771174,
+      59.641982449142404,
+      57.866832867969684,
+      57.81356867437841,
+    ];
+    const effects = [-4.574371759074591, -1.2740526525727962, 8.240706023135221, -2.3922816114878342];
+    const { scores, raterEffects } = panelScores(table(...rows), 4);
+    expect(scores[5]).toBeNaN();
+    exact.forEach((score, i) => i !== 5 && expect(relativeError(scores[i], score)).toBeLessThan(1e-13));
+    effects.forEach((effect, i) => expect(relativeError(raterEffects[i], effect)).toBeLessThan(1e-12));
   });
 
   test("where every rater rated every entry, scores are plain means", () => {
