@@ -62,7 +62,7 @@ describe("SIMULATED_SEARCH", () => {
       error: "#VALUE!",
       message: expect.stringMatching(/^learn_count/),
     });
-    expect(performance.now() - started).toBeLessThan(50);
+    expect(performance.now() - started).toBeLessThan(250);
   });
 
   test("the same seed plays the same runs to the bit, another seed others", () => {
