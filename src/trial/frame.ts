@@ -1,4 +1,5 @@
 import { forgetBook } from "../hosts/trial/keptBook";
+import { forgetSettings } from "../hosts/trial/keptSettings";
 
 function part<Kind extends HTMLElement>(id: string): Kind {
   return document.getElementById(id) as Kind;
@@ -15,7 +16,10 @@ export function setUpFrame(): void {
   };
   startOver.addEventListener("click", () => asking(true));
   part("go-on").addEventListener("click", () => asking(false));
-  part("discard").addEventListener("click", () => void forgetBook().finally(() => location.reload()));
+  part("discard").addEventListener("click", () => {
+    forgetSettings();
+    void forgetBook().finally(() => location.reload());
+  });
 
   const choices = [...document.querySelectorAll<HTMLButtonElement>("[data-shows]")];
   for (const choice of choices)

@@ -31,7 +31,7 @@ export async function openTrial(): Promise<void> {
     if (!worked) document.getElementById("kept")!.textContent = "This browser keeps no changes.";
   });
   const pictures = pictureLayer(api, grid, keep);
-  const port = trialPort({ api, univer, messages, pictures, keep, dark: () => scheme.matches });
+  const port = trialPort({ api, univer, messages, pictures, dark: () => scheme.matches });
   // On the first visit the pane has something to answer at once.
   if (!kept) await port.select(firstColumn);
   showSelectedCell(port, document.getElementById("cell")!);

@@ -3,6 +3,8 @@ import type { FUniver } from "@univerjs/core/facade";
 import { keepBook } from "./keptBook";
 
 const QUIET = 400;
+/** What changes the workbook; the engine also reports what it does in its formula line and in its formula memory. */
+const CHANGE = /^sheet\.mutation\.|defined-name/;
 /** What the engine does by itself when it lays a sheet out; none of it is a change that the user made. */
 const LAYOUT = /auto-height|worksheet-active|scroll|selection/;
 
@@ -19,8 +21,7 @@ export function keepChanges(api: FUniver, kept: (worked: boolean) => void): () =
   };
   api.onCommandExecuted((command, options) => {
     if (command.type !== CommandType.MUTATION || options?.fromFormula) return;
-    if (command.id.startsWith("formula.mutation.") || LAYOUT.test(command.id)) return;
-    soon();
+    if (CHANGE.test(command.id) && !LAYOUT.test(command.id)) soon();
   });
   // A page that is left right after a change would lose it.
   document.addEventListener("visibilitychange", () => {

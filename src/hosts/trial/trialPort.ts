@@ -1,10 +1,11 @@
-import { CommandType, type CustomData, type Univer } from "@univerjs/core";
+import { CommandType, type Univer } from "@univerjs/core";
 import type { FUniver } from "@univerjs/core/facade";
 import { FormulaDataModel, type FWorksheet } from "@univerjs/preset-sheets-core";
 import { parseAddress, type Area } from "../../sheet/address";
 import type { Picture, Port } from "../port";
 import { callCells } from "./callCells";
 import { cellData } from "./cellData";
+import { keepSettings, readSettings } from "./keptSettings";
 import type { MessageBook } from "./messageBook";
 import type { PictureLayer } from "./pictureLayer";
 import { readArea, type ReadFrom } from "./readArea";
@@ -15,15 +16,14 @@ export interface TrialHost {
   readonly univer: Univer;
   readonly messages: MessageBook;
   readonly pictures: PictureLayer;
-  /** Called after a change that the engine doesn't know of. */
-  keep(): void;
   dark(): boolean;
 }
 
 /** The port of the trial sheet. */
-export function trialPort({ api, univer, messages, pictures, keep, dark }: TrialHost): Port {
+export function trialPort({ api, univer, messages, pictures, dark }: TrialHost): Port {
   const book = api.getActiveWorkbook()!;
   const settled = settledAfterChanges(api);
+  const settings = readSettings();
   const from: ReadFrom = { formulas: univer.__getInjector().get(FormulaDataModel), messages };
 
   const place = (address: string): { sheet: FWorksheet; area: Area } => {
@@ -103,15 +103,10 @@ export function trialPort({ api, univer, messages, pictures, keep, dark }: Trial
     },
     theme: () => (dark() ? "dark" : "light"),
     separators: () => ({ decimal: ".", argument: "," }),
-    readSetting: async (key) => settings(book.getCustomMetadata())[key],
+    readSetting: async (key) => settings[key],
     async keepSetting(key, value) {
-      const custom = book.getCustomMetadata() ?? {};
-      book.setCustomMetadata({ ...custom, settings: { ...settings(custom), [key]: value } });
-      keep();
+      settings[key] = value;
+      keepSettings(settings);
     },
   };
-}
-
-function settings(custom: CustomData | undefined): Record<string, unknown> {
-  return (custom?.["settings"] as Record<string, unknown> | undefined) ?? {};
 }
