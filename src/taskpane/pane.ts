@@ -16,6 +16,8 @@ import { functionsPart } from "./functions/functionsPart";
 import { numbersFor } from "./numbers";
 import { observable } from "./observable";
 import { en, type Texts } from "./texts/en";
+import { usePart } from "./use/usePart";
+import { watchPart } from "./watch/watchPart";
 import "./pane.css";
 
 /** Puts the pane into an element and lets it work on whatever world the port opens. */
@@ -47,22 +49,20 @@ async function start(root: HTMLElement, port: Port, texts: Texts): Promise<void>
   const parts = [
     columnPart(context, follower),
     cutoffPart(context),
+    usePart(context),
     searchPart(context, observable(keptSearch(searched))),
+    watchPart(context),
     functionsPart(context),
   ];
   root.lang = "en";
-  fill(root, heading(texts, parts), ...parts.map(({ root: section }) => section));
+  fill(root, navigation(texts, parts), ...parts.map(({ root: section }) => section));
 }
 
-function heading(texts: Texts, parts: readonly PanePart[]): HTMLElement {
-  const names = [texts.scoresHeading, texts.cutoffHeading, texts.searchHeading, texts.functionsHeading];
+/** The words that lead to each part. The host keeps the top right corner for its own button. */
+function navigation(texts: Texts, parts: readonly PanePart[]): HTMLElement {
   return element(
-    "header",
-    {},
-    element(
-      "nav",
-      { "aria-label": texts.jumpTo },
-      ...parts.map((one, index) => button(names[index]!, () => one.goTo(), "plain")),
-    ),
+    "nav",
+    { "aria-label": texts.jumpTo },
+    ...parts.map((one) => button(one.heading, () => one.goTo(), "plain")),
   );
 }

@@ -1,6 +1,7 @@
 import { element, newId, type Child } from "./element";
 
 export interface PanePart {
+  readonly heading: string;
   readonly root: HTMLElement;
   /** Brings the part into view and puts the keyboard there: only on the user's own request. */
   goTo(): void;
@@ -12,6 +13,7 @@ export function part(name: string, heading: string, ...children: readonly Child[
   const title = element("h2", { id, tabindex: "-1" }, heading);
   const root = element("section", { class: `part ${name}`, "aria-labelledby": id }, title, ...children);
   return {
+    heading,
     root,
     goTo() {
       title.scrollIntoView({ block: "start" });

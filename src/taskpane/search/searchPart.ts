@@ -10,6 +10,7 @@ import { chancePicture } from "./chancePicture";
 import { reserveForm, searchForm } from "./searchForm";
 import { searchFormulas } from "./searchFormulas";
 import type { SearchQuestion } from "./searchQuestion";
+import { trialView } from "./trialView";
 import { loadTable, scheduleTable } from "./searchTables";
 
 /** The search for entries that clear the mark: looks, load, cost, time, and when to stop. Works without a column too. */
@@ -49,6 +50,7 @@ export function searchPart(context: PaneContext, search: Observable<SearchQuesti
     picture.root,
     load,
     fold(texts.reserveHeading, search.get().lookCost !== undefined, reserveForm(context, search), reserve),
+    trialView(context),
     chooser.root,
   );
 }

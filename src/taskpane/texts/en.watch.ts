@@ -1,0 +1,51 @@
+/** The words of scores over time, and of searches tried out. */
+export const enWatch = {
+  watchHeading: "Over time",
+  driftAbout: "Holds the later scores, in the order of the sheet, against the first ones: is the curve still the same?",
+  driftFirst: "How many count as the first ones",
+  driftFirstHint: (usual: string) => `Left empty: ${usual}.`,
+  driftFew: "Needs at least four scores, and no cell that is none.",
+  driftTitle: (heading: string) => (heading === "" ? "Scores over time" : `Scores over time: ${heading}`),
+  driftOrder: "score number",
+  driftNone: (count: string) => `No drift: the smoothed course of the ${count} later scores stays within its limits.`,
+  driftUp: (at: string) => `The scores have drifted upwards: at score ${at} their smoothed course leaves its limits.`,
+  driftDown: (at: string) =>
+    `The scores have drifted downwards: at score ${at} their smoothed course leaves its limits.`,
+  driftShift: (by: string, higher: boolean, later: string, first: string, p: string) =>
+    `On average the ${later} later scores lie ${by} ${higher ? "higher" : "lower"} than the first ${first} (Welch p = ${p}).`,
+  driftNote:
+    "Each new score counts a fifth; limits are three standard errors wide. The first scores are taken as known: learnt from 60, false alarms are about 1.6 times as frequent, from 30 twice.",
+  driftNumber: "Score number",
+  driftSmoothed: "Smoothed",
+  driftLower: "Lower limit",
+  driftUpper: "Upper limit",
+  driftState: "State",
+  driftInside: "within",
+  driftOutside: "outside",
+
+  tryHeading: "Try the search out",
+  tryAbout: (count: string, fraction: string) =>
+    `Plays the whole thing many times with invented normal scores: learn on ${count}, set the mark for the top ${fraction}, search until the first entry clears it.`,
+  tryLearn: "Learning looks",
+  tryMethod: "Mark",
+  tryRuns: "Runs",
+  trySeed: "Seed",
+  trySeedHint: "the same seed plays the same runs",
+  tryMost: "Looks after which a run gives up",
+  tryStart: "Start",
+  tryCancel: "Cancel",
+  tryProgress: (played: string, runs: string) => `${played} of ${runs} runs played`,
+  tryCancelled: "Cancelled.",
+  tryFailed: (message: string) => `The simulation failed: ${message}`,
+  tryResult: (median: string, ninetieth: string) =>
+    `Half of the runs ended within ${median} searching looks, nine of ten within ${ninetieth}.`,
+  tryAverage: "Average looks",
+  tryMedian: "Median looks",
+  tryNinetieth: "90th percentile looks",
+  tryNotTop: "First hit not truly top",
+  tryNothing: "Found nothing",
+  tryLowest: "Lowest passing fraction (5th percentile)",
+  tryHighest: "Highest passing fraction (95th percentile)",
+  tryTable: "What the runs came to",
+  tryNote: "The average hinges on when a run gives up: read the median.",
+} as const;

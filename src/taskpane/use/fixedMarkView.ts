@@ -1,0 +1,120 @@
+import type { FixedMark, FixedMarkKind } from "../../sheet/fixedMark";
+import type { PaneContext } from "../context";
+import { button, choice } from "../dom/choice";
+import { element, fill } from "../dom/element";
+import { field } from "../dom/field";
+import { fold } from "../dom/part";
+import { figure, table } from "../dom/table";
+import { driftOf, marksOf, markToday, writeMark } from "./fixedMarks";
+
+/** Writing the mark down, its history, and whether newer scores would move it. */
+export function fixedMarkView(context: PaneContext): HTMLElement {
+  const { texts, call, port, answer } = context;
+  let kind: FixedMarkKind = "plain";
+  const drift = element("div", { "aria-live": "polite" });
+  const history = element("div");
+  const proposal = element("p");
+  const message = element("p", { "aria-live": "polite" });
+  const reason = field(texts.markReason, "", () => reason.problem(""), texts.markReasonHint, true);
+
+  const draft = () => {
+    const current = answer.get();
+    const revision = call("RELEASE", ["revision"]);
+    const number = revision && "value" in revision && typeof revision.value === "number" ? revision.value : 0;
+    return current && markToday(current, kind, reason.input.value.trim(), today(), number);
+  };
+  const propose = () => {
+    const mark = draft();
+    proposal.textContent = mark ? texts.markProposal(shownMark(context, mark), context.numbers.count(mark.count)) : "";
+  };
+  const kinds = choice(
+    texts.markKind,
+    [
+      ["plain", texts.plain],
+      ["safe", texts.safe],
+      ["next-score", texts.next],
+    ],
+    kind,
+    (value) => {
+      kind = value as FixedMarkKind;
+      propose();
+    },
+  );
+  const write = async () => {
+    const mark = draft();
+    if (!mark) return;
+    if (mark.reason === "") {
+      reason.problem(texts.markReasonMissing);
+      reason.input.focus();
+      return;
+    }
+    message.textContent = texts.markDone(await writeMark(port, mark));
+    await look();
+  };
+  let turn = 0;
+  const look = async () => {
+    const mine = ++turn;
+    const current = answer.get();
+    const marks = current ? await marksOf(port, current.column) : [];
+    if (mine !== turn) return;
+    const newest = marks[marks.length - 1];
+    fill(drift, newest && current && driftWords(context, newest));
+    fill(history, marks.length > 0 && historyTable(context, marks));
+  };
+  const failing = (work: () => Promise<unknown>) =>
+    work().catch((failure) => (message.textContent = texts.writeFailed(String(failure?.message ?? failure))));
+  const root = fold(
+    texts.markHeading,
+    false,
+    element("p", { class: "quiet" }, texts.markWhy),
+    drift,
+    element("div", { class: "fields" }, kinds.root, reason.root),
+    proposal,
+    element(
+      "p",
+      { class: "actions" },
+      button(texts.markWrite, () => void failing(write)),
+    ),
+    message,
+    history,
+  );
+  answer.watch((current) => {
+    root.hidden = !current?.report;
+    propose();
+    void failing(look);
+  });
+  return root;
+}
+
+function today(): string {
+  const now = new Date();
+  const two = (number: number) => String(number).padStart(2, "0");
+  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
+}
+
+function shownMark({ texts, numbers }: PaneContext, { mark, better }: Pick<FixedMark, "mark" | "better">): string {
+  return better === "low" ? texts.markLow(numbers.full(mark)) : texts.markHigh(numbers.full(mark));
+}
+
+function driftWords(context: PaneContext, mark: FixedMark): HTMLElement {
+  const { texts, numbers, call, answer } = context;
+  const { today: now, count } = driftOf(call, answer.get()!.column, mark);
+  const fixed = texts.markFixed(shownMark(context, mark), mark.date, numbers.count(mark.count));
+  if (now === undefined) return element("p", {}, `${fixed} ${texts.markUnknown}`);
+  const difference = Number((now - mark.mark).toPrecision(10));
+  const words =
+    difference === 0
+      ? texts.markStays(numbers.count(count))
+      : texts.markMoves(numbers.count(count), numbers.full(now), numbers.full(Math.abs(difference)), difference > 0);
+  return element("p", { class: "notice" }, `${fixed} ${words}`);
+}
+
+function historyTable({ texts, numbers }: PaneContext, marks: readonly FixedMark[]): HTMLElement {
+  return table(
+    texts.markHistory,
+    [texts.markDate, texts.markMark, texts.markScores, texts.markReason],
+    [...marks]
+      .reverse()
+      .map(({ date, mark, count, reason }) => [date, figure(numbers.full(mark)), figure(numbers.count(count)), reason]),
+  );
+}
