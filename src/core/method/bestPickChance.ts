@@ -16,7 +16,7 @@ const BERNOULLI = [1 / 12, -1 / 720, 1 / 30240, -1 / 1209600];
  * Edges      1 look gives 1; falls to 0.580164… as looks grow.
  * Method     The double sum follows from Gilbert and Mosteller's integral once the equation of the percentiles is put in; all its terms are
  *            positive, so nothing cancels. The inner sum is smooth in r and is taken by Euler and Maclaurin's formula: n steps, not n².
- * Accuracy   relative error ≤ 1e-13 (test/core/method/bestPickChance.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/bestPick.test.ts).
  * Reference  Gilbert & Mosteller (1966), J. Amer. Statist. Assoc. 61, sec. 3.
  *
  * @throws {DomainError} if looks is outside its domain.

@@ -19,7 +19,7 @@ export interface BestPickStep {
  * Domain     looks 1 … 10,000.
  * Method     With d = exp(−a/j) the sum is ∫₀ᵃ (eʷ − 1)/(j(1 − e^(−w/j))) dw, a smooth integrand on 0 … 0.81: 12 Gauss-Legendre points
  *            give all digits for any j, where the sum itself costs j terms and cancels in d⁻ⁱ − 1. Newton's steps start from the a before.
- * Accuracy   relative error ≤ 1e-14 (test/core/method/bestPickSchedule.test.ts).
+ * Accuracy   relative error ≤ 1e-14 (test/core/method/bestPick.test.ts).
  * Reference  Gilbert & Mosteller (1966), J. Amer. Statist. Assoc. 61, sec. 3.
  *
  * @throws {DomainError} if looks is outside its domain.

@@ -18,7 +18,7 @@ export interface TrueScoreChance {
  *
  * Domain     score, limit, mean finite; errorSd, trueSd > 0.
  * Method     Closed form; the expected true score is reckoned from whichever of score and mean it is nearer to.
- * Accuracy   relative error ≤ 1e-13 for a gap below 5 (test/core/method/chanceTrueScoreClears.test.ts).
+ * Accuracy   relative error ≤ 1e-13 for a gap below 5 (test/core/method/guardedCutoff.test.ts).
  * Reference  JCGM 106:2012, Evaluation of measurement data – The role of measurement uncertainty in conformity assessment, 7.
  *
  * @throws {DomainError} if an argument is outside its domain.

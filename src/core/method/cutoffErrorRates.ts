@@ -28,7 +28,7 @@ export interface CutoffErrorRates {
  * Edges      the error rates fall to 0 like 1/√count for "plain" and "next".
  * Method     P(X > T) is a t tail. E[(Φ̄(T) − p)⁺] = ∫ φ(x)·P(T < x) dx over x < z, and likewise beyond z, with P(T < x) a noncentral t
  *            tail: all terms positive, where Φ̄(T) − p would cancel. Gauss-Legendre panels of one standard error from z outwards.
- * Accuracy   relative error ≤ 1e-11 for count 2 … 1e6, fraction 1e-6 … 0.99 (test/core/method/cutoffErrorRates.test.ts).
+ * Accuracy   relative error ≤ 1e-12 for count 2 … 1e6, fraction 1e-6 … 0.99 (test/core/method/cutoffErrorRates.test.ts).
  * Reference  the distribution of T: Owen (1968), Technometrics 10(3).
  *
  * @throws {DomainError} if an argument is outside its domain.

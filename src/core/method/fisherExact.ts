@@ -13,7 +13,7 @@ const SLACK = 1e-7;
  * Edges      all or nobody passed on both sides gives 1.
  * Method     The probabilities rise to the mode and fall after it, so each side's boundary is found by halving and its tail taken whole:
  *            some 40 probabilities for a million people, where adding up table by table takes a million.
- * Accuracy   relative error ≤ 1e-12 (test/core/method/fisherExact.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/fisherExact.test.ts).
  * Reference  Fisher (1935), The Design of Experiments, ch. 2; the two-sided rule: Freeman & Halton (1951), Biometrika 38.
  *
  * @throws {DomainError} if an argument is outside its domain.

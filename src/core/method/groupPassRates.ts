@@ -23,7 +23,7 @@ export interface GroupPassRate extends GroupCount {
  * Domain     one or more groups, assessed ≥ 1, 0 ≤ passed ≤ assessed.
  * Edges      the highest itself has p-value 1; of several highest the first counts as such. Nobody passed anywhere: no ratio.
  * Method     Rates are ranked and held against four fifths in whole numbers. Equal counts are tested once.
- * Accuracy   relative error ≤ 1e-12 (test/core/method/groupPassRates.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/passRates.test.ts).
  * Reference  29 CFR 1607.4 D; Fisher (1935); Holm (1979), Scandinavian J. Statistics 6.
  */
 export function groupPassRates(groups: readonly GroupCount[]): readonly GroupPassRate[] {

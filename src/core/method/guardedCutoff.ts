@@ -23,7 +23,7 @@ export interface GuardedCutoff {
  * Edges      no answer where the risk is met without any mark.
  * Method     The risk falls as the mark rises (monotone likelihood ratio), so there is one root. It lies above −40, where the mark
  *            lets everyone pass, and below the score at which the chance of being short is maxWrong itself, since those above it are safer.
- * Accuracy   relative error of the mark's distance from the mean ≤ 1e-11 (test/core/method/guardedCutoff.test.ts).
+ * Accuracy   relative error of the mark's distance from the mean ≤ 1e-12 (test/core/method/guardedCutoff.test.ts).
  * Reference  JCGM 106:2012, 9 (there the joint risks; this is the conditional one).
  *
  * @throws {DomainError} if an argument is outside its domain. @throws {NoAnswerError} where no mark is needed.

@@ -22,7 +22,7 @@ export const MOST_PEOPLE = 1e12;
  * Domain     assessed whole, 1 … 1e12; passed whole, 0 … assessed; 0 < confidence < 1.
  * Edges      equal rates: a over b. Nobody passed on either side: no ratio, not below.
  * Method     Which rate is lower and whether 5·lower < 4·higher are decided in whole numbers: 48/60 against 4/5 must not hang on a rounding.
- * Accuracy   relative error ≤ 1e-12 (test/core/method/passRateRatio.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/passRates.test.ts).
  * Reference  29 CFR 1607.4 D (four fifths); Koopman (1984), Biometrics 40; Fisher (1935).
  *
  * @throws {DomainError} if an argument is outside its domain.

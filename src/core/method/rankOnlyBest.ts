@@ -16,7 +16,7 @@ export interface RankOnlyBest {
  * Domain     looks 1 … 10,000.
  * Edges      1 look: pass over none, chance 1. 2 looks: 0 and 1 come to the same, the smaller is given.
  * Method     The harmonic sum is built from its small end.
- * Accuracy   relative error ≤ 1e-14 (test/core/method/rankOnlyBest.test.ts).
+ * Accuracy   relative error ≤ 1e-14 (test/core/method/rankOnly.test.ts).
  * Reference  Gilbert & Mosteller (1966), J. Amer. Statist. Assoc. 61, sec. 2.
  *
  * @throws {DomainError} if looks is outside its domain.

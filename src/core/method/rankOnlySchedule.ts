@@ -18,7 +18,7 @@ export interface RankOnlySchedule {
  * Edges      the last look is taken, whatever its rank.
  * Method     Backwards: C(i − 1) = [(n + 1)/(i + 1)·S(S + 1)/2 + (i − S)·C(i)]/i, S = ⌊C(i)(i + 1)/(n + 1)⌋, since a rank is 1 … i with
  *            equal chances: one step a look, where summing over the ranks would take n²/2.
- * Accuracy   relative error ≤ 1e-13 (test/core/method/rankOnlySchedule.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/rankOnly.test.ts).
  * Reference  Chow, Moriguti, Robbins & Samuels (1964), Israel J. Math. 2.
  *
  * @throws {DomainError} if looks is outside its domain.

@@ -14,7 +14,7 @@ const SLACK = 1e-12;
  *
  * Domain     single and target reliability strictly between 0 and 1.
  * Edges      1 where one rater is enough.
- * Accuracy   exact, whole numbers on paper included (test/core/method/ratersNeeded.test.ts).
+ * Accuracy   exact, whole numbers on paper included (test/core/method/scoreReliability.test.ts).
  * Reference  Spearman (1910) and Brown (1910), British J. Psychology 3.
  *
  * @throws {DomainError} if an argument is outside its domain. @throws {NoAnswerError} where the number is beyond counting.

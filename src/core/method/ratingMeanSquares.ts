@@ -19,7 +19,7 @@ const ROUNDING = 1e-14;
  * Domain     ratings row by row, at least 2 rows and 2 columns of finite numbers.
  * Edges      no answer where every rating is entry + rater exactly: no residual is left to judge by.
  * Method     Sums of squared deviations, never differences of sums of squares; the first rating is taken off all before.
- * Accuracy   relative error ≤ 1e-12 (test/core/method/scoreReliability.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/scoreReliability.test.ts).
  * Reference  Shrout & Fleiss (1979), Psychological Bulletin 86, table 2.
  *
  * @throws {DomainError} if an argument is outside its domain. @throws {NoAnswerError} without a residual.

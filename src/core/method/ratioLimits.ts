@@ -15,7 +15,7 @@ export interface RatioLimits {
  * Edges      x1 = 0 has the lower limit 0; rates of 1 need no correction.
  * Method     Roots in ln θ left and right of the ratio seen. For θ ≤ 1 the fitted 1 − rate 2 comes from a quadratic without subtraction and
  *            1 − rate 1 = (1 − θ) + θ(1 − rate 2); for θ > 1 the sides are exchanged: no digits are lost next to rates of 0 or 1.
- * Accuracy   relative error ≤ 1e-12 (test/core/method/ratioLimits.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/ratioLimits.test.ts).
  * Reference  Koopman (1984), Biometrics 40.
  */
 export function ratioLimits(x1: number, n1: number, x2: number, n2: number, confidence: number): RatioLimits {
@@ -25,14 +25,11 @@ export function ratioLimits(x1: number, n1: number, x2: number, n2: number, conf
   const seen = Math.log(Math.max(x1, 0.5) / n1) - Math.log(x2 / n2);
   const stride = z * Math.sqrt(1 / Math.max(x1, 0.5) + 1 / x2) + 1e-9;
   const inside = x1 > 0 ? seen : walk(seen, -stride, (at) => beyond(at) < 0);
-  const limit = (direction: number) =>
-    Math.exp(
-      findRoot(
-        beyond,
-        inside,
-        walk(inside + direction * stride, direction * stride, (at) => beyond(at) > 0),
-      ),
-    );
+  const limit = (direction: number) => {
+    const outside = walk(inside + direction * stride, direction * stride, (at) => beyond(at) > 0);
+    // At a confidence next to 0 the interval is narrower than the rounding of the chi-square: it is the ratio itself.
+    return Math.exp(beyond(inside) < 0 ? findRoot(beyond, inside, outside) : inside);
+  };
   return { lower: x1 > 0 ? limit(-1) : 0, upper: limit(1) };
 }
 

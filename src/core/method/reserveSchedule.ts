@@ -20,7 +20,7 @@ export interface ReserveStep {
  * Domain     mean, fallback finite; sd > 0; looks 1 … 10,000; lookCost ≥ 0.
  * Edges      "low" is the mirror image: scores count as costs.
  * Method     In standard units w: E[max(Z, w)] = w + ψ(w) for w ≥ 0, and ψ(−w) for w < 0, which is the same without the cancellation.
- * Accuracy   relative error ≤ 1e-12 of (W − mean)/sd (test/core/method/reserveSchedule.test.ts).
+ * Accuracy   relative error ≤ 1e-13 of (W − mean)/sd (test/core/method/reserveSchedule.test.ts).
  * Reference  Moser (1956), Scripta Math. 22; Guttman (1960), Canad. Math. Bull. 3.
  *
  * @returns steps with the most looks left first.

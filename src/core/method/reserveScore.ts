@@ -21,7 +21,7 @@ const MOST_STEPS = 2000;
  * Edges      "low" is the mirror image about 0: scores count as costs.
  * Method     In u = (z − mean)/sd: discount·ψ(u) − (1 − discount)·u = (discount·lookCost + (1 − discount)·mean)/sd. The left side falls
  *            and is convex, so Newton's steps from a point left of the root only ever go right and cannot overshoot; −κ is such a point.
- * Accuracy   relative error ≤ 1e-12 of (z − mean)/sd (test/core/method/reserveScore.test.ts).
+ * Accuracy   relative error ≤ 1e-13 of (z − mean)/sd (test/core/method/reserveScore.test.ts).
  * Reference  DeGroot (1970), Optimal Statistical Decisions, ch. 13.
  *
  * @throws {DomainError} if an argument is outside its domain.

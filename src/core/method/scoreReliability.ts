@@ -24,7 +24,7 @@ export interface ScoreReliability extends RatingMeanSquares {
  * Edges      a form whose divisor is not above 0 is undefined.
  * Method     Ratios of mean squares; limits from F. ICC(2,1) with Satterthwaite's degrees of freedom, ICC(2,k) by stepping those up:
  *            these two are approximate. F(1 − α/2; a, b) is taken as 1/F(α/2; b, a), which keeps the digits of a small α.
- * Accuracy   relative error ≤ 1e-12 (test/core/method/scoreReliability.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/scoreReliability.test.ts).
  * Reference  Shrout & Fleiss (1979), Psychological Bulletin 86; McGraw & Wong (1996), Psychological Methods 1.
  *
  * @throws {DomainError} if an argument is outside its domain. @throws {NoAnswerError} where the ratings leave no residual.

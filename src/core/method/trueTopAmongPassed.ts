@@ -23,7 +23,7 @@ export function requireValidity(validity: number): void {
  * Domain     0 < trueFraction, passFraction < 1; −1 ≤ validity ≤ 1.
  * Edges      validity 1: min(1, true/pass); −1: max(0, (true + pass − 1)/pass); 0: true.
  * Method     the upper tail of the bivariate normal; the edges in closed form, exactly.
- * Accuracy   relative error ≤ 1e-12 (test/core/method/trueTopAmongPassed.test.ts).
+ * Accuracy   relative error ≤ 1e-13 (test/core/method/trueTopAmongPassed.test.ts).
  * Reference  Taylor & Russell (1939), J. Applied Psychology 23.
  *
  * @throws {DomainError} if an argument is outside its domain.

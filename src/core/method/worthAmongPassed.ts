@@ -14,7 +14,7 @@ export interface WorthAmongPassed {
  * Mean true worth, in standard units, of those passed on a score: validity·φ(z)/passFraction, z = z(1 − passFraction).
  *
  * Domain     0 < passFraction < 1; −1 ≤ validity ≤ 1.
- * Accuracy   relative error ≤ 1e-14 (test/core/method/worthAmongPassed.test.ts).
+ * Accuracy   relative error ≤ 1e-14 (test/core/method/trueTopAmongPassed.test.ts).
  * Reference  Naylor & Shine (1965), J. Industrial Psychology 3.
  *
  * @throws {DomainError} if an argument is outside its domain.

@@ -17,9 +17,9 @@ describe("reserveSchedule", () => {
         const step = steps[looks - left]!;
         expect(step.looksLeft).toBe(left);
         if (mark === null) expect(step.mark).toBeUndefined();
-        else expect(relativeError(units(step.mark!), units(mark))).toBeLessThanOrEqual(1e-12);
-        expect(relativeError(units(step.expectedResult), units(expected))).toBeLessThanOrEqual(1e-12);
-        expect(relativeError(step.acceptChance, chance)).toBeLessThanOrEqual(1e-12);
+        else expect(relativeError(units(step.mark!), units(mark))).toBeLessThanOrEqual(1e-13);
+        expect(relativeError(units(step.expectedResult), units(expected))).toBeLessThanOrEqual(1e-13);
+        expect(relativeError(step.acceptChance, chance)).toBeLessThanOrEqual(1e-13);
       }
     },
   );

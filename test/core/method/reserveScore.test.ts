@@ -13,7 +13,7 @@ describe("reserveScore", () => {
     "mean %d, sd %d, look_cost %d, discount %d, better %s agrees with halving in 60 digits",
     (mean, sd, cost, discount, better, expected) => {
       const { score } = reserveScore(mean, sd, cost, discount, better);
-      expect(relativeError((score - mean) / sd, (expected - mean) / sd)).toBeLessThanOrEqual(1e-12);
+      expect(relativeError((score - mean) / sd, (expected - mean) / sd)).toBeLessThanOrEqual(1e-13);
     },
   );
 
