@@ -82,8 +82,10 @@ function isRange(argument: Argument): argument is Range {
   return Array.isArray(argument);
 }
 
-function asMatrix(argument: Argument, blanks: BlankPolicy): Cell[][] {
+function asMatrix(argument: Argument, blanks: BlankPolicy): Range {
   const range = isRange(argument) ? argument : [[argument]];
+  // Functions only read, and a hole counts as a blank like null: copying a column would cost as much as reading it.
+  if (blanks === "null") return range;
   return range.map((row) => row.map((cell) => handedBlank(cell, blanks)));
 }
 
