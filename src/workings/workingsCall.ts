@@ -37,15 +37,45 @@ export class WorkingsCall {
   text(name: string, fallback = ""): string {
     if (!this.isGiven(name)) return fallback;
     const typed = this.texts[this.place(name)];
-    return typed ?? literalText(this.values[this.place(name)]);
+    return typed === undefined ? literalText(this.values[this.place(name)]) : operandText(typed);
   }
 
   /** What stands for the first cell of the argument: of a range, the address of that one cell. */
   firstCellText(name: string): string {
-    const text = this.text(name);
-    const area = parseAddress(text);
-    if (area) return formatAddress({ ...area, bottom: area.top, right: area.left });
-    return literalText(this.cell(name));
+    return this.partText(name, 0, 0);
+  }
+
+  /** What stands for a part of the argument, rows and columns counted from 0, ends included: its address, else its values. */
+  partText(name: string, top: number, left: number, bottom = top, right = left): string {
+    const area = parseAddress(this.texts[this.place(name)] ?? "");
+    if (area) {
+      const [row, column] = [area.top, area.left];
+      return formatAddress({
+        ...area,
+        top: row + top,
+        left: column + left,
+        bottom: row + bottom,
+        right: column + right,
+      });
+    }
+    const part = this.range(name)
+      .slice(top, bottom + 1)
+      .map((row) => row.slice(left, right + 1));
+    return part.length === 1 && part[0]!.length === 1 ? literalText(part[0]![0]) : literalText(part);
+  }
+
+  /** The first cell of the argument that holds something: in a range of blanks the first one. */
+  firstFilled(name: string): {
+    readonly row: number;
+    readonly column: number;
+    readonly cell: Cell;
+    readonly text: string;
+  } {
+    const range = this.range(name);
+    const row = range.findIndex((cells) => cells.some((cell) => !isBlank(cell)));
+    const column = row < 0 ? 0 : range[row]!.findIndex((cell) => !isBlank(cell));
+    const [top, left] = [Math.max(row, 0), column];
+    return { row: top, column: left, cell: range[top]![left], text: this.partText(name, top, left) };
   }
 
   private place(name: string): number {
@@ -56,6 +86,18 @@ export class WorkingsCall {
 }
 
 export type Workings = (call: WorkingsCall) => readonly Step[];
+
+/** An argument as typed, in parentheses where an operator in it would be torn apart by what stands around it: `B2+1` in a formula `1-…`. */
+function operandText(typed: string): string {
+  const plain = typed.replace(/"[^"]*"|'[^']*'/g, "");
+  let depth = 0;
+  for (const sign of plain) {
+    if ("({[".includes(sign)) depth++;
+    else if (")}]".includes(sign)) depth--;
+    else if (depth === 0 && "+-*/^&=<> ,".includes(sign)) return `(${typed})`;
+  }
+  return typed;
+}
 
 /** A value as a literal of a formula: 0.05, "low", TRUE, {1,2;3,4}. Blank cells of a range are "". */
 export function literalText(value: Argument): string {
