@@ -20,7 +20,8 @@ export function binScores(sorted: Float64Array): Bins {
   if (!(span > 0)) return { start: low - 0.5, width: 1, counts: Int32Array.of(count) };
   const spread = sorted[Math.floor(0.75 * (count - 1))]! - sorted[Math.floor(0.25 * (count - 1))]!;
   const wanted = spread > 0 ? span / ((2 * spread) / Math.cbrt(count)) : Math.log2(count) + 1;
-  const edges = ticks(low, high, Math.min(Math.max(wanted, 5), MOST_BINS));
+  // Round widths come in steps of two to two and a half: ask for a little more, so that it is rather too fine than too coarse.
+  const edges = ticks(low, high, Math.min(Math.max(1.5 * wanted, 5), MOST_BINS));
   const width = edges.length > 1 ? edges[1]! - edges[0]! : span;
   const start = Math.floor(low / width) * width;
   const counts = new Int32Array(Math.floor((high - start) / width) + 1);

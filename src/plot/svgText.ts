@@ -1,14 +1,18 @@
 import { FONT, paint, PAPER } from "./paint";
 import type { Part, PictureModel, Role } from "./picture";
 
-/** The picture as SVG that stands alone: title and description inside, paper behind, no script, no style sheet, no outside reference. */
-export function svgText(picture: PictureModel): string {
-  const { width, height, title, description, parts } = picture;
+/**
+ * The picture as SVG that stands alone: title and description inside, paper behind, no script, no style sheet, no outside reference.
+ * `margin` is room around it, for a picture that leaves the pane.
+ */
+export function svgText(picture: PictureModel, margin = 0): string {
+  const { title, description, parts } = picture;
+  const [width, height] = [picture.width + 2 * margin, picture.height + 2 * margin];
   return [
-    `<svg xmlns="http://www.w3.org/2000/svg" width="${width}" height="${height}" viewBox="0 0 ${width} ${height}" role="img"`,
+    `<svg xmlns="http://www.w3.org/2000/svg" width="${width}" height="${height}" viewBox="${0 - margin} ${0 - margin} ${width} ${height}" role="img"`,
     ` aria-label="${escape(`${title}. ${description}`)}" font-family="${FONT}">`,
     `<title>${escape(title)}</title><desc>${escape(description)}</desc>`,
-    `<rect class="paper" width="${width}" height="${height}" fill="${PAPER}"/>`,
+    `<rect class="paper" x="${0 - margin}" y="${0 - margin}" width="${width}" height="${height}" fill="${PAPER}"/>`,
     ...parts.map(partText),
     "</svg>",
   ].join("");

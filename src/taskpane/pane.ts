@@ -1,5 +1,5 @@
-import type { Port } from "../hosts/port";
 import { callFunction } from "../functions/call";
+import type { Port } from "../hosts/port";
 import { columnPart } from "./column/columnPart";
 import { followSelection, type Selection } from "./column/followSelection";
 import type { Column } from "./column/readColumn";
@@ -7,15 +7,16 @@ import type { PaneContext } from "./context";
 import type { CutoffAnswer } from "./cutoff/answerCutoff";
 import { cutoffPart } from "./cutoff/cutoffPart";
 import { keptQuestion } from "./cutoff/question";
-import { button } from "./dom/choice";
+import { button, choice } from "./dom/choice";
 import { element, fill } from "./dom/element";
 import type { PanePart } from "./dom/part";
-import { keptSearch } from "./search/searchQuestion";
-import { searchPart } from "./search/searchPart";
 import { functionsPart } from "./functions/functionsPart";
 import { numbersFor } from "./numbers";
 import { observable } from "./observable";
-import { en, type Texts } from "./texts/en";
+import { searchPart } from "./search/searchPart";
+import { keptSearch } from "./search/searchQuestion";
+import type { Texts } from "./texts/en";
+import { languageFor, languages } from "./texts/languages";
 import { usePart } from "./use/usePart";
 import { watchPart } from "./watch/watchPart";
 import "./pane.css";
@@ -28,20 +29,23 @@ export function mountPane(root: HTMLElement, port: Port): void {
   // Not every host tells when its theme changes: look again when the user comes back, and when the system changes.
   window.addEventListener("focus", followTheme);
   matchMedia("(prefers-color-scheme: dark)").addEventListener("change", followTheme);
-  void start(root, port, en);
+  void open(root, port);
 }
 
-async function start(root: HTMLElement, port: Port, texts: Texts): Promise<void> {
+/** Builds the pane with what was kept in the workbook; once more when the language changes, with the column that is in hand. */
+async function open(root: HTMLElement, port: Port, inHand?: Column): Promise<void> {
   const kept = (key: string) => port.readSetting(key).catch(() => undefined);
-  const [cutoff, searched] = await Promise.all([kept("cutoff"), kept("search")]);
+  const [asked, searched, chosen] = await Promise.all([kept("cutoff"), kept("search"), kept("language")]);
+  const language = languageFor(chosen, navigator.languages);
+  const texts = languages[language]!;
   const context: PaneContext = {
     port,
     call: (name, given, invocation) => callFunction(name, given, "null", invocation),
     texts,
     numbers: numbersFor(port.separators(), texts.percentGap),
-    column: observable<Column | undefined>(undefined),
+    column: observable<Column | undefined>(inHand),
     selected: observable<string | undefined>(undefined),
-    question: observable(keptQuestion(cutoff)),
+    question: observable(keptQuestion(asked)),
     answer: observable<CutoffAnswer | undefined>(undefined),
   };
   const selection = observable<Selection>({ kind: "reading" });
@@ -54,8 +58,13 @@ async function start(root: HTMLElement, port: Port, texts: Texts): Promise<void>
     watchPart(context),
     functionsPart(context),
   ];
-  root.lang = "en";
-  fill(root, navigation(texts, parts), ...parts.map(({ root: section }) => section));
+  const speak = (code: string) => {
+    follower.stop();
+    const again = () => open(root, port, context.column.get());
+    port.keepSetting("language", code).then(again, again);
+  };
+  root.lang = language;
+  fill(root, navigation(texts, parts), ...parts.map((one) => one.root), languageChoice(texts, language, speak));
 }
 
 /** The words that lead to each part. The host keeps the top right corner for its own button. */
@@ -65,4 +74,9 @@ function navigation(texts: Texts, parts: readonly PanePart[]): HTMLElement {
     { "aria-label": texts.jumpTo },
     ...parts.map((one) => button(one.heading, () => one.goTo(), "plain")),
   );
+}
+
+function languageChoice(texts: Texts, language: string, speak: (code: string) => void): HTMLElement {
+  const options = Object.entries(languages).map(([code, { languageName }]) => [code, languageName] as const);
+  return element("footer", { class: "fields" }, choice(texts.language, options, language, speak).root);
 }

@@ -1,9 +1,12 @@
 import { svgText } from "../../plot/svgText";
 import type { PictureModel, Size } from "../../plot/picture";
+import { formatAddress, parseAddress } from "../../sheet/address";
 import type { PaneContext } from "../context";
 import { button } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { fold } from "../dom/part";
+import { overlap } from "../target/overlap";
+import { freeColumn } from "../target/freeColumn";
 
 export interface DrawnPicture {
   readonly model: (size: Size) => PictureModel;
@@ -23,6 +26,7 @@ const LEAST_WIDTH = 240;
 const MOST_WIDTH = 640;
 /** What a saved picture measures: the same on every screen. */
 const SAVED: Size = { width: 640, height: 320 };
+const SAVED_MARGIN = 16;
 
 /** A picture with its sentence below, as a table on request, and the ways to take it along. */
 export function pictureFigure(context: PaneContext): PictureFigure {
@@ -41,7 +45,8 @@ export function pictureFigure(context: PaneContext): PictureFigure {
 
   const saved = () => {
     const model = shown!.model(SAVED);
-    return { name: model.title, svg: svgText(model), ...SAVED };
+    const [width, height] = [model.width + 2 * SAVED_MARGIN, model.height + 2 * SAVED_MARGIN];
+    return { name: model.title, svg: svgText(model, SAVED_MARGIN), width, height };
   };
   const failing = (work: () => Promise<unknown>) => () => {
     message.textContent = "";
@@ -63,8 +68,10 @@ export function pictureFigure(context: PaneContext): PictureFigure {
     button(
       texts.putPicture,
       failing(async () => {
-        const at = context.selected.get();
-        if (at !== undefined) await port.insertPicture(at, saved());
+        const at = await pictureCell(context);
+        if (at === undefined) return;
+        await port.insertPicture(at, saved());
+        message.textContent = texts.pictureDone(at);
       }),
       "plain",
     ),
@@ -97,6 +104,15 @@ export function pictureFigure(context: PaneContext): PictureFigure {
       draw();
     },
   };
+}
+
+/** Where a picture goes: at the selection, except where it would cover the scores; then beside them. */
+async function pictureCell({ selected, column, port }: PaneContext): Promise<string | undefined> {
+  const scores = column.get()?.address;
+  const area = parseAddress(selected.get() ?? "");
+  if (area && (scores === undefined || !overlap(area, parseAddress(scores)!)))
+    return formatAddress({ ...area, bottom: area.top, right: area.left });
+  return scores === undefined ? undefined : ((await freeColumn(port, scores))?.first ?? scores);
 }
 
 function svgBlob(svg: string): Blob {

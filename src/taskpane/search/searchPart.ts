@@ -21,7 +21,7 @@ export function searchPart(context: PaneContext, search: Observable<SearchQuesti
   const picture = pictureFigure(context);
   const load = element("div");
   const reserve = element("div", { "aria-live": "polite" });
-  const chooser = formulaChooser(context, texts.searchInto);
+  const chooser = formulaChooser(context, texts.formulaHeading);
 
   const ask = () => {
     const { fraction } = question.get();

@@ -1,6 +1,7 @@
 import type { Port } from "../../hosts/port";
 import { formatAddress, parseAddress, type Area } from "../../sheet/address";
 import type { Formula } from "../formula";
+import { overlap } from "./overlap";
 import { isBlank, isCellError, type Cell } from "../../sheet/cell";
 
 /** What stands in the way of a formula at a cell, or nothing. */
@@ -33,7 +34,7 @@ export async function checkTarget(
     bottom: cell.top + rows - 1,
     right: cell.left + columns - 1,
   };
-  if (source && overlaps(area, source)) return { kind: "inside" };
+  if (source && overlap(area, source)) return { kind: "inside" };
   const address = formatAddress({ ...area, bottom: area.top, right: area.left });
   const { values } = await port.read(formatAddress(area));
   for (const [r, row] of values.entries()) {
@@ -50,11 +51,6 @@ export async function checkTarget(
   }
   const holds = values[0]?.[0];
   return isBlank(holds) ? { kind: "free", address } : { kind: "taken", address, holds };
-}
-
-function overlaps(a: Area, b: Area): boolean {
-  const sameSheet = a.sheet === undefined || b.sheet === undefined || a.sheet.toLowerCase() === b.sheet.toLowerCase();
-  return sameSheet && a.left <= b.right && b.left <= a.right && a.top <= b.bottom && b.top <= a.bottom;
 }
 
 /** A cell's content in a sentence. */

@@ -57,7 +57,6 @@ export const enCutoff = {
   reportItem: "What",
   reportValue: "Value",
   refused: "No cutoff yet",
-  refusedHelp: "The cell would show the same error.",
   adviceScores: "Give at least two scores that differ. The more there are, the more the mark can be trusted.",
   adviceCells: "Correct the cells listed under Scores, or select a column without them.",
   adviceShape: "Choose another shape: this one can't hold some of the scores.",
@@ -81,6 +80,7 @@ export const enCutoff = {
   saveSvg: "Save as SVG",
   savePng: "Save as PNG",
   putPicture: "Put into the sheet",
+  pictureDone: (address: string) => `The picture stands at ${address}.`,
 
   formulaHeading: "Into the sheet",
   formulaWhat: "What to put",

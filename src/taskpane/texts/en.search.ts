@@ -61,7 +61,6 @@ export const enSearch = {
   scheduleChance: "Chance this look is accepted",
   scheduleLast: "any",
 
-  searchInto: "Into the sheet",
   putLooks: "the looks to plan for",
   putLoad: "load and cost by stage",
   putBudget: "the budget",

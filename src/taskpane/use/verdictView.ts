@@ -5,7 +5,7 @@ import { button } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { fold } from "../dom/part";
 import { localFormula } from "../formula";
-import { freeColumn } from "./freeColumn";
+import { freeColumn } from "../target/freeColumn";
 import { verdictFormula } from "./verdictFormula";
 
 export interface VerdictCounts {

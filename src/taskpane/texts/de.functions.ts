@@ -1,0 +1,31 @@
+import type { enFunctions } from "./en.functions";
+import type { Translated } from "./translated";
+
+export const deFunctions: Translated<typeof enFunctions> = {
+  functionsHeading: "Alle Funktionen",
+  functionsAsk: "Was möchten Sie wissen?",
+  functionsAskHint: "Ein Wort oder eine Frage auf Englisch, etwa budget oder how many to score first",
+  topic: "Thema",
+  topicAll: "alle Themen",
+  topicPlan: "wie viele zuerst zu bewerten sind",
+  topicDescribe: "wie die Werte aussehen",
+  topicCutoff: "wo die Schwelle steht",
+  topicSearch: "wie lange die Suche dauert",
+  topicStopping: "wann aufzuhören ist",
+  topicRisk: "was schiefgehen kann",
+  topicCombine: "von Kriterien zu einem Wert",
+  topicWatch: "während es läuft",
+  topicSimulate: "ausprobieren",
+  topicAudit: "für die Prüfung",
+  functionsFound: (count) => `${count} Funktionen`,
+  noneFound: "Keine Funktion passt. Versuchen Sie es mit einem Wort weniger oder einem anderen Thema.",
+  showAll: (count) => `Alle ${count} zeigen`,
+  backToList: "Zurück zur Liste",
+  useSelection: "Die Auswahl nehmen",
+  argumentOptional: (name) => `${name} (darf leer bleiben)`,
+  argumentLeftOut: "weggelassen",
+  argumentsMissing: (names) => `Es fehlt noch: ${names}.`,
+  valueShown: "Die Zelle zeigte",
+  emptyText: "ein leerer Text",
+  rowsMore: (count) => `und ${count} weitere Zeilen`,
+};
