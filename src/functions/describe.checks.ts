@@ -1,6 +1,5 @@
 import { DomainError } from "../core/domain";
-import { normalCdf } from "../core/distribution/normalCdf";
-import { normalUpperTail } from "../core/distribution/normalUpperTail";
+import { tailFraction } from "../core/method/tailFraction";
 import { andersonDarling, LEAST_FOR_ANDERSON_DARLING } from "../core/sample/andersonDarling";
 import { extremeDeviates, LEAST_FOR_OUTLIERS } from "../core/sample/extremeDeviates";
 import { fitCurve } from "../core/sample/fitCurve";
@@ -95,6 +94,6 @@ export function OUTLIER_FLAGS(scores: any[][], most?: any, alpha?: any, shape?: 
 export function TAIL_FRACTION(cutoff: any[][], mean: any, sd: any, better?: any): any[][] {
   const centre = readNumber("mean", mean);
   const spread = readPositive("sd", sd);
-  const beyond = readBetter(better) === "low" ? normalCdf : normalUpperTail;
-  return mapEach("cutoff", cutoff, (mark) => beyond((mark - centre) / spread));
+  const direction = readBetter(better);
+  return mapEach("cutoff", cutoff, (mark) => tailFraction(mark, centre, spread, direction).fraction);
 }

@@ -2,9 +2,8 @@ import { andersonDarling } from "../core/sample/andersonDarling";
 import { curveLikelihood } from "../core/sample/curveLikelihood";
 import { DomainError } from "../core/domain";
 import { fitCurve } from "../core/sample/fitCurve";
-import { moments } from "../core/sample/moments";
-import { sampleQuantile } from "../core/sample/sampleQuantile";
-import { NORMAL, shapeText } from "../core/sample/shape";
+import { scoreSummary } from "../core/sample/scoreSummary";
+import { shapeText } from "../core/sample/shape";
 import { LEAST_FOR_RANKING, shapeRanking } from "../core/sample/shapeRanking";
 import { isBlank } from "../sheet/cell";
 import { readNumber } from "../sheet/readArgument";
@@ -45,12 +44,10 @@ const SUMMARY = [
 export function SCORE_SUMMARY(scores: any[][], item?: any): any {
   requireItem(SUMMARY, item);
   const { sample, blanks } = readScores("scores", scores);
-  const { count, mean, sd } = fitCurve("scores", sample, NORMAL);
-  const { skewness, excessKurtosis } = moments(sample);
-  const [lower, median, upper] = [0.25, 0.5, 0.75].map((p) => sampleQuantile(sample, p));
-  const { minimum, maximum } = sample;
-  const error = sd / Math.sqrt(count);
-  const values = [count, blanks, mean, sd, error, minimum, lower, median, upper, maximum, skewness, excessKurtosis];
+  const { count, mean, sd, meanError, minimum, maximum, ...of } = scoreSummary("scores", sample);
+  const quartiles = [of.lowerQuartile, of.median, of.upperQuartile];
+  const shape = [of.skewness, of.excessKurtosis];
+  const values = [count, blanks, mean, sd, meanError, minimum, ...quartiles, maximum, ...shape];
   return labelTable(
     SUMMARY.map((label, i) => [label, values[i] ?? ""] as const),
     item,

@@ -7,6 +7,11 @@ export interface Batch {
   readonly sd: number;
 }
 
+export interface CombinedCurve extends Batch {
+  /** The second mean less the first. */
+  readonly apart: number;
+}
+
 /**
  * Count, mean and standard deviation of two batches taken as one: the squares within each, and those of the distance between the means.
  *
@@ -17,7 +22,7 @@ export interface Batch {
  *
  * @throws {DomainError} naming count_1, mean_1, sd_1, count_2, mean_2 or sd_2.
  */
-export function combinedCurve(one: Batch, two: Batch): Batch {
+export function combinedCurve(one: Batch, two: Batch): CombinedCurve {
   [one, two].forEach((batch, index) => {
     requireCount(`count_${index + 1}`, batch.count, 2);
     requireFinite(`mean_${index + 1}`, batch.mean);
@@ -32,5 +37,5 @@ export function combinedCurve(one: Batch, two: Batch): Batch {
     (one.sd / unit) ** 2 * ((one.count - 1) / (count - 1)) +
     (two.sd / unit) ** 2 * ((two.count - 1) / (count - 1)) +
     (apart / unit) ** 2 * (one.count / count) * (two.count / (count - 1));
-  return { count, mean, sd: unit * Math.sqrt(variance) };
+  return { count, apart, mean, sd: unit * Math.sqrt(variance) };
 }

@@ -3,6 +3,10 @@ import type { Curve } from "./curve";
 import type { Sample } from "./sample";
 
 export interface CurveLikelihood {
+  /** ln of the variance with divisor n, on the shape's scale. */
+  readonly logVariance: number;
+  /** Σ ln dy/dx: what carries the density from the scale to the scores. */
+  readonly logJacobian: number;
   readonly logLikelihood: number;
   /** 2 for mean and deviation, 3 where a power was fitted too. */
   readonly parameters: number;
@@ -22,15 +26,16 @@ export interface CurveLikelihood {
  */
 export function curveLikelihood(sample: Sample, curve: Curve): CurveLikelihood {
   const n = sample.count;
-  const logSpread = 2 * Math.log(curve.shownSd) + Math.log((n - 1) / n);
-  const logLikelihood = (-n / 2) * (Math.log(2 * Math.PI) + 1 + logSpread) + logJacobian(sample, curve);
+  const logVariance = 2 * Math.log(curve.shownSd) + Math.log((n - 1) / n);
+  const logJacobian = logJacobianOf(sample, curve);
+  const logLikelihood = (-n / 2) * (Math.log(2 * Math.PI) + 1 + logVariance) + logJacobian;
   const parameters = curve.powerFitted ? 3 : 2;
   const room = n - parameters - 1;
   const aicc = room > 0 ? 2 * parameters - 2 * logLikelihood + (2 * parameters * (parameters + 1)) / room : undefined;
-  return { logLikelihood, parameters, aicc };
+  return { logVariance, logJacobian, logLikelihood, parameters, aicc };
 }
 
-function logJacobian({ values }: Sample, { shape, power = 0 }: Curve): number {
+function logJacobianOf({ values }: Sample, { shape, power = 0 }: Curve): number {
   if (shape.kind === "normal") return 0;
   if (shape.kind === "logit") {
     const { low, high } = shape;

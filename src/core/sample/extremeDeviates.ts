@@ -8,6 +8,8 @@ export interface ExtremeDeviates {
   readonly outliers: number;
   /** R₁ … R_most: the largest deviate, in standard deviations, before each removal. */
   readonly deviates: Float64Array;
+  /** For each removal 1 where the upper end goes, 0 where the lower one does. */
+  readonly upper: Uint8Array;
   /** Scores at or below `lowest`, or at or above `highest`, are outliers; ±∞ where there is none on that side. */
   readonly lowest: number;
   readonly highest: number;
@@ -48,6 +50,7 @@ export function extremeDeviates(sample: Sample, most: number, alpha: number): Ex
   return {
     outliers,
     deviates,
+    upper,
     lowest: outliers > above ? sorted[outliers - above - 1]! : -Infinity,
     highest: above > 0 ? sorted[count - above]! : Infinity,
   };

@@ -7,8 +7,12 @@ export interface GatedCurve {
   readonly entries: GatedEntries;
   /** The gate in deviations from the mean. */
   readonly gateScore: number;
+  /** How far the mean lies below that of the scores, in deviations: (below/scored) φ/Φ at the gate. */
+  readonly pull: number;
   readonly mean: number;
   readonly sd: number;
+  /** Second derivatives of the log-likelihood with the sign turned, times the variance: mean, mean with deviation, deviation. */
+  readonly information: { readonly inMean: number; readonly mixed: number; readonly inSd: number };
   readonly meanError: number;
   readonly sdError: number;
 }
@@ -34,18 +38,19 @@ export function gatedCurve(sample: Sample, gate: number, below: number): GatedCu
   const entries = gatedEntries(sample, gate, below);
   const { scored, distance, spread } = entries;
   const share = below / scored;
-  const pull = (z: number) => share * millsRatio(z);
+  const pullAt = (z: number) => share * millsRatio(z);
   const equation = (z: number) => {
-    const w = pull(z) - z;
-    return spread * spread * w * w - distance * distance * (1 - pull(z) * w);
+    const w = pullAt(z) - z;
+    return spread * spread * w * w - distance * distance * (1 - pullAt(z) * w);
   };
-  const most = below === 0 ? 0 : findRoot((z) => z - pull(z), 0, pull(0));
+  const most = below === 0 ? 0 : findRoot((z) => z - pullAt(z), 0, pullAt(0));
   let least = -1;
   while (!(equation(least) > 0)) least *= 2;
   const gateScore = below === 0 ? -distance / spread : findRoot(equation, least, most);
-  const sd = distance / (pull(gateScore) - gateScore);
-  const mean = entries.average - pull(gateScore) * sd;
-  return { entries, gateScore, mean, sd, ...standardErrors(entries, gateScore, sd) };
+  const pull = pullAt(gateScore);
+  const sd = distance / (pull - gateScore);
+  const mean = entries.average - pull * sd;
+  return { entries, gateScore, pull, mean, sd, ...standardErrors(entries, gateScore, sd) };
 }
 
 /** From the second derivatives of the log-likelihood in mean and deviation, everything in units of the deviation. */
@@ -58,5 +63,9 @@ function standardErrors({ scored, below, distance, spread }: GatedEntries, z: nu
   const mixed = 2 * scored * centre - below * (r + z * slope);
   const inSd = scored * (3 * square - 1) - below * (2 * r * z + z * z * slope);
   const determinant = inMean * inSd - mixed * mixed;
-  return { meanError: sd * Math.sqrt(inSd / determinant), sdError: sd * Math.sqrt(inMean / determinant) };
+  return {
+    information: { inMean, mixed, inSd },
+    meanError: sd * Math.sqrt(inSd / determinant),
+    sdError: sd * Math.sqrt(inMean / determinant),
+  };
 }

@@ -1,11 +1,14 @@
 import { andersonDarling } from "./andersonDarling";
-import { curveLikelihood } from "./curveLikelihood";
+import type { Curve } from "./curve";
+import { curveLikelihood, type CurveLikelihood } from "./curveLikelihood";
 import { fitCurve } from "./fitCurve";
 import type { Sample } from "./sample";
 import { NORMAL, type Shape } from "./shape";
 
 export interface RankedShape {
   readonly shape: Shape;
+  readonly curve: Curve;
+  readonly likelihood: CurveLikelihood;
   readonly aicc: number;
   readonly difference: number;
   /** Undefined below 8 scores and where the power was fitted. */
@@ -32,7 +35,8 @@ export function shapeRanking(argument: string, sample: Sample, bounds?: { low: n
   const ranked = shapes.map((shape) => {
     const curve = fitCurve(argument, sample, shape);
     const pValue = curve.powerFitted ? undefined : andersonDarling(curve.scaled).pValue;
-    return { shape, aicc: curveLikelihood(sample, curve).aicc!, pValue };
+    const likelihood = curveLikelihood(sample, curve);
+    return { shape, curve, likelihood, aicc: likelihood.aicc!, pValue };
   });
   ranked.sort((a, b) => a.aicc - b.aicc);
   return ranked.map((one) => ({ ...one, difference: one.aicc - ranked[0]!.aicc }));
