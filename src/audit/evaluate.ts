@@ -2,7 +2,7 @@ import { isCellError, type Cell } from "../sheet/cell";
 import type { BlankPolicy } from "../sheet/invoke";
 import type { Sheet, Workbook } from "../sheet/workbook";
 import { UnknownFunction } from "./evaluateNode";
-import { Evaluation, newBudget } from "./evaluation";
+import { Evaluation, newBudget, type OwnCall } from "./evaluation";
 import { readFormula } from "./readFormula";
 import { intersect } from "./reference";
 import { errorCell, isArray, NotKnown, Reference, UnreadableFormula } from "./value";
@@ -17,6 +17,10 @@ export interface FormulaPlace {
   /** An old-style formula, which takes one cell of a range where one is wanted. */
   readonly single?: boolean;
   readonly blanks?: BlankPolicy;
+  /** Whole columns and rows in full instead of their used part. */
+  readonly inFull?: boolean;
+  /** Takes down the calls of our functions. */
+  readonly calls?: OwnCall[];
 }
 
 /** A value as a cell would show it (errors are values), or the reason why it can't be known or read. */
@@ -28,11 +32,12 @@ export type Answer =
 /** Evaluates a formula on the stored values of a workbook, as if it stood in the given cell. Never throws. */
 export function evaluate(formula: string, place: FormulaPlace): Answer {
   const source = formula.startsWith("=") ? formula : `=${formula}`;
-  const { workbook, sheet, row, column, shift = { rows: 0, columns: 0 }, single = false, blanks = "null" } = place;
+  const { workbook, sheet, row, column, shift = { rows: 0, columns: 0 } } = place;
+  const { single = false, blanks = "null", inFull = false, calls } = place;
   try {
     const ast = readFormula(source);
-    const budget = newBudget();
-    const at = new Evaluation({ workbook, sheet, row, column, shift, single, blanks, source, names: [], budget });
+    const where = { workbook, sheet, row, column, shift, single, blanks, inFull, source };
+    const at = new Evaluation({ ...where, names: [], budget: newBudget(calls) });
     const value = at.value(ast);
     const shown = single && value instanceof Reference ? intersect(value, at) : value;
     return { value: asShown(at.cells(shown)) };

@@ -5,7 +5,7 @@ import { callOurs } from "./callOurs";
 import type { Evaluation } from "./evaluation";
 import { readFunctionName } from "./functionName";
 import { lazyFunctions } from "./lazy";
-import { nearestName } from "./nearestName";
+import { nearestName } from "../functions/nearestName";
 import { natives } from "./natives/index";
 import { applyOperator, applySign } from "./operators";
 import { combineReferences, singleOf, spilledFrom } from "./reference";

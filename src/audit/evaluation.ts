@@ -1,6 +1,7 @@
 import type { AstExpression } from "@borgar/fx/xlsx";
 import type { Cell, Range } from "../sheet/cell";
-import type { BlankPolicy } from "../sheet/invoke";
+import type { FunctionEntry } from "../sheet/functionTable";
+import type { Argument, BlankPolicy, Outcome } from "../sheet/invoke";
 import type { Sheet, Workbook } from "../sheet/workbook";
 import { unwrapped } from "./broadcast";
 import { evaluateNode } from "./evaluateNode";
@@ -28,6 +29,8 @@ export interface Setting {
   readonly shift: { readonly rows: number; readonly columns: number };
   /** True in an old-style formula, where an operator takes the one cell of a range that stands in line with its own. */
   readonly single: boolean;
+  /** Whole columns and rows in full, blanks below and all, instead of their used part. */
+  readonly inFull: boolean;
   readonly scope?: Scope;
   /** The defined names that are being worked out. */
   readonly names: readonly string[];
@@ -38,11 +41,23 @@ export interface Setting {
 export interface Budget {
   steps: number;
   readonly names: Map<string, Value>;
+  /** The calls of our functions, noted here where somebody asks for them. */
+  readonly calls?: OwnCall[];
 }
 
-/** About two seconds' worth. */
-export function newBudget(): Budget {
-  return { steps: 4_000_000, names: new Map() };
+/** One call of a function of ours, as it was worked out. */
+export interface OwnCall {
+  readonly entry: FunctionEntry;
+  /** The arguments as they came; undefined for one left out. */
+  readonly values: readonly (Value | undefined)[];
+  /** The same as the function got them. */
+  readonly given: readonly Argument[];
+  readonly outcome: Outcome;
+}
+
+/** About two seconds' worth of steps. */
+export function newBudget(calls?: OwnCall[]): Budget {
+  return { steps: 4_000_000, names: new Map(), calls };
 }
 
 /** One formula being evaluated on stored values. */

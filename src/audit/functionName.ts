@@ -1,6 +1,6 @@
 import { functionTable } from "../functions/call";
 import type { FunctionEntry } from "../sheet/functionTable";
-import { nearestName } from "./nearestName";
+import { nearestName } from "../functions/nearestName";
 
 /** Who is called by a name in a formula. */
 export type Callee =
@@ -20,7 +20,7 @@ export function readFunctionName(name: string): Callee {
   if (ours === undefined) return { kind: "native", name: name.replace(/^(_xlfn\.|_xlws\.)+/i, "").toUpperCase() };
   const entry = byKey.get(key(ours));
   if (entry) return { kind: "ours", entry };
-  const nearest = nearestName(key(ours), byKey.keys());
+  const nearest = nearestName(key(ours), [...byKey.keys()]);
   return {
     kind: "unknown",
     shown: `WEIR.${key(ours)}`,

@@ -23,7 +23,14 @@ export function placeCells(place: Place, at: Evaluation): Range {
   if (count > MOST_CELLS) throw new NotKnown(`the range ${formatAddress(place.area)} has too many cells`);
   refuseUncalculated(place.sheet, area);
   at.spend(1 + count / 100);
-  return place.sheet.range(area);
+  const cells = place.sheet.range(area);
+  return at.setting.inFull && place.area.bottom === LAST_ROW ? filledDown(cells, place.area.bottom - place.area.top + 1) : cells;
+}
+
+/** Blank rows behind the used part, one and the same row again and again. */
+function filledDown(cells: Range, rows: number): Range {
+  const blank: Cell[] = Array<Cell>(cells[0]?.length ?? 1).fill(null);
+  return [...cells, ...Array<Cell[]>(rows - cells.length).fill(blank)];
 }
 
 /** The area cut to the used part of its sheet where it is open to the last row or column. */

@@ -2,7 +2,7 @@ import { parseA1Ref, parseStructRef, type ReferenceIdentifier } from "@borgar/fx
 import type { Area } from "../sheet/address";
 import { sheetNamed, type DefinedName, type Sheet, type Table } from "../sheet/workbook";
 import type { Evaluation } from "./evaluation";
-import { nearestName } from "./nearestName";
+import { nearestName } from "../functions/nearestName";
 import { readFormula } from "./readFormula";
 import { LAST_COLUMN, LAST_ROW } from "./reference";
 import { errorCell, NotKnown, Reference, type Value } from "./value";

@@ -1,4 +1,4 @@
-import { nearestName } from "../audit/nearestName";
+import { nearestName } from "../functions/nearestName";
 import { functionEntry, functionTable } from "../functions/call";
 import type { FunctionEntry } from "../sheet/functionTable";
 import { Stop, type Command, type Io } from "./io";

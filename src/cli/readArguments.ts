@@ -1,5 +1,5 @@
 import { parseArgs, type ParseArgsConfig } from "node:util";
-import { nearestName } from "../audit/nearestName";
+import { nearestName } from "../functions/nearestName";
 import { Stop } from "./io";
 
 export type OptionKinds = Readonly<Record<string, "boolean" | "string">>;

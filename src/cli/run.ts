@@ -1,4 +1,4 @@
-import { nearestName } from "../audit/nearestName";
+import { nearestName } from "../functions/nearestName";
 import { NUMBERS_REVISION, RELEASE_NAME, RELEASE_VERSION } from "../core/release";
 import { calc } from "./calc";
 import { functions } from "./functions";

@@ -1,0 +1,47 @@
+import { stringifyTokens, tokenize, translateFormulaToA1, translateFormulaToR1C1 } from "@borgar/fx/xlsx";
+import { formatAddress } from "../sheet/address";
+import type { FormulaCell } from "../sheet/workbook";
+import { readFunctionName } from "./functionName";
+
+function cellAddress(row: number, column: number): string {
+  return formatAddress({ top: row, left: column, bottom: row, right: column });
+}
+
+/** The formula of a cell as the file spells it, a shared one brought to its own cell. */
+export function storedFormula({ formula, shift, row, column }: FormulaCell): string {
+  if (!shift) return `=${formula}`;
+  const origin = cellAddress(row - shift.rows, column - shift.columns);
+  return translateFormulaToA1(translateFormulaToR1C1(`=${formula}`, origin), cellAddress(row, column));
+}
+
+/** The same formula in every cell that it was filled into has the same text here. */
+export function relativeFormula({ formula, shift, row, column }: FormulaCell): string {
+  return translateFormulaToR1C1(
+    `=${formula}`,
+    cellAddress(row - (shift?.rows ?? 0), column - (shift?.columns ?? 0)),
+  );
+}
+
+/** A formula as it is typed: our functions by their names, without the prefixes that files put before newer functions and names. */
+export function typedFormula(stored: string): string {
+  let tokens;
+  try {
+    tokens = tokenize(stored);
+  } catch {
+    return stored;
+  }
+  const shown = tokens.map((token, index) => {
+    if (token.type === "func") {
+      const callee = readFunctionName(token.value);
+      if (callee.kind === "ours") return { ...token, value: `WEIR.${callee.entry.name}` };
+      if (callee.kind === "unknown") return { ...token, value: callee.shown };
+      return { ...token, value: token.value.replace(/^(_xlfn\.|_xlws\.)+/i, "") };
+    }
+    if (token.value.includes("_xlpm.")) return { ...token, value: token.value.replace(/_xlpm\./gi, "") };
+    // `[2]!` before one of ours.
+    const behind = token.type === "context" ? tokens[index + 2] : tokens[index + 1];
+    const stray = (token.type === "context" && tokens[index + 1]?.value === "!") || tokens[index - 1]?.type === "context";
+    return stray && behind?.type === "func" ? { ...token, value: "" } : token;
+  });
+  return stringifyTokens(shown);
+}

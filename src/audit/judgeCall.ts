@@ -1,0 +1,95 @@
+import { NUMBERS_REVISION } from "../core/release";
+import { formatAddress } from "../sheet/address";
+import { isCellError, type Cell } from "../sheet/cell";
+import type { Workbook } from "../sheet/workbook";
+import type { CallCell } from "./callCells";
+import { compareStored, type Comparison } from "./compareStored";
+import { evaluate, type Answer, type FormulaPlace } from "./evaluate";
+import type { OwnCall } from "./evaluation";
+import { explainAgreement, explainDifference } from "./explain";
+import { storedFormula, typedFormula } from "./formulaText";
+import type { Judgement } from "./judgement";
+import { LAST_ROW } from "./reference";
+import { Reference } from "./value";
+
+export interface JudgeSetting {
+  readonly workbook: Workbook;
+  readonly tolerance: number;
+  /** The revision of the numbers that the file says it was computed by. */
+  readonly fileRevision: number | undefined;
+}
+
+/** What a host stores while a call is not there to be answered. */
+const NO_ANSWER: Readonly<Record<string, string>> = {
+  "#NAME?": "the file was saved by a program that didn't have the add-in at hand",
+  "#BUSY!": "the file was saved while the call was still being worked out",
+  "#GETTING_DATA": "the file was saved while the call was still being worked out",
+  "#CONNECT!": "the file was saved while the add-in could not be reached",
+  "#BLOCKED!": "the add-in was blocked where the file was saved",
+  "#SPILL!": "other cells stood where the result should spill, so that none was stored",
+};
+
+/** Judges one cell: its stored value against the one that comes out of the stored inputs. */
+export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSetting): Judgement {
+  const { row, column, array } = cell;
+  const calls: OwnCall[] = [];
+  const stored = array ? sheet.range(array) : [[sheet.cell(row, column)]];
+  const place: FormulaPlace = { workbook: setting.workbook, sheet, row, column, shift: cell.shift, single: !array, calls };
+  const answer = evaluate(cell.formula, place);
+  const judged = {
+    sheet,
+    cell,
+    address: formatAddress({ top: row, left: column, bottom: row, right: column }),
+    formula: typedFormula(storedFormula(cell)),
+    stored: oneOrRows(stored),
+    recomputed: "value" in answer ? answer.value : undefined,
+    calls,
+  };
+  const hindrance = cell.calculated ? whatHinders(answer, stored[0]![0], unknown) : "the file holds no value for it: it was never calculated";
+  if (hindrance !== undefined || !("value" in answer))
+    return { ...judged, verdict: "not checkable", why: `Not checkable: ${hindrance}.` };
+  const { value } = answer;
+  const compared = comparedWith(stored, value, !array, setting);
+  if (compared.same) return { ...judged, verdict: "agrees", why: explainAgreement(compared) };
+  const again = (changes: Partial<FormulaPlace>) => evaluate(cell.formula, { ...place, calls: undefined, ...changes });
+  // Hosts differ in whether a whole column comes with the blanks below its last cell.
+  const full = calls.some(takesWholeColumn) ? again({ inFull: true }) : undefined;
+  if (full && "value" in full && comparedWith(stored, full.value, !array, setting).same) {
+    const why = "Worked out again from the stored inputs, the whole column with its blank cells: the same.";
+    return { ...judged, recomputed: full.value, verdict: "agrees", why };
+  }
+  const zero = again({ blanks: "zero" });
+  const blanksAsZero = "value" in zero && comparedWith(stored, zero.value, !array, setting).same;
+  const older = setting.fileRevision !== undefined && setting.fileRevision < NUMBERS_REVISION ? setting.fileRevision : undefined;
+  const why = explainDifference(compared, stored, { blanksAsZero, olderRevision: older, calls });
+  return { ...judged, verdict: "differs", why };
+}
+
+function whatHinders(answer: Answer, stored: Cell, unknown: readonly string[]): string | undefined {
+  if (unknown.length > 0) return `this release has no function ${unknown.join(" and ")}`;
+  if ("unreadable" in answer) return `the formula can't be read (${answer.unreadable})`;
+  if ("notKnown" in answer) return answer.notKnown;
+  const code = isCellError(stored) ? stored.code.toUpperCase() : undefined;
+  const recomputed = Array.isArray(answer.value) ? undefined : answer.value;
+  if (code === undefined || (isCellError(recomputed) && recomputed.code === code)) return undefined;
+  return NO_ANSWER[code] && `it holds ${code}: ${NO_ANSWER[code]}`;
+}
+
+/** In an old-style cell only the first cell of a table is shown. */
+function comparedWith(
+  stored: readonly (readonly Cell[])[],
+  value: Cell | Cell[][],
+  single: boolean,
+  { tolerance }: JudgeSetting,
+): Comparison {
+  const rows = Array.isArray(value) ? value : [[value]];
+  return compareStored(stored, single ? [[rows[0]?.[0]]] : rows, tolerance);
+}
+
+function oneOrRows(rows: readonly (readonly Cell[])[]): Cell | Cell[][] {
+  return rows.length === 1 && rows[0]!.length === 1 ? rows[0]![0]! : rows.map((row) => [...row]);
+}
+
+function takesWholeColumn({ values }: OwnCall): boolean {
+  return values.some((value) => value instanceof Reference && value.places.some(({ area }) => area.bottom === LAST_ROW));
+}
