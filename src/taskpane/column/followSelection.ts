@@ -2,7 +2,7 @@ import type { Block, Port } from "../../hosts/port";
 import { formatAddress, parseAddress } from "../../sheet/address";
 import { isBlank, isCellError, type Cell } from "../../sheet/cell";
 import type { Observable } from "../observable";
-import { cellAbove, numberColumns, readColumn, type Column } from "./readColumn";
+import { cellAbove, cellsBelow, numberColumns, readColumn, type Column } from "./readColumn";
 
 /** What the pane knows of the selection, for the words above the column. */
 export type Selection =
@@ -16,6 +16,8 @@ export type Selection =
 
 const QUIET_MS = 150;
 const FEWEST_NUMBERS = 2;
+/** Scores that may be added below a column between two readings and still be taken for its own. */
+const MOST_ADDED = 500;
 
 export interface Follower {
   readonly selection: Observable<Selection>;
@@ -36,29 +38,39 @@ export function followSelection(
   selection: Observable<Selection>,
 ): Follower {
   let held = false;
+  let growing = false;
   let turn = 0;
+  const waiting = new Set<"selection" | "cells">();
   let timer: ReturnType<typeof setTimeout> | undefined;
 
-  async function latest<T>(work: Promise<T>, then: (result: T) => void | Promise<void>): Promise<void> {
+  /** Does what follows from a reading, unless another was begun meanwhile; `stillLatest` tells the same later on. */
+  async function latest<T>(work: Promise<T>, then: (result: T, stillLatest: () => boolean) => unknown): Promise<void> {
     const mine = ++turn;
     try {
       const result = await work;
-      if (mine === turn) await then(result);
+      if (mine === turn) await then(result, () => mine === turn);
     } catch (failure) {
       if (mine === turn)
         selection.set({ kind: "failed", message: failure instanceof Error ? failure.message : String(failure) });
     }
   }
 
-  async function take(block: Block, place: number): Promise<void> {
+  async function take(block: Block, place: number, stillLatest: () => boolean): Promise<boolean> {
     const taken = readColumn(block, place);
-    if (!taken) return;
+    if (!taken) return false;
     const above = taken.heading === "" ? cellAbove(taken.address) : undefined;
-    const heading = above === undefined ? taken.heading : headingIn(await port.read(above).catch(() => undefined));
-    column.set({ ...taken, heading });
+    const [over, under] = await Promise.all([above, cellsBelow(taken.address, 1)].map(readIfAny));
+    if (!stillLatest()) return false;
+    growing = isBlank(under?.values[0]?.[0]);
+    column.set(above === undefined ? taken : { ...taken, heading: headingIn(over) });
+    return true;
   }
 
-  async function readSelection(block: Block | undefined): Promise<void> {
+  async function readIfAny(address: string | undefined): Promise<Block | undefined> {
+    return address === undefined ? undefined : port.read(address).catch(() => undefined);
+  }
+
+  async function readSelection(block: Block | undefined, stillLatest: () => boolean): Promise<void> {
     if (!block) return selection.set({ kind: "nothing" });
     selected.set(block.address);
     if (held) return;
@@ -68,23 +80,37 @@ export function followSelection(
       const letters = columnOf(block.address);
       return selection.set({ kind: "no-numbers", address: block.address, letters });
     }
-    await take(block, best);
+    if (!(await take(block, best, stillLatest))) return;
     selection.set(places.length > 1 ? { kind: "columns", block, places, place: best } : { kind: "column" });
   }
 
-  async function readAgain(address: string): Promise<void> {
-    const block = await port.read(address);
-    const taken = readColumn(block, 0);
+  /** The same cells once more, and what was added right below them where the column ended there. */
+  async function readAgain(address: string): Promise<Column | undefined> {
+    const [block, more] = await Promise.all([
+      port.read(address),
+      readIfAny(growing ? cellsBelow(address, MOST_ADDED) : undefined),
+    ]);
+    const end = more?.values.findIndex(([cell]) => isBlank(cell)) ?? 0;
+    const added = more?.values.slice(0, end < 0 ? undefined : end) ?? [];
+    return readColumn({ address: block.address, values: [...block.values, ...added] }, 0);
+  }
+
+  function renew(taken: Column | undefined): void {
     const before = column.get();
     if (taken && before && !sameCells(taken, before)) column.set({ ...taken, heading: before.heading });
   }
 
   const stop = port.onChange((what) => {
+    waiting.add(what);
     clearTimeout(timer);
     timer = setTimeout(() => {
-      const current = column.get();
-      if (what === "cells" && current) void latest(readAgain(current.address), () => undefined);
-      else void latest(port.selection(), readSelection);
+      const [moved, current] = [waiting.has("selection"), column.get()];
+      const again = waiting.has("cells") && current ? readAgain(current.address) : Promise.resolve(undefined);
+      waiting.clear();
+      void latest(again, (taken) => {
+        renew(taken);
+        return moved || !current ? latest(port.selection(), readSelection) : undefined;
+      });
     }, QUIET_MS);
   });
   void latest(port.selection(), readSelection);
@@ -96,10 +122,11 @@ export function followSelection(
       if (!on) void latest(port.selection(), readSelection);
     },
     takeColumn: (letters) => latest(port.read(wholeColumn(letters, selected.get())), readSelection),
-    async takePlace(block, place) {
-      await take(block, place);
-      selection.set({ kind: "columns", block, places: numberColumns(block, FEWEST_NUMBERS), place });
-    },
+    takePlace: (block, place) =>
+      latest(Promise.resolve(block), async (_, stillLatest) => {
+        if (await take(block, place, stillLatest))
+          selection.set({ kind: "columns", block, places: numberColumns(block, FEWEST_NUMBERS), place });
+      }),
     stop() {
       clearTimeout(timer);
       stop();

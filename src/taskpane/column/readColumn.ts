@@ -20,6 +20,8 @@ export interface Column {
   readonly values: Float64Array;
 }
 
+const LAST_ROW = 1_048_575;
+
 export interface Offender {
   readonly address: string;
   readonly cell: Cell;
@@ -78,6 +80,14 @@ export function cellAbove(address: string): string | undefined {
   const area = parseAddress(address);
   if (!area || area.top === 0) return undefined;
   return formatAddress({ ...area, top: area.top - 1, bottom: area.top - 1, right: area.left });
+}
+
+/** So many cells right below a column; undefined where it ends in the last row. */
+export function cellsBelow(address: string, most: number): string | undefined {
+  const area = parseAddress(address);
+  if (!area || area.bottom >= LAST_ROW) return undefined;
+  const bottom = Math.min(area.bottom + most, LAST_ROW);
+  return formatAddress({ ...area, top: area.bottom + 1, bottom, right: area.left });
 }
 
 /** The address of a block without its first row, where that holds only texts and numbers stand below: headings are no data. */
