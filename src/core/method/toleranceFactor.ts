@@ -1,4 +1,4 @@
-import { requireCount, requireFraction } from "../domain";
+import { DomainError, requireCount, requireFraction } from "../domain";
 import { noncentralTQuantile } from "../distribution/noncentralTQuantile";
 import { noncentralTUpperTailQuantile } from "../distribution/noncentralTUpperTailQuantile";
 import { normalQuantile } from "../distribution/normalQuantile";
@@ -28,7 +28,7 @@ export interface ToleranceFactor {
 export function toleranceFactor(count: number, coverage: number, confidence: number): ToleranceFactor {
   requireCount("count", count, 2);
   requireFraction("coverage", coverage);
-  requireFraction("confidence", confidence);
+  requireConfidence(confidence);
   return factorFor(count, normalQuantile(coverage), confidence, 0);
 }
 
@@ -36,7 +36,7 @@ export function toleranceFactor(count: number, coverage: number, confidence: num
 export function safeFactor(count: number, fraction: number, confidence: number): ToleranceFactor {
   requireCount("count", count, 2);
   requireFraction("fraction", fraction);
-  requireFraction("confidence", confidence);
+  requireConfidence(confidence);
   return factorFor(count, normalUpperTailQuantile(fraction), confidence, 0);
 }
 
@@ -52,6 +52,12 @@ export function limitFactors(
   const z = normalUpperTailQuantile(fraction);
   const alpha = (1 - confidence) / 2;
   return { alpha, lower: factorFor(count, z, alpha, 0), upper: factorFor(count, z, alpha, 1) };
+}
+
+/** Below 1e-100 the quantiles of the noncentral t have no accuracy to speak of. */
+export function requireConfidence(confidence: number): void {
+  requireFraction("confidence", confidence);
+  if (!(confidence >= 1e-100)) throw new DomainError("confidence", confidence, "a number between 1e-100 and 1");
 }
 
 /** `tail` 0: the quantile with chance p below it; 1: with chance p above it. */

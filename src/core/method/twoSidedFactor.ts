@@ -2,11 +2,13 @@ import { requireCount, requireFraction } from "../domain";
 import { chiSquareQuantile } from "../distribution/chiSquareQuantile";
 import { chiSquareCdf } from "../distribution/chiSquareCdf";
 import { chiSquareUpperTail } from "../distribution/chiSquareUpperTail";
+import { chiSquareUpperTailQuantile } from "../distribution/chiSquareUpperTailQuantile";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { findRoot } from "../numeric/findRoot";
 import { gaussLegendre } from "../numeric/gaussLegendre";
 import { remembered } from "../numeric/remembered";
 import { normalTail } from "../special/normalTail";
+import { requireConfidence } from "./toleranceFactor";
 
 export interface TwoSidedFactor {
   /** Howe's approximation, from which the search starts. */
@@ -32,32 +34,38 @@ const POINTS = 71;
 export function twoSidedFactor(count: number, coverage: number, confidence: number): TwoSidedFactor {
   requireCount("count", count, 2);
   requireFraction("coverage", coverage);
-  requireFraction("confidence", confidence);
+  requireConfidence(confidence);
   return exactFactor(count, coverage, confidence);
 }
 
 const exactFactor = remembered((count: number, coverage: number, confidence: number): TwoSidedFactor => {
   const df = count - 1;
-  const middle = normalUpperTailQuantile((1 - coverage) / 2);
-  const squares = new Float64Array(POINTS);
+  const middle = middleHalfWidth(coverage);
+  const widths = new Float64Array(POINTS);
   const weights = new Float64Array(POINTS);
   for (let i = 0; i < POINTS; i++) {
     const z = i * STEP;
-    squares[i] = df * halfWidth(z / Math.sqrt(count), coverage, middle) ** 2;
+    widths[i] = halfWidth(z / Math.sqrt(count), coverage, middle);
     weights[i] = ((i === 0 ? 1 : 2) * STEP * Math.exp((-z * z) / 2)) / Math.sqrt(2 * Math.PI);
   }
   // On the smaller tail, so that a confidence next to 1 keeps its digits.
   const [tail, aim] = confidence < 0.5 ? [chiSquareUpperTail, confidence] : [chiSquareCdf, 1 - confidence];
   const sign = confidence < 0.5 ? 1 : -1;
   const excess = (k: number) =>
-    sign * Math.log(weights.reduce((sum, weight, i) => sum + weight * tail(squares[i] / (k * k), df), 0) / aim);
-  const start = middle * Math.sqrt(((1 + 1 / count) * df) / chiSquareQuantile(1 - confidence, df));
+    sign * Math.log(weights.reduce((sum, weight, i) => sum + weight * tail(df * (widths[i] / k) ** 2, df), 0) / aim);
+  const start = middle * Math.sqrt(((1 + 1 / count) * df) / chiSquareUpperTailQuantile(confidence, df));
   let low = start;
   let high = start;
   while (excess(low) > 0) low *= 0.9;
   while (excess(high) < 0) high *= 1.1;
   return { start, factor: findRoot(excess, low, high) };
 });
+
+/** The r at which (−r, r) holds the coverage, also where ½ − ½·coverage has no digits left of it, or its square underflows. */
+function middleHalfWidth(coverage: number): number {
+  if (coverage < 1e-8) return coverage * Math.sqrt(Math.PI / 2);
+  return coverage < 0.5 ? Math.sqrt(chiSquareQuantile(coverage, 1)) : normalUpperTailQuantile((1 - coverage) / 2);
+}
 
 /** The r ≥ middle at which (x − r, x + r) holds the coverage of a standard normal; `middle` is that at x = 0. */
 function halfWidth(x: number, coverage: number, middle: number): number {
