@@ -13,7 +13,8 @@ import { requireReal } from "../domain";
  */
 export function kolmogorovUpperTail(x: number): number {
   requireReal("x", x);
-  if (x <= 0) return 1;
+  // Below 0.04 the other chance, e^(−π²/8x²), is under the smallest number.
+  if (x < 0.04) return 1;
   let sum = 0;
   if (x < 1) {
     for (let j = 7; j > 0; j -= 2) sum += Math.exp((-j * j * Math.PI * Math.PI) / (8 * x * x));

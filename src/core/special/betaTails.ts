@@ -1,11 +1,12 @@
 import { UnsettledError } from "../domain";
 import { productDifference } from "../numeric/productDifference";
 import { deviance } from "./deviance";
-import { saddleSeries } from "./saddleSeries";
-import { saddleTails, type Tails } from "./saddleTails";
+import { MOST_TERMS, saddleSeries } from "./saddleSeries";
+import { saddleTails, saddleTerms, type Tails } from "./saddleTails";
 import { stirlingError } from "./stirlingError";
 
 const CAP = 5000;
+const series = new Float64Array(MOST_TERMS);
 
 /** x^a·y^b/B(a, b), y = 1 − x: what both tails of the beta distribution and the binomial chances have in common. */
 export function betaFactor(a: number, b: number, x: number, y: number, lambda: number): number {
@@ -36,18 +37,15 @@ export function betaTails(a: number, b: number, x: number, y: number, lambda: nu
   if (!(x > 0)) return x === 0 ? { lower: 0, upper: 1 } : { lower: NaN, upper: NaN };
   if (!(y > 0)) return { lower: 1, upper: 0 };
   const small = Math.min(a, b);
-  if (small >= 20) {
+  if (small >= 60) {
     const n = a + b;
     const D = deviance(a, n * x, -lambda) + deviance(b, n * y, lambda);
     if (D < 0.32 * small) {
       const p = small / n;
       const q = Math.max(a, b) / n;
-      const tails = saddleTails(
-        saddleSeries((q - p) / Math.sqrt(q), p, 28),
-        small,
-        D,
-        a <= b ? lambda < 0 : lambda > 0,
-      );
+      const terms = saddleTerms(small, D);
+      saddleSeries((q - p) / Math.sqrt(q), p, terms, series);
+      const tails = saddleTails(series, terms, small, D, a <= b ? lambda < 0 : lambda > 0);
       return a <= b ? tails : { lower: tails.upper, upper: tails.lower };
     }
   }

@@ -32,6 +32,7 @@ export const ERF_EDGE = 0.46875;
  * Reference  Cody (1969), Rational Chebyshev approximations for the error function, Math. Comp. 23.
  */
 export function erfcx(x: number): number {
+  if (x < -27) return Infinity;
   if (x < -ERF_EDGE) return 2 * expSquare(x, 1) - erfcx(-x);
   if (x < ERF_EDGE) return Math.exp(x * x) * (1 - erfNearZero(x));
   if (x <= 4) return ratio(C, D, x);

@@ -1,13 +1,13 @@
 import { UnsettledError } from "../domain";
 import { deviance } from "./deviance";
 import { nearTwo } from "./logGamma";
-import { saddleSeries } from "./saddleSeries";
-import { saddleTails, type Tails } from "./saddleTails";
+import { MOST_TERMS, saddleSeries } from "./saddleSeries";
+import { saddleTails, saddleTerms, type Tails } from "./saddleTails";
 import { stirlingError } from "./stirlingError";
 
 const EPSILON = 2 ** -54;
 const CAP = 2000;
-const SERIES = saddleSeries(1, 0, 28);
+const SERIES = saddleSeries(1, 0, MOST_TERMS, new Float64Array(MOST_TERMS));
 
 /** x^a·e^(−x)/Γ(a + 1): the Poisson chance of a at mean x for any real a ≥ 0, and the scale of both gamma tails. */
 export function gammaFactor(x: number, a: number): number {
@@ -29,7 +29,10 @@ export function gammaTails(x: number, a: number): Tails {
   if (!(x >= 0 && a > 0 && a < Infinity)) return { lower: NaN, upper: NaN };
   if (x === 0) return { lower: 0, upper: 1 };
   if (x === Infinity) return { lower: 1, upper: 0 };
-  if (a >= 20 && x > 0.4 * a && x < 2 * a) return saddleTails(SERIES, a, deviance(a, x, x - a), x > a);
+  if (a >= 20 && x > 0.4 * a && x < 2 * a) {
+    const D = deviance(a, x, x - a);
+    return saddleTails(SERIES, saddleTerms(a, D), a, D, x > a);
+  }
   if (a < 1 && x < 1.5) return smallShape(x, a);
   return x < a + 1 ? below(x, a) : above(x, a);
 }

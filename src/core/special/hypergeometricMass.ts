@@ -12,6 +12,7 @@ import { stirlingError } from "./stirlingError";
  * Reference  Loader (2000), Fast and accurate computation of binomial probabilities.
  */
 export function hypergeometricMass(k: number, pool: number, good: number, drawn: number): number {
+  if (pool === 0) return 1;
   const bad = pool - good;
   const left = pool - drawn;
   const d = productDifference(good, drawn, k, pool) / pool;
