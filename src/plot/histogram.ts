@@ -92,9 +92,12 @@ function bars({ start, width, counts }: Bins, x: Scale, y: Scale): string {
 /** One stroke a pixel column at most: more would not be seen, and a file of 100,000 strokes would not be opened. */
 function rug(sorted: Float64Array, x: Scale, top: number): string {
   const strokes: string[] = [];
+  const [low, high] = x.domain() as [number, number];
+  const [left, right] = x.range() as [number, number];
+  const slope = (right - left) / (high - low);
   let last = -Infinity;
   for (let i = 0; i < sorted.length; i++) {
-    const column = Math.round(2 * x(sorted[i]!)) / 2;
+    const column = Math.round(2 * (left + (sorted[i]! - low) * slope)) / 2;
     if (column === last) continue;
     last = column;
     strokes.push(`M${column},${top}v${RUG}`);

@@ -30,7 +30,11 @@ export interface Offender {
 /** The columns of a block that hold at least `least` numbers, by their place in it. */
 export function numberColumns({ values }: Block, least = 1): number[] {
   const counts = (values[0] ?? []).map(() => 0);
-  for (const row of values) for (let i = 0; i < row.length; i++) if (typeof row[i] === "number") counts[i]!++;
+  let short = counts.length;
+  for (const row of values) {
+    for (let i = 0; i < row.length; i++) if (typeof row[i] === "number" && ++counts[i]! === least) short--;
+    if (short === 0) break;
+  }
   return counts.flatMap((count, place) => (count >= least ? [place] : []));
 }
 

@@ -1,5 +1,6 @@
 import type { Cell } from "../../sheet/cell";
 import type { PaneContext } from "../context";
+import { afterPaint } from "../afterPaint";
 import { element, fill } from "../dom/element";
 import { lazyFold } from "../dom/part";
 import { figure, table, type TableCell } from "../dom/table";
@@ -33,10 +34,13 @@ export function closerLook(context: PaneContext): HTMLElement {
     moreFigure.root,
   );
   const root = element("div", {}, fit.root, more.root);
-  answer.watch((current) => {
-    root.hidden = !current?.report;
+  const refresh = afterPaint(() => {
     fit.refresh();
     more.refresh();
+  });
+  answer.watch((current) => {
+    root.hidden = !current?.report;
+    refresh();
   });
   return root;
 }

@@ -1,5 +1,6 @@
 import type { PaneContext } from "../context";
 import { part, type PanePart } from "../dom/part";
+import { keepChanges } from "../keepChanges";
 import { answerCutoff } from "./answerCutoff";
 import { answerView } from "./answerView";
 import { closerLook } from "./closerLook";
@@ -14,10 +15,8 @@ export function cutoffPart(context: PaneContext): PanePart {
     answer.set(current && answerCutoff(call, current, question.get()));
   };
   column.watch(ask);
-  question.watch((asked) => {
-    ask();
-    void port.keepSetting("cutoff", asked).catch(() => undefined);
-  });
+  question.watch(ask);
+  keepChanges(port, "cutoff", question);
   return part(
     "cutoff",
     texts.cutoffHeading,

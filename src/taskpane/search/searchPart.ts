@@ -1,7 +1,9 @@
 import type { PaneContext } from "../context";
 import type { Refusal } from "../cutoff/answerCutoff";
+import { afterPaint } from "../afterPaint";
 import { element, fill } from "../dom/element";
 import { fold, part, type PanePart } from "../dom/part";
+import { keepChanges } from "../keepChanges";
 import type { Observable } from "../observable";
 import { pictureFigure } from "../picture/pictureFigure";
 import { formulaChooser } from "../target/formulaChooser";
@@ -23,7 +25,7 @@ export function searchPart(context: PaneContext, search: Observable<SearchQuesti
   const reserve = element("div", { "aria-live": "polite" });
   const chooser = formulaChooser(context, texts.formulaHeading);
 
-  const ask = () => {
+  const ask = afterPaint(() => {
     const { fraction } = question.get();
     const asked = search.get();
     const answer = answerSearch(call, fraction, asked, cutoff.get());
@@ -33,14 +35,11 @@ export function searchPart(context: PaneContext, search: Observable<SearchQuesti
     fill(load, ...loadWords(context, answer));
     fill(reserve, ...reserveWords(context, asked, answer));
     chooser.offer(searchFormulas(fraction, asked, cutoff.get(), texts));
-  };
-  // The answer of the cutoff follows its question at once, so that watching both would ask twice.
-  cutoff.watch(ask);
-  question.watch(() => cutoff.get() === undefined && ask());
-  search.watch((asked) => {
-    ask();
-    void port.keepSetting("search", asked).catch(() => undefined);
   });
+  cutoff.watch(ask);
+  question.watch(ask);
+  search.watch(ask);
+  keepChanges(port, "search", search);
   return part(
     "search",
     texts.searchHeading,

@@ -2,6 +2,7 @@ import { MARK_METHODS, type MarkMethod } from "../../core/method/markFactor";
 import type { SearchPlan } from "../../core/method/searchPlan";
 import type { SearchSummary } from "../../core/method/summariseSearches";
 import type { PaneContext } from "../context";
+import { afterPaint } from "../afterPaint";
 import { button, choice } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { field } from "../dom/field";
@@ -95,8 +96,9 @@ export function trialView(context: PaneContext): HTMLElement {
   });
   const cancel = button(texts.tryCancel, () => runner.cancel());
   running(false);
-  answer.watch(changed);
-  question.watch(changed);
+  const later = afterPaint(changed);
+  answer.watch(later);
+  question.watch(later);
   return fold(
     texts.tryHeading,
     false,

@@ -1,5 +1,6 @@
 import type { FixedMark, FixedMarkKind } from "../../sheet/fixedMark";
 import type { PaneContext } from "../context";
+import { afterPaint } from "../afterPaint";
 import { button, choice } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { field } from "../dom/field";
@@ -78,10 +79,13 @@ export function fixedMarkView(context: PaneContext): HTMLElement {
     message,
     history,
   );
-  answer.watch((current) => {
-    root.hidden = !current?.report;
+  const later = afterPaint(() => {
     propose();
     void failing(look);
+  });
+  answer.watch((current) => {
+    root.hidden = !current?.report;
+    later();
   });
   return root;
 }

@@ -1,6 +1,7 @@
 import { passRates } from "../../plot/passRates";
 import type { Cell } from "../../sheet/cell";
 import type { PaneContext } from "../context";
+import { afterPaint } from "../afterPaint";
 import { element, fill } from "../dom/element";
 import { fold } from "../dom/part";
 import { rangeField } from "../dom/rangeField";
@@ -61,9 +62,10 @@ export function groupsView(context: PaneContext): HTMLElement {
     element("p", { class: "quiet" }, texts.groupsNote(numbers.percent(0.8))),
     chooser.root,
   );
+  const later = afterPaint(tell);
   answer.watch((current) => {
     root.hidden = !current?.report;
-    tell();
+    later();
   });
   return root;
 }

@@ -1,6 +1,7 @@
 import type { Cell } from "../../sheet/cell";
 import type { PaneContext } from "../context";
 import type { CutoffAnswer } from "../cutoff/answerCutoff";
+import { afterPaint } from "../afterPaint";
 import { button } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { fold } from "../dom/part";
@@ -59,7 +60,8 @@ export function verdictView(context: PaneContext): HTMLElement {
     element("p", { class: "actions" }, act),
     message,
   );
-  answer.watch((current) => {
+  const count = afterPaint(() => {
+    const current = answer.get();
     const counted = current && verdictCounts(context, current);
     root.hidden = !counted;
     if (!counted) return;
@@ -74,5 +76,6 @@ export function verdictView(context: PaneContext): HTMLElement {
     formula.textContent = text;
     fill(message);
   });
+  answer.watch(count);
   return root;
 }

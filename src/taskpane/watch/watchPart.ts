@@ -1,6 +1,7 @@
 import { formatAddress, parseAddress } from "../../sheet/address";
 import type { PaneContext } from "../context";
 import type { Column } from "../column/readColumn";
+import { afterPaint } from "../afterPaint";
 import { element, fill } from "../dom/element";
 import { field } from "../dom/field";
 import { part, type PanePart } from "../dom/part";
@@ -52,7 +53,7 @@ export function watchPart(context: PaneContext): PanePart {
       { words: texts.driftTitle(""), formula: { text: formula, rows: drift.scores.length + 1, columns: 5 }, reads },
     ]);
   };
-  column.watch(look);
+  column.watch(afterPaint(look));
   const form = element("div", { class: "fields one" }, first.root, hint);
   return part(
     "watch",
