@@ -84,10 +84,13 @@ class MakeExecutable {
   }
 }
 
-/** The names of the functions that may spill: the functions bundle needs no more of the table. */
-function spillingFunctions() {
-  const table = JSON.parse(readFileSync(at(TABLE), "utf8"));
-  return JSON.stringify(table.filter(({ result }) => result === "matrix").map(({ name }) => name));
+/** Topics whose functions Excel loads when a cell first asks for one: those of src/functions/later.ts. */
+const LATER_TOPICS = ["stopping", "risk", "combine", "watch", "simulate"];
+
+/** Names out of the table of functions, as code: the functions bundle needs no more of the table. */
+function functionNames(chosen) {
+  const names = () => JSON.parse(readFileSync(at(TABLE), "utf8")).filter(chosen);
+  return DefinePlugin.runtimeValue(() => JSON.stringify(names().map(({ name }) => name)), [at(TABLE)]);
 }
 
 function addIn(mode, hostFiles) {
@@ -100,7 +103,10 @@ function addIn(mode, hostFiles) {
     // The host's manifest names functions.js, so it keeps its plain name; the rest is loaded by hash.
     output: { filename: "[name].js", chunkFilename: "pane/[name].[contenthash:8].js" },
     plugins: [
-      new DefinePlugin({ SPILLING_FUNCTIONS: DefinePlugin.runtimeValue(spillingFunctions, [at(TABLE)]) }),
+      new DefinePlugin({
+        SPILLING_FUNCTIONS: functionNames(({ result }) => result === "matrix"),
+        LATER_FUNCTIONS: functionNames(({ topic }) => LATER_TOPICS.includes(topic)),
+      }),
       new GeneratedFiles(at(TABLE), () => hostFiles(origin)),
       new MiniCssExtractPlugin({ filename: "[name].css", chunkFilename: "pane/[name].[contenthash:8].css" }),
       new CopyPlugin({

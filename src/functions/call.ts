@@ -9,12 +9,13 @@ import {
 } from "../sheet/invoke";
 import { WORKINGS } from "./audit.workings";
 import table from "./functions.json";
-import { implementations as immediate } from "./index";
+import { immediate } from "./immediate";
+import { later } from "./later";
 
 export const functionTable = table as readonly FunctionEntry[];
 
-/** Every cell function by name, WORKINGS among them. */
-export const implementations: Readonly<Record<string, CellFunction>> = { ...immediate, WORKINGS };
+/** Every cell function by name. */
+export const implementations: Readonly<Record<string, CellFunction>> = { ...immediate, ...later, WORKINGS };
 
 const entries = new Map(functionTable.map((entry) => [entry.name, entry]));
 

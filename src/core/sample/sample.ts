@@ -3,9 +3,9 @@ import { compensatedSum } from "../numeric/compensatedSum";
 /** The numbers that were scored, in the order in which they came, with what is derived from them worked out once, when first asked for. */
 export class Sample {
   readonly count: number;
-  #sorted?: Float64Array;
-  #mean?: number;
-  #sumOfSquares?: number;
+  private sortedKept?: Float64Array;
+  private meanKept?: number;
+  private sumOfSquaresKept?: number;
 
   /** Takes the array as it is: the caller must not change it afterwards. `sort` where the order is known more cheaply than by sorting. */
   constructor(
@@ -22,7 +22,7 @@ export class Sample {
 
   /** The values in rising order. */
   get sorted(): Float64Array {
-    return (this.#sorted ??= this.sort());
+    return (this.sortedKept ??= this.sort());
   }
 
   get minimum(): number {
@@ -35,17 +35,17 @@ export class Sample {
 
   /** The mean, corrected by the mean of the residuals: exact to the last digits also where the values share many leading digits. */
   get mean(): number {
-    if (this.#mean === undefined) {
+    if (this.meanKept === undefined) {
       const first = compensatedSum(this.values) / this.count;
-      this.#mean = Number.isFinite(first) ? first + compensatedSum(this.values, (x) => x - first) / this.count : first;
+      this.meanKept = Number.isFinite(first) ? first + compensatedSum(this.values, (x) => x - first) / this.count : first;
     }
-    return this.#mean;
+    return this.meanKept;
   }
 
   /** Sum of squared deviations from the mean. */
   get sumOfSquares(): number {
     const { mean } = this;
-    return (this.#sumOfSquares ??= compensatedSum(this.values, (x) => (x - mean) * (x - mean)));
+    return (this.sumOfSquaresKept ??= compensatedSum(this.values, (x) => (x - mean) * (x - mean)));
   }
 
   /** The sample standard deviation, divisor n − 1. */

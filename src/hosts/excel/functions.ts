@@ -1,18 +1,22 @@
 /*
- * The functions bundle: what Excel loads before the first of our formulas can calculate, so nothing but the functions is in it.
+ * The functions bundle: what Excel loads before the first of our formulas can calculate, so nothing is in it but the functions of the main job.
  * This entry and the page (src/taskpane/excel.ts) are the only places that know the host's globals.
  */
-import { implementations } from "../../functions/index";
-import type { CellFunction } from "../../sheet/invoke";
+import { immediate } from "../../functions/immediate";
 import { associateAll } from "./associate";
+import { onDemand } from "./onDemand";
 
-/** Names of the functions that may spill, put in by the build from the table of functions. */
+/** Put in by the build from the table of functions: names of those that may spill, and of those that load when first asked for. */
 declare const SPILLING_FUNCTIONS: readonly string[];
+declare const LATER_FUNCTIONS: readonly string[];
 
-/** The workings come in when the first cell asks for them. */
-async function WORKINGS(...cells: unknown[]): Promise<unknown> {
-  const loaded = await import("../../functions/audit.workings");
-  return (loaded.WORKINGS as CellFunction)(...cells);
-}
+const implementations = {
+  ...immediate,
+  ...onDemand(LATER_FUNCTIONS, async () => (await import("../../functions/later")).later),
+  ...onDemand(["WORKINGS"], async () => {
+    const { WORKINGS } = await import("../../functions/audit.workings");
+    return { WORKINGS };
+  }),
+};
 
-associateAll(CustomFunctions, { ...implementations, WORKINGS }, SPILLING_FUNCTIONS);
+associateAll(CustomFunctions, implementations, SPILLING_FUNCTIONS);

@@ -1,7 +1,10 @@
 import { describe, expect, test } from "vitest";
 import { DomainError, NoAnswerError } from "../../../src/core/domain";
 import { functionTable, implementations } from "../../../src/functions/call";
+import { immediate } from "../../../src/functions/immediate";
+import { later } from "../../../src/functions/later";
 import { associateAll } from "../../../src/hosts/excel/associate";
+import { onDemand } from "../../../src/hosts/excel/onDemand";
 import { cellsForHost, cellsFromHost } from "../../../src/hosts/excel/cells";
 
 class HostError extends Error {
@@ -63,6 +66,22 @@ describe("registering with Excel", () => {
       code: "#VALUE!",
       message: 'name must be a function; "X" was given.',
     });
+  });
+
+  test("loads functions on demand once asked for, and by their own names", async () => {
+    let loads = 0;
+    const load = async () => (loads++, { TWICE: (x: number) => 2 * x, HALF: (x: number) => x / 2 });
+    const registered = register(onDemand(["TWICE", "HALF"], load));
+    expect(loads).toBe(0);
+    await expect(registered.get("HALF")!(4)).resolves.toBe(2);
+    await expect(registered.get("TWICE")!(4)).resolves.toBe(8);
+  });
+
+  test("what loads on demand and what loads at once are all functions but WORKINGS, each in one of the two", () => {
+    const names = [...Object.keys(immediate), ...Object.keys(later), "WORKINGS"];
+    expect(names.sort()).toEqual(functionTable.map(({ name }) => name).sort());
+    const topics = new Set(functionTable.filter(({ name }) => name in later).map(({ topic }) => topic));
+    expect([...topics]).toEqual(["stopping", "risk", "combine", "watch", "simulate"]);
   });
 
   test("never lets a number that is none into a cell", () => {
