@@ -49,10 +49,16 @@ export function guardedCutoff(
     const message = `max_wrong of ${maxWrong} is met without any mark: only ${riskWithoutMark.toPrecision(3)} of all entries are truly short of the limit.`;
     throw new NoAnswerError("max_wrong", message);
   }
-  const slope = representable("error_sd", errorSd, trueSd / errorSd);
-  const need = representable("error_sd", errorSd, standardLimit * (scoreSd / errorSd));
+  // An error below 1e-15 of the true spread is none to the last digit of the mark.
+  const slope = Math.min(trueSd / errorSd, 1e15);
+  const need = representable("limit", limit, standardLimit * Math.hypot(1, slope));
   const safe = (need + normalUpperTailQuantile(maxWrong)) / slope;
   const above = representable("error_sd", errorSd, safe + 1 + 1e-6 * Math.abs(safe));
   const standardMark = findRoot((a) => Math.log(wrongPassRisk(a, slope, need) / maxWrong), -40, above);
-  return { scoreSd, riskWithoutMark, standardMark, cutoff: mean + sign * scoreSd * standardMark };
+  return {
+    scoreSd,
+    riskWithoutMark,
+    standardMark,
+    cutoff: representable("error_sd", errorSd, mean + sign * scoreSd * standardMark),
+  };
 }

@@ -1,4 +1,4 @@
-import { NoAnswerError, requireCount, requireFinite } from "../domain";
+import { DomainError, NoAnswerError, requireCount, requireFinite } from "../domain";
 import { compensatedSum } from "../numeric/compensatedSum";
 
 export interface RatingMeanSquares {
@@ -47,7 +47,7 @@ export function ratingMeanSquares(ratings: Float64Array, raters: number): Rating
       "ratings leave no residual (every rating is the entry's level plus the rater's), so there is nothing to judge their reliability by.";
     throw new NoAnswerError("ratings", message);
   }
-  return {
+  const squares = {
     entries,
     raters,
     betweenEntries: (raters * sumOfSquares(rowMeans.map((m) => m - grand))) / (entries - 1),
@@ -55,6 +55,11 @@ export function ratingMeanSquares(ratings: Float64Array, raters: number): Rating
     betweenRaters: (entries * sumOfSquares(raterEffects)) / (raters - 1),
     residual: sumOfSquares(residuals) / ((entries - 1) * (raters - 1)),
   };
+  // Ratings of 1e200 or 1e-200: their squares are no numbers any more, or 0.
+  const sound =
+    squares.residual > 0 && squares.betweenEntries + squares.withinEntries + squares.betweenRaters < Infinity;
+  if (!sound) throw new DomainError("ratings", largest, "of a size whose squares are still numbers");
+  return squares;
 }
 
 function mean(values: Float64Array): number {

@@ -20,6 +20,8 @@ export interface RatioLimits {
  */
 export function ratioLimits(x1: number, n1: number, x2: number, n2: number, confidence: number): RatioLimits {
   const z = normalUpperTailQuantile((1 - confidence) / 2);
+  // A confidence that is 0 to the last digit has no width.
+  if (z === 0) return { lower: x1 / n1 / (x2 / n2), upper: x1 / n1 / (x2 / n2) };
   const beyond = (logRatio: number) => koopman(x1, n1, x2, n2, logRatio) - z * z;
   // Half a success stands in for none: only to have somewhere to begin.
   const seen = Math.log(Math.max(x1, 0.5) / n1) - Math.log(x2 / n2);

@@ -1,6 +1,7 @@
 import { DomainError, UnsettledError, requireFinite, requireNotNegative, requirePositive } from "../domain";
 import { normalCdf } from "../distribution/normalCdf";
 import { directionOf, type Better } from "./better";
+import { representable } from "./representable";
 import { unitNormalLoss } from "./unitNormalLoss";
 
 export interface ReserveScore {
@@ -53,7 +54,7 @@ export function reserveScore(
     if (!(next > u + 1e-16 * Math.abs(u))) break;
     u = next;
   }
-  return { standardReserve: u, standardGain: unitNormalLoss(u), score: mean + sign * sd * u };
+  return { standardReserve: u, standardGain: unitNormalLoss(u), score: representable("sd", sd, mean + sign * sd * u) };
 }
 
 function slopeAt(u: number, discount: number, wait: number): number {

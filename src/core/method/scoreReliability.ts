@@ -32,24 +32,27 @@ export interface ScoreReliability extends RatingMeanSquares {
 export function scoreReliability(ratings: Float64Array, raters: number, confidence = 0.95): ScoreReliability {
   requireFraction("confidence", confidence);
   const squares = ratingMeanSquares(ratings, raters);
-  const { entries: n, raters: k, betweenEntries: between, withinEntries: within, betweenRaters, residual } = squares;
+  const { entries: n, raters: k } = squares;
   const tail = (1 - confidence) / 2;
   const upperF = (df1: number, df2: number) => 1 / fQuantile(tail, df2, df1);
 
-  const oneWay = between / within;
+  const oneWay = squares.betweenEntries / squares.withinEntries;
   const oneWayLow = oneWay / upperF(n - 1, n * (k - 1));
   const oneWayHigh = oneWay * upperF(n * (k - 1), n - 1);
-  const fixed = between / residual;
+  const fixed = squares.betweenEntries / squares.residual;
   const fixedLow = fixed / upperF(n - 1, (n - 1) * (k - 1));
   const fixedHigh = fixed * upperF((n - 1) * (k - 1), n - 1);
 
-  const single = divided(between - residual, between + (k - 1) * residual + (k * (betweenRaters - residual)) / n);
-  const degreesTwoWay = satterthwaite(single ?? 0, betweenRaters / residual, n, k);
-  const rest = k * betweenRaters + (k * n - k - n) * residual;
-  const far = upperF(n - 1, degreesTwoWay);
+  // The two-way forms in units of the residual mean square, so that no product of large squares overflows.
+  const raterF = squares.betweenRaters / squares.residual;
+  const single = divided(fixed - 1, fixed + k - 1 + (k * (raterF - 1)) / n);
+  const degreesTwoWay = satterthwaite(single ?? 0, raterF, n, k);
+  const rest = k * raterF + k * n - k - n;
+  // The lower limit by the inverse of its F, which overflows where the degrees of freedom are next to none.
+  const far = fQuantile(tail, degreesTwoWay, n - 1);
   const near = upperF(degreesTwoWay, n - 1);
-  const low = divided(n * (between - far * residual), far * rest + n * between);
-  const high = divided(n * (near * between - residual), rest + n * near * between);
+  const low = divided(n * (fixed * far - 1), rest + n * fixed * far);
+  const high = divided(n * (near * fixed - 1), rest + n * near * fixed);
 
   const ratio = (f: number) => divided(f - 1, f + k - 1);
   const mean = (f: number) => divided(f - 1, f);
@@ -60,7 +63,7 @@ export function scoreReliability(ratings: Float64Array, raters: number, confiden
     { form: "ICC(1,k)", reliability: mean(oneWay), lower: mean(oneWayLow), upper: mean(oneWayHigh) },
     {
       form: "ICC(2,k)",
-      reliability: divided(between - residual, between + (betweenRaters - residual) / n),
+      reliability: divided(fixed - 1, fixed + (raterF - 1) / n),
       lower: steppedUp(low, k),
       upper: steppedUp(high, k),
     },
@@ -73,6 +76,8 @@ export function scoreReliability(ratings: Float64Array, raters: number, confiden
 function satterthwaite(r: number, raterF: number, n: number, k: number): number {
   const a = k * r * raterF;
   const b = n * (1 + (k - 1) * r) - k * r;
+  // Neither entries nor raters differ: the residual stands alone.
+  if (a === 0) return (k - 1) * (n - 1);
   return ((k - 1) * (n - 1) * (a + b) ** 2) / ((n - 1) * a * a + b * b);
 }
 

@@ -2,6 +2,7 @@ import { DomainError, NoAnswerError, requireFraction, requirePositive } from "..
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { compensatedSum } from "../numeric/compensatedSum";
 import { Sample } from "../sample/sample";
+import { representable } from "./representable";
 
 export interface ScoreValidity {
   readonly pairs: number;
@@ -71,10 +72,17 @@ function unitDeviations(argument: string, values: Float64Array): { deviations: F
     const came = `all ${values.length} that have a partner are ${values[0]}`;
     throw new DomainError(argument, values[0], "numbers that differ from one another", came);
   }
-  const { mean } = new Sample(values);
-  const deviations = values.map((value) => value - mean);
-  const largest = deviations.reduce((most, d) => Math.max(most, Math.abs(d)), 0);
+  const largestOf = (numbers: Float64Array) => numbers.reduce((most, d) => Math.max(most, Math.abs(d)), 0);
+  // A power of two takes nothing from the digits, and without it the sum of numbers near 1e308 overflows.
+  const unit = 2 ** Math.floor(Math.log2(largestOf(values)));
+  const inUnits = values.map((value) => value / unit);
+  const { mean } = new Sample(inUnits);
+  const deviations = inUnits.map((value) => value - mean);
+  const largest = largestOf(deviations);
   const scaled = deviations.map((d) => d / largest);
   const length = Math.sqrt(compensatedSum(scaled.map((d) => d * d)));
-  return { deviations: scaled.map((d) => d / length), norm: length * largest };
+  return {
+    deviations: scaled.map((d) => d / length),
+    norm: representable(argument, values[0], length * largest * unit),
+  };
 }

@@ -73,6 +73,23 @@ describe("cutoffErrorRates", () => {
     }
   });
 
+  test("the ends of the domain settle, and no share leaves 0 … 1", () => {
+    for (const count of [2, 3, 10, 1000])
+      for (const fraction of [1e-100, 1e-30, 1 - 1e-15])
+        for (const [method, confidence] of [
+          ["plain", 0.95],
+          ["next", 0.95],
+          ["safe", 1e-100],
+          ["safe", 1 - 1e-15],
+        ] as const) {
+          const { passedNotTop, topMissed } = cutoffErrorRates(count, fraction, method, confidence);
+          for (const share of [passedNotTop, topMissed]) {
+            expect(share).toBeGreaterThanOrEqual(0);
+            expect(share).toBeLessThanOrEqual(1);
+          }
+        }
+  });
+
   test.each<[string, Parameters<typeof cutoffErrorRates>]>([
     ["count", [1, 0.1]],
     ["count", [2.5, 0.1]],
@@ -80,6 +97,8 @@ describe("cutoffErrorRates", () => {
     ["count", [Infinity, 0.1]],
     ["fraction", [10, 0]],
     ["fraction", [10, NaN]],
+    ["fraction", [10, 1e-101]],
+    ["confidence", [10, 0.1, "safe", 1e-101]],
     ["confidence", [10, 0.1, "safe", 1]],
     ["confidence", [10, 0.1, "plain", NaN]],
   ])("refuses a bad %s: %o", (argument, args) => {

@@ -113,6 +113,19 @@ describe("guardedCutoff", () => {
     expect(risk).toBeLessThan(0.4999);
   });
 
+  test("by hand: half reliable scores, the limit at the mean: above the mean a quarter are short (Sheppard)", () => {
+    expect(guardedCutoff(50, 8, 50, 8, 0.25).cutoff).toBeCloseTo(50, 12);
+  });
+
+  test("extremes settle: errors of nothing beside the true spread, and the other way round", () => {
+    expect(guardedCutoff(1e12, 1, 0, 1e150, 1e-300, "low").cutoff).toBeLessThan(1e137);
+    expect(guardedCutoff(0, 1e-200, 0, 1, 0.2).standardMark).toBeCloseTo(
+      guardedCutoff(0, 1e-16, 0, 1, 0.2).standardMark,
+      13,
+    );
+    expect(() => guardedCutoff(1e150, 1e150, 81, 5.5, 0.5)).toThrow(expect.objectContaining({ name: "DomainError" }));
+  });
+
   test("where the risk is met without a mark, on paper too, there is no answer", () => {
     expect(() => guardedCutoff(40, 3, 70, 8, 0.05)).toThrow(
       expect.objectContaining({ name: "NoAnswerError", argument: "max_wrong" }),

@@ -51,6 +51,11 @@ describe("ratioLimits", () => {
     );
   });
 
+  test("a confidence that is 0 to the last digit leaves the ratio itself", () => {
+    for (const limit of Object.values(ratioLimits(3, 10, 4, 10, 1e-300))) expect(limit).toBeCloseTo(0.75, 15);
+    expect(ratioLimits(0, 10, 4, 10, 1e-300)).toEqual({ lower: 0, upper: 0 });
+  });
+
   test("extremes settle: one against a million million, tiny and huge confidence", () => {
     for (const counts of [
       [0, 1, 1, 1e12],

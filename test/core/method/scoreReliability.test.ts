@@ -90,11 +90,28 @@ describe("scoreReliability", () => {
       );
   });
 
+  test("ratings without any spread between entries or raters, and degrees of freedom next to none, still settle", () => {
+    const latin = flat([
+      [1, 2, 3],
+      [2, 3, 1],
+      [3, 1, 2],
+    ]);
+    // All mean squares between are 0: −1/(k − 1) for the first and third kind, by hand; the means of 3 don't exist.
+    const { forms } = scoreReliability(latin, 3);
+    expect([forms[0]!.reliability, forms[2]!.reliability]).toEqual([-0.5, -0.5]);
+    expect([forms[3]!.reliability, forms[5]!.reliability]).toEqual([undefined, undefined]);
+    const nearly = Float64Array.of(0.7530877664685249, 0, 2, 0, 0.8699023416265845, 2, 0, 2, 0.9597934540361166);
+    for (const { form, lower, upper } of scoreReliability(nearly, 3, 1.4e-11).forms)
+      for (const limit of [lower, upper]) expect(`${form} ${limit}`).not.toMatch(/NaN|Infinity/);
+  });
+
   test.each<[string, Parameters<typeof scoreReliability>]>([
     ["confidence", [flat(example), 4, 1]],
     ["confidence", [flat(example), 4, NaN]],
     ["ratings", [Float64Array.of(1, 2, NaN, 5), 2]],
     ["ratings", [Float64Array.of(1, 2, Infinity, 5), 2]],
+    ["ratings", [Float64Array.of(1e200, 2e200, 4e200, 1e200), 2]],
+    ["ratings", [Float64Array.of(1e-200, 2e-200, 4e-200, 1e-200), 2]],
     ["raters", [Float64Array.of(1, 2, 3, 5), 1]],
     ["entries", [Float64Array.of(1, 2, 3, 5), 4]],
     ["entries", [Float64Array.of(1, 2, 3, 5, 6), 2]],

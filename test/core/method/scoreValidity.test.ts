@@ -41,6 +41,12 @@ describe("scoreValidity", () => {
     expect(scoreValidity(x, y, 0.95, 2 * scoreSd).beforeSelection).toBeGreaterThan(correlation);
   });
 
+  test("scores next to the largest number there is keep their digits", () => {
+    const huge = scoreValidity(of(0.9e308, -0.9e308, 0.5e308, 0.2e308), of(3, 1, 4, 2));
+    const plain = scoreValidity(of(9, -9, 5, 2), of(3, 1, 4, 2));
+    expect(huge.correlation).toBeCloseTo(plain.correlation, 14);
+  });
+
   test("fewer than 4 pairs: no answer; no spread: refused by name", () => {
     expect(() => scoreValidity(of(1, 2, 3), of(1, 2, 4))).toThrow(expect.objectContaining({ name: "NoAnswerError" }));
     expect(() => scoreValidity(of(), of())).toThrow(expect.objectContaining({ name: "NoAnswerError" }));
