@@ -1,5 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
+import { binomialPmf } from "../../../src/core/distribution/binomialPmf";
 import { groupPassRates } from "../../../src/core/method/groupPassRates";
 import { holmAdjusted } from "../../../src/core/method/holmAdjusted";
 import { passRateRatio } from "../../../src/core/method/passRateRatio";
@@ -41,6 +42,14 @@ describe("passRateRatio", () => {
       }),
       { numRuns: 200 },
     );
+  });
+
+  test("the warning: two truly equal groups of 20, half passing, fall below four fifths 46 % of the time (exact binomial sum)", () => {
+    let below = 0;
+    for (let a = 0; a <= 20; a++)
+      for (let b = 0; b <= 20; b++)
+        if (passRateRatio(a, 20, b, 20).belowFourFifths) below += binomialPmf(a, 20, 0.5) * binomialPmf(b, 20, 0.5);
+    expect(below).toBeCloseTo(0.46, 2);
   });
 
   test("nobody passed on either side: no ratio, no limits, not below, p-value 1", () => {
