@@ -23,9 +23,9 @@ const RATIO = [
  *
  * @customfunction PASS_RATE_RATIO
  * @param {any} passed_a Passed in group a, a whole number from 0 to assessed_a.
- * @param {any} assessed_a Assessed in group a, a whole number of at least 1.
+ * @param {any} assessed_a Assessed in group a, a whole number from 1 to 1000000000000.
  * @param {any} passed_b Passed in group b, a whole number from 0 to assessed_b.
- * @param {any} assessed_b Assessed in group b, a whole number of at least 1.
+ * @param {any} assessed_b Assessed in group b, a whole number from 1 to 1000000000000.
  * @param {any} [confidence] Confidence of the limits, between 0 and 1; left out: 95%.
  * @param {any} [item] One label alone, such as "Fisher exact p-value". Left out: the whole table.
  * @returns {any[][]} Two columns, label and value: rate a, rate b, ratio of lower to higher, below four fifths (TRUE or FALSE), Fisher exact p-value, ratio lower limit, ratio upper limit. With nobody passed on either side ratio and limits are "none".

@@ -16,7 +16,7 @@ const ERROR_RATES = ["average passing fraction", "passed but not truly top", "tr
  *
  * @customfunction CUTOFF_ERROR_RATES
  * @param {any} count Scores that the mark is set from, a whole number of at least 2.
- * @param {any} fraction Fraction meant to pass, between 0 and 1.
+ * @param {any} fraction Fraction meant to pass, between 0 and 1 (from 1e-100 on).
  * @param {any} [method] How the mark is set: "plain" (default, TOP_FRACTION_CUTOFF), "safe" (SAFE_CUTOFF) or "next" (NEXT_SCORE_CUTOFF).
  * @param {any} [confidence] Confidence of the safe mark, between 0 and 1; left out: 95%. The other methods don't use it.
  * @param {any} [item] One label alone, such as "truly top but missed". Left out: the whole table.
