@@ -4,6 +4,8 @@ import type { Stage } from "./stages";
 export interface MissCost {
   readonly units: number;
   readonly share: number;
+  /** The stages at which these looks stop, counted from 0. */
+  readonly stages: readonly number[];
 }
 
 /**
@@ -11,12 +13,14 @@ export interface MissCost {
  * paid for the stages up to there. Kinds that pay the same are taken as one.
  */
 export function missCosts(stages: readonly Stage[], multiples: readonly number[], fraction: number): MissCost[] {
-  const shares = new Map<number, number>();
+  const kinds = new Map<number, MissCost>();
   let paid = 0;
   stages.forEach(({ reach }, index) => {
     paid += multiples[index];
     const next = stages[index + 1]?.reach ?? fraction;
-    if (reach > next) shares.set(paid, (shares.get(paid) ?? 0) + reach - next);
+    if (!(reach > next)) return;
+    const { share, stages: before } = kinds.get(paid) ?? { share: 0, stages: [] };
+    kinds.set(paid, { units: paid, share: share + reach - next, stages: [...before, index] });
   });
-  return [...shares].map(([units, share]) => ({ units, share }));
+  return [...kinds.values()];
 }

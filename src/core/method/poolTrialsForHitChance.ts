@@ -7,8 +7,9 @@ import { reachesChance } from "./reachesChance";
 
 export interface PoolTrials {
   readonly trials: number;
-  /** The chance of the hits within these trials. */
+  /** The chance of the hits within these trials, and within one fewer. */
   readonly chance: number;
+  readonly chanceBefore: number;
 }
 
 /**
@@ -31,5 +32,9 @@ export function poolTrialsForHitChance(pool: number, good: number, chance: numbe
       () => hypergeometricCdf(hits - 1, pool, good, trials),
     );
   const trials = smallestInteger(met, hits, pool);
-  return { trials, chance: hypergeometricUpperTail(hits, pool, good, trials) };
+  return {
+    trials,
+    chance: hypergeometricUpperTail(hits, pool, good, trials),
+    chanceBefore: hypergeometricUpperTail(hits, pool, good, trials - 1),
+  };
 }

@@ -1,13 +1,15 @@
 import { requireCount, requireFraction } from "../domain";
 import { costUnit } from "./costUnit";
 import { missCostQuantile } from "./missCostQuantile";
-import { missCosts } from "./missCosts";
+import { missCosts, type MissCost } from "./missCosts";
 import { representable } from "./representable";
 import { requireStages } from "./stages";
 
 export interface SearchBudget {
   /** The common unit of the costs: numerator / denominator, 0 where nothing costs anything. */
   readonly unit: number;
+  /** What a look that misses may pay, and how often. */
+  readonly misses: readonly MissCost[];
   /** What a hit pays, in units, and what the misses may pay. */
   readonly hitUnits: number;
   readonly missUnits: number;
@@ -38,11 +40,12 @@ export function searchBudget(
   const stages = requireStages(reach, costs, fraction);
   requireFraction("chance", chance);
   requireCount("hits", hits, 1);
-  if (costs.every((cost) => cost === 0)) return { unit: 0, hitUnits: 0, missUnits: 0, budget: 0, chance: 1 };
+  if (costs.every((cost) => cost === 0))
+    return { unit: 0, misses: [], hitUnits: 0, missUnits: 0, budget: 0, chance: 1 };
   const { multiples, numerator, denominator } = costUnit(costs);
   const hitUnits = hits * multiples.reduce((sum, units) => sum + units, 0);
   const misses = missCosts(stages, multiples, fraction);
   const { units, reached } = missCostQuantile(misses, fraction, chance, hits);
   const budget = representable("costs", Math.max(...costs), ((hitUnits + units) * numerator) / denominator);
-  return { unit: numerator / denominator, hitUnits, missUnits: units, budget, chance: reached };
+  return { unit: numerator / denominator, misses, hitUnits, missUnits: units, budget, chance: reached };
 }
