@@ -28,7 +28,10 @@ export function columnPart(context: PaneContext, follower: Follower): PanePart {
   return made;
 }
 
-function columnWords({ texts, numbers }: PaneContext, { heading, address, count, blanks }: Column): HTMLElement[] {
+function columnWords(
+  { texts, numbers, port }: PaneContext,
+  { heading, address, count, blanks }: Column,
+): HTMLElement[] {
   const scores = count === 1 ? texts.oneScore : texts.scoresCounted(numbers.count(count));
   const where = listed(blanks, texts, numbers);
   const skipped =
@@ -40,6 +43,7 @@ function columnWords({ texts, numbers }: PaneContext, { heading, address, count,
   return [
     element("p", { class: "column-name" }, heading === "" ? address : texts.columnWithHeading(heading, address)),
     element("p", {}, `${scores}, ${skipped}.`),
+    ...(blanks.length > 0 && port.kind === "excel" ? [element("p", { class: "quiet" }, texts.blanksInExcel)] : []),
   ];
 }
 

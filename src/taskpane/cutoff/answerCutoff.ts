@@ -35,11 +35,23 @@ export interface CutoffFigures {
   readonly looksHalf: number | undefined;
   readonly looksMost: number | undefined;
   readonly fitP: number | undefined;
+  /** The cutoff by rank, which assumes no curve: asked for only where the shape fits badly. */
+  readonly rank: RankCutoff | undefined;
   /** The first score on the grid of the scores that clears the cutoff. */
   readonly spoken: GridMark;
   readonly decimals: number | undefined;
   readonly spread: number;
 }
+
+export interface RankCutoff {
+  readonly cutoff: number;
+  /** "none" where the sample is too small for a limit on that side. */
+  readonly lower: Cell;
+  readonly upper: Cell;
+}
+
+/** Below this p-value the shape is said not to fit; 5 % is common practice, no source. */
+const POOR_FIT = 0.05;
 
 /** Asks the cell functions for the cutoff of a column. */
 export function answerCutoff(call: Call, column: Column, question: CutoffQuestion): CutoffAnswer {
@@ -57,6 +69,7 @@ export function answerCutoff(call: Call, column: Column, question: CutoffQuestio
   const decimals = scoreDecimals(column.values);
   const next = call("NEXT_SCORE_CUTOFF", [column.cells, fraction, shape, better]);
   const cutoff = numberAt("cutoff")!;
+  const fitP = numberAt("Anderson-Darling p-value");
   return {
     column,
     question,
@@ -73,12 +86,26 @@ export function answerCutoff(call: Call, column: Column, question: CutoffQuestio
       highestPassing: numberAt("highest passing fraction")!,
       looksHalf: numberAt("looks for a 50% chance"),
       looksMost: numberAt("looks for a 90% chance"),
-      fitP: numberAt("Anderson-Darling p-value"),
+      fitP,
+      rank: fitP !== undefined && fitP < POOR_FIT ? rankCutoff(call, column, question) : undefined,
       spoken: gridMark(cutoff, better, decimals, spread),
       decimals,
       spread,
     },
   };
+}
+
+function rankCutoff(
+  call: Call,
+  column: Column,
+  { fraction, confidence, better }: CutoffQuestion,
+): RankCutoff | undefined {
+  const outcome = call("RANK_CUTOFF", [column.cells, fraction, confidence, better]);
+  if (!outcome || "error" in outcome) return undefined;
+  const value = new Map(outcome.value as [string, Cell][]);
+  const cutoff = value.get("cutoff");
+  if (typeof cutoff !== "number") return undefined;
+  return { cutoff, lower: value.get("lower limit"), upper: value.get("upper limit") };
 }
 
 /** Why a call gave no value, or undefined where it gave one. */

@@ -1,7 +1,7 @@
 import { formulaText, type Formula, type FormulaArgument } from "../formula";
 import type { CutoffQuestion } from "./question";
 
-export const FORMULA_KINDS = ["report", "cutoff", "limits", "safe", "next"] as const;
+export const FORMULA_KINDS = ["report", "cutoff", "limits", "safe", "next", "rank"] as const;
 export type FormulaKind = (typeof FORMULA_KINDS)[number];
 
 /** The formula for what is shown; arguments at their default are left out. */
@@ -27,5 +27,7 @@ export function cutoffFormula(kind: FormulaKind, address: string, question: Cuto
       return formula("SAFE_CUTOFF", [scores, fraction, confidence, shape, better]);
     case "next":
       return formula("NEXT_SCORE_CUTOFF", [scores, fraction, shape, better]);
+    case "rank":
+      return formula("RANK_CUTOFF", [scores, fraction, confidence, better], 4, 2);
   }
 }

@@ -11,6 +11,7 @@ export function intoSheet(context: PaneContext): HTMLElement {
     limits: texts.putLimits,
     safe: texts.putSafe,
     next: texts.putNext,
+    rank: texts.putRank,
   };
   const chooser = formulaChooser(context, texts.formulaHeading, true);
   const offer = () => {

@@ -1,9 +1,7 @@
+import type { Cell } from "../../sheet/cell";
 import type { Numbers } from "../numbers";
 import type { Texts } from "../texts/en";
 import type { CutoffAnswer, CutoffFigures, Refusal } from "./answerCutoff";
-
-/** Below this p-value the pane says that the shape doesn't fit; 5 % is common practice, no source. */
-const POOR_FIT = 0.05;
 
 /** A mark as it is read: one digit finer than the scores. */
 export function markText(value: number, { decimals, spread }: CutoffFigures, numbers: Numbers): string {
@@ -46,9 +44,13 @@ export function trustSentences({ question, report }: CutoffAnswer, texts: Texts,
 
 /** What to beware of: a shape that doesn't fit, or one that was chosen by the scores themselves. */
 export function shapeWarnings({ question, report }: CutoffAnswer, texts: Texts, numbers: Numbers): string[] {
-  const { fitP } = report!;
+  const { fitP, rank } = report!;
   const warnings: string[] = [];
-  if (fitP !== undefined && fitP < POOR_FIT) warnings.push(texts.trustFit(numbers.telling(fitP)));
+  if (rank) {
+    const limit = (cell: Cell) => (typeof cell === "number" ? markText(cell, report!, numbers) : texts.noAnswer);
+    const byRank = texts.trustRank(markText(rank.cutoff, report!, numbers), limit(rank.lower), limit(rank.upper));
+    warnings.push(`${texts.trustFit(numbers.telling(fitP!))} ${byRank}`);
+  }
   if (question.shape === "boxcox") warnings.push(texts.shapeFitted);
   else if (question.shape !== "normal") warnings.push(texts.shapeChosen);
   return warnings;

@@ -32,7 +32,9 @@ export const deCutoff: Translated<typeof enCutoff> = {
   trustPassing: (fraction, low, high) =>
     `Gemeint sind ${fraction}; in Wirklichkeit passieren vielleicht nur ${low}, vielleicht aber auch ${high} aller Einträge.`,
   trustFit: (p) =>
-    `Die Werte sehen nicht nach dieser Form aus (Anderson-Darling p = ${p}): versuchen Sie eine andere oder die Schwelle nach Rang, die keine voraussetzt.`,
+    `Die Werte sehen nicht nach dieser Form aus (Anderson-Darling p = ${p}): versuchen Sie eine andere, oder nehmen Sie die Schwelle nach Rang, die keine voraussetzt.`,
+  trustRank: (cutoff, lower, upper) =>
+    `Nach Rang steht sie bei ${cutoff}; untere Grenze ${lower}, obere Grenze ${upper}.`,
   passingNow: (passing, count) => `Von den bisher ${count} Werten erreichen ${passing} sie.`,
   passingNowOne: (count) => `Von den bisher ${count} Werten erreicht 1 sie.`,
   looksAhead: (half, most) =>
@@ -90,6 +92,7 @@ export const deCutoff: Translated<typeof enCutoff> = {
   putLimits: "die Schwelle und ihre Grenzen (3 Zeilen, 2 Spalten)",
   putSafe: "die sichere Schwelle",
   putNext: "die Schwelle für den nächsten Eintrag",
+  putRank: "die Schwelle nach Rang (4 Zeilen, 2 Spalten)",
   formulaShown: "Formel",
   copy: "Kopieren",
   copied: "Kopiert.",

@@ -22,6 +22,8 @@ export const dePane: Translated<typeof enPane> = {
   noBlanks: "keine leeren Zellen",
   oneBlank: (where) => `1 leere Zelle übergangen (${where})`,
   blanksSkipped: (count, where) => `${count} leere Zellen übergangen (${where})`,
+  blanksInExcel:
+    "Manche Ausgaben von Excel übergeben leere Zellen als 0. Was diese tut, sagt =WEIR.BLANK_CHECK auf eine leere Zelle.",
   offendersOne:
     "1 Zelle enthält keinen Wert. Berichtigen oder leeren Sie sie: eine Schwelle über nur einen Teil der Einträge sähe aus wie eine über alle.",
   offendersMany: (count) =>

@@ -30,7 +30,9 @@ export const enCutoff = {
   trustPassing: (fraction: string, low: string, high: string) =>
     `Meant to take ${fraction}, it may really let through anything from ${low} to ${high} of all entries.`,
   trustFit: (p: string) =>
-    `The scores don't look like this shape (Anderson-Darling p = ${p}): try another shape, or the cutoff by rank, which assumes none.`,
+    `The scores don't look like this shape (Anderson-Darling p = ${p}): try another, or take the cutoff by rank, which assumes none.`,
+  trustRank: (cutoff: string, lower: string, upper: string) =>
+    `By rank it stands at ${cutoff}; lower limit ${lower}, upper limit ${upper}.`,
   passingNow: (passing: string, count: string) => `Of the ${count} scores so far, ${passing} clear it.`,
   passingNowOne: (count: string) => `Of the ${count} scores so far, 1 clears it.`,
   looksAhead: (half: string, most: string) =>
@@ -89,6 +91,7 @@ export const enCutoff = {
   putLimits: "the cutoff and its limits (3 rows, 2 columns)",
   putSafe: "the safe cutoff",
   putNext: "the next-score cutoff",
+  putRank: "the cutoff by rank (4 rows, 2 columns)",
   formulaShown: "Formula",
   copy: "Copy",
   copied: "Copied.",

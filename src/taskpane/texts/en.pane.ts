@@ -22,6 +22,8 @@ export const enPane = {
   noBlanks: "no blanks",
   oneBlank: (where: string) => `1 blank skipped (${where})`,
   blanksSkipped: (count: string, where: string) => `${count} blanks skipped (${where})`,
+  blanksInExcel:
+    "Some builds of Excel hand blank cells to functions as 0. What this one does, =WEIR.BLANK_CHECK of an empty cell tells.",
   offendersOne:
     "1 cell is no score. Correct it or clear it, since a cutoff over only part of the entries would look like one over all:",
   offendersMany: (count: string) =>
