@@ -16,12 +16,15 @@ export interface ScoreReliability extends RatingMeanSquares {
   readonly forms: readonly ReliabilityForm[];
 }
 
+/** With fewer degrees of freedom than this no F is worked out. */
+const FEWEST_DEGREES = 0.001;
+
 /**
  * The six intraclass correlations of a table of ratings (rows entries, columns raters) with confidence limits: one-way, two-way with
  * raters at random, two-way with these raters; of a single rating and of the mean of all k.
  *
  * Domain     ratings row by row, at least 2 rows and 2 raters; 0 < confidence < 1.
- * Edges      a form whose divisor is not above 0 is undefined.
+ * Edges      a form whose divisor is not above 0 is undefined, and so are two-way limits with fewer than 0.001 degrees of freedom.
  * Method     Ratios of mean squares; limits from F. ICC(2,1) with Satterthwaite's degrees of freedom, ICC(2,k) by stepping those up:
  *            these two are approximate. F(1 − α/2; a, b) is taken as 1/F(α/2; b, a), which keeps the digits of a small α.
  * Accuracy   relative error ≤ 1e-13 (test/core/method/scoreReliability.test.ts).
@@ -48,9 +51,10 @@ export function scoreReliability(ratings: Float64Array, raters: number, confiden
   const single = divided(fixed - 1, fixed + k - 1 + (k * (raterF - 1)) / n);
   const degreesTwoWay = satterthwaite(single ?? 0, raterF, n, k);
   const rest = k * raterF + k * n - k - n;
-  // The lower limit by the inverse of its F, which overflows where the degrees of freedom are next to none.
-  const far = fQuantile(tail, degreesTwoWay, n - 1);
-  const near = upperF(degreesTwoWay, n - 1);
+  // Degrees of freedom next to none (raters and residual cancel) allow no limits: F has left the range of numbers.
+  const judged = degreesTwoWay >= FEWEST_DEGREES;
+  const far = judged ? fQuantile(tail, degreesTwoWay, n - 1) : NaN;
+  const near = judged ? upperF(degreesTwoWay, n - 1) : NaN;
   const low = divided(n * (fixed * far - 1), rest + n * fixed * far);
   const high = divided(n * (near * fixed - 1), rest + n * near * fixed);
 
