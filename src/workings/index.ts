@@ -1,4 +1,6 @@
 import * as audit from "./audit";
+import * as combine from "./combine";
+import * as combinePanel from "./combine.panel";
 import * as describe from "./describe";
 import * as describeChecks from "./describe.checks";
 import * as describeCurves from "./describe.curves";
@@ -9,6 +11,8 @@ import type { Workings } from "./workingsCall";
 /** The workings of each cell function, by its name. */
 export const workings: Readonly<Record<string, Workings>> = {
   ...plan,
+  ...combinePanel,
+  ...combine,
   ...describeOutliers,
   ...describeCurves,
   ...describeChecks,
