@@ -1,4 +1,4 @@
-import { requireFinite, requirePositive } from "../domain";
+import { DomainError, requireFinite, requirePositive } from "../domain";
 import { normalUpperTail } from "../distribution/normalUpperTail";
 import { directionOf, type Better } from "./better";
 
@@ -42,5 +42,7 @@ export function chanceTrueScoreClears(
     errorSd < trueSd ? score - (errorSd / scoreSd) ** 2 * (score - mean) : mean + reliability * (score - mean);
   const remainingSd = trueSd * (errorSd / scoreSd);
   const standardGap = (directionOf(better) * (limit - expectedTrue)) / remainingSd;
+  // Next to the ends of the range of numbers the gap is 0/0 or ∞/∞.
+  if (Number.isNaN(standardGap)) throw new DomainError("error_sd", errorSd, "nearer in size to true_sd and the scores");
   return { reliability, expectedTrue, remainingSd, standardGap, chance: normalUpperTail(standardGap) };
 }

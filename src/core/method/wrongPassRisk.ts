@@ -43,7 +43,7 @@ function panelEdges(a: number, slope: number, need: number): number[] {
   const turn = need / slope - a;
   for (let i = -8; i <= 8; i += 4) edges.push(turn + i / slope);
   const steepness = slope * (1 + Math.max(0, -turn * slope));
-  // Below a 2⁻⁶⁰th of the range nothing counts, and an infinite steepness would never get away from 0.
-  if (turn < 8 / slope) for (let t = Math.max(8 / steepness, end * 2 ** -60); t < end; t *= 2) edges.push(t);
+  // Halves from the far end down to the scale of the fall, at most 60: an infinite steepness must not go on for ever.
+  if (turn < 8 / slope) for (let i = 1; i <= 60 && end * 2 ** -i > 4 / steepness; i++) edges.push(end * 2 ** -i);
   return edges.filter((t) => t >= start && t <= end).sort((one, other) => one - other);
 }

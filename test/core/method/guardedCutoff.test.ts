@@ -60,6 +60,7 @@ describe("chanceTrueScoreClears", () => {
 
   test.each<[string, [number, number, number, number, number]]>([
     ["score", [NaN, 60, 3, 55, 8]],
+    ["error_sd", [-1e6, -1e6, 5e-324, 1e150, 1e150]],
     ["limit", [64, Infinity, 3, 55, 8]],
     ["error_sd", [64, 60, 0, 55, 8]],
     ["mean", [64, 60, 3, NaN, 8]],
@@ -123,6 +124,7 @@ describe("guardedCutoff", () => {
       guardedCutoff(0, 1e-16, 0, 1, 0.2).standardMark,
       13,
     );
+    expect(() => guardedCutoff(1e308, 1, 0, 1e-5, 0.5)).toThrow(expect.objectContaining({ name: "DomainError" }));
     expect(() => guardedCutoff(1e150, 1e150, 81, 5.5, 0.5)).toThrow(expect.objectContaining({ name: "DomainError" }));
   });
 
