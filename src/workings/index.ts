@@ -6,11 +6,15 @@ import * as describeChecks from "./describe.checks";
 import * as describeCurves from "./describe.curves";
 import * as describeOutliers from "./describe.outliers";
 import * as plan from "./plan";
+import * as watch from "./watch";
+import * as watchComparison from "./watch.comparison";
 import type { Workings } from "./workingsCall";
 
 /** The workings of each cell function, by its name. */
 export const workings: Readonly<Record<string, Workings>> = {
   ...plan,
+  ...watchComparison,
+  ...watch,
   ...combinePanel,
   ...combine,
   ...describeOutliers,

@@ -3,6 +3,9 @@ import { compensatedSum } from "../numeric/compensatedSum";
 import { Sample } from "../sample/sample";
 
 export interface BrownForsytheTest {
+  /** Of each batch the median, and the mean distance from it. */
+  readonly medians: readonly number[];
+  readonly meanDistances: readonly number[];
   /** undefined where the distances from the medians don't vary within the batches: then no test is possible. */
   readonly statistic: number | undefined;
   readonly degreesBetween: number;
@@ -19,10 +22,8 @@ export interface BrownForsytheTest {
  * Reference  Brown & Forsythe (1974), Robust tests for the equality of variances, J. Amer. Statist. Assoc. 69.
  */
 export function brownForsytheTest(batches: readonly Sample[]): BrownForsytheTest {
-  const distances = batches.map((batch) => {
-    const median = middleOf(batch.sorted);
-    return new Sample(batch.values.map((score) => Math.abs(score - median)));
-  });
+  const medians = batches.map((batch) => middleOf(batch.sorted));
+  const distances = batches.map((batch, i) => new Sample(batch.values.map((score) => Math.abs(score - medians[i]))));
   const count = compensatedSum(distances.map((batch) => batch.count));
   const mean = compensatedSum(distances.map((batch) => (batch.count / count) * batch.mean));
   const between = compensatedSum(distances.map((batch) => batch.count * (batch.mean - mean) ** 2));
@@ -32,9 +33,10 @@ export function brownForsytheTest(batches: readonly Sample[]): BrownForsytheTest
   const largest = Math.max(...batches.map((batch) => Math.max(Math.abs(batch.minimum), Math.abs(batch.maximum))));
   // What rounding alone leaves of distances that are equal by their digits.
   const rounding = count * (4 * Number.EPSILON * largest) ** 2;
-  if (!(within > rounding)) return { statistic: undefined, degreesBetween, degreesWithin, pValue: undefined };
+  const known = { medians, meanDistances: distances.map((batch) => batch.mean), degreesBetween, degreesWithin };
+  if (!(within > rounding)) return { ...known, statistic: undefined, pValue: undefined };
   const statistic = between / degreesBetween / (within / degreesWithin);
-  return { statistic, degreesBetween, degreesWithin, pValue: fUpperTail(statistic, degreesBetween, degreesWithin) };
+  return { ...known, statistic, pValue: fUpperTail(statistic, degreesBetween, degreesWithin) };
 }
 
 function middleOf(sorted: Float64Array): number {

@@ -8,6 +8,9 @@ export interface CumulativeSums {
   readonly flags: boolean[];
 }
 
+/** What is allowed for at each score, and the sum that is flagged, in standard deviations. */
+export const SUM_ALLOWANCE = 0.5;
+export const SUM_LIMIT = 5;
 /** A sum on the limit by its digits must not be flagged by rounding. */
 const SLACK = 1e-12;
 
@@ -24,8 +27,8 @@ export function cumulativeSums(
   recent: Float64Array,
   mean: number,
   sd: number,
-  allowance = 0.5,
-  limit = 5,
+  allowance = SUM_ALLOWANCE,
+  limit = SUM_LIMIT,
 ): CumulativeSums {
   requireWithinReach(recent, mean, sd);
   const high = new Float64Array(recent.length);

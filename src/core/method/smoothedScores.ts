@@ -8,6 +8,9 @@ export interface SmoothedScores {
   readonly flags: boolean[];
 }
 
+/** How much a new score counts, and how wide the limits are in standard errors. */
+export const SMOOTHING_WEIGHT = 0.2;
+export const SMOOTHING_WIDTH = 3;
 /** A score on a limit by its digits must not be flagged by the rounding of a root. */
 const SLACK = 1e-12;
 /** Farther from the mean than this many standard deviations nothing can be smoothed or summed without overflow. */
@@ -28,8 +31,8 @@ export function smoothedScores(
   recent: Float64Array,
   mean: number,
   sd: number,
-  weight = 0.2,
-  width = 3,
+  weight = SMOOTHING_WEIGHT,
+  width = SMOOTHING_WIDTH,
 ): SmoothedScores {
   requireWithinReach(recent, mean, sd);
   const smoothed = new Float64Array(recent.length);
