@@ -6,6 +6,7 @@ import * as describeChecks from "./describe.checks";
 import * as describeCurves from "./describe.curves";
 import * as describeOutliers from "./describe.outliers";
 import * as plan from "./plan";
+import * as simulate from "./simulate";
 import * as watch from "./watch";
 import * as watchComparison from "./watch.comparison";
 import type { Workings } from "./workingsCall";
@@ -13,6 +14,7 @@ import type { Workings } from "./workingsCall";
 /** The workings of each cell function, by its name. */
 export const workings: Readonly<Record<string, Workings>> = {
   ...plan,
+  ...simulate,
   ...watchComparison,
   ...watch,
   ...combinePanel,
