@@ -90,7 +90,7 @@ export function requireInteger(argument: string, value: number): void {
   if (!Number.isSafeInteger(value)) throw new DomainError(argument, value, "a whole number");
 }
 
-/** Fails unless `value` is above zero; Infinity, where a distribution has its limit, may pass. NaN fails. */
-export function requireDegrees(argument: string, value: number): void {
-  if (!(value > 0)) throw new DomainError(argument, value, "a number above 0");
+/** Fails unless `value` is a shape or degrees of freedom for which the distributions are accurate. NaN fails. */
+export function requireShape(argument: string, value: number): void {
+  if (!(value >= 0.001 && value <= 1e15)) throw new DomainError(argument, value, "a number from 0.001 to 1e15");
 }

@@ -17,7 +17,8 @@ export function bivariateNormalCdf(h: number, k: number, rho: number): number {
   requireReal("h", h);
   requireReal("k", k);
   if (!(rho >= -1 && rho <= 1)) throw new DomainError("rho", rho, "a number from -1 to 1");
-  if (rho === 1 || Math.max(h, k) === Infinity) return normalTail(-Math.min(h, k));
-  if (Math.min(h, k) === -Infinity) return 0;
+  // What lies beyond 40 is below the smallest number.
+  if (Math.min(h, k) < -40) return 0;
+  if (rho === 1 || Math.max(h, k) > 40) return normalTail(-Math.min(h, k));
   return rho === -1 ? base(h, k) : bivariateNormalLower(h, k, rho);
 }

@@ -1,10 +1,10 @@
-import { requirePositive, requireProbability } from "../domain";
+import { requireShape, requireProbability } from "../domain";
 import { betaInverse } from "../special/betaInverse";
 
 /**
  * The x with P(F ≤ x) = p for the F distribution with df1 and df2 degrees of freedom.
  *
- * Domain     p in [0, 1]; df1, df2 > 0, not only whole.
+ * Domain     p in [0, 1]; df1, df2 from 0.001 to 1e15, not only whole.
  * Edges      0 gives 0, 1 gives ∞.
  * Method     The odds of the beta variable times df2/df1 (betaInverse.ts).
  * Accuracy   1e-13 relative; test/core/distribution/f.test.ts.
@@ -14,7 +14,7 @@ import { betaInverse } from "../special/betaInverse";
  */
 export function fQuantile(p: number, df1: number, df2: number): number {
   requireProbability("p", p);
-  requirePositive("df1", df1);
-  requirePositive("df2", df2);
+  requireShape("df1", df1);
+  requireShape("df2", df2);
   return (betaInverse(p, 1 - p, df1 / 2, df2 / 2) * df2) / df1;
 }

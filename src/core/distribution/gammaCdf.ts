@@ -1,10 +1,10 @@
-import { requirePositive, requireReal } from "../domain";
+import { requireShape, requireReal } from "../domain";
 import { gammaP } from "../special/gammaP";
 
 /**
  * P(X ≤ x) for a gamma variable of this shape and scale 1.
  *
- * Domain     x any number; shape > 0.
+ * Domain     x any number; shape from 0.001 to 1e15.
  * Edges      x ≤ 0 gives 0, ∞ gives 1.
  * Method     The regularised incomplete gamma function P (gammaTails.ts).
  * Accuracy   1e-13 relative down to 1e-100; test/core/distribution/gamma.test.ts.
@@ -14,6 +14,6 @@ import { gammaP } from "../special/gammaP";
  */
 export function gammaCdf(x: number, shape: number): number {
   requireReal("x", x);
-  requirePositive("shape", shape);
+  requireShape("shape", shape);
   return gammaP(Math.max(x, 0), shape);
 }

@@ -15,5 +15,6 @@ import { requireHypergeometric } from "./hypergeometricChecks";
 export function hypergeometricPmf(k: number, pool: number, good: number, drawn: number): number {
   requireHypergeometric(k, pool, good, drawn);
   if (k < Math.max(0, good + drawn - pool) || k > Math.min(good, drawn)) return 0;
-  return hypergeometricMass(k, pool, good, drawn);
+  // A sure thing may come out one rounding above 1.
+  return Math.min(1, hypergeometricMass(k, pool, good, drawn));
 }

@@ -3,7 +3,7 @@ import { studentTUpperTail } from "./studentTUpperTail";
 /**
  * P(T ≤ x) for Student's t with `df` degrees of freedom.
  *
- * Domain     x any number; df > 0, not only whole; df = ∞ is the standard normal.
+ * Domain     x any number; df from 0.001 to 1e15, not only whole; df = ∞ is the standard normal.
  * Edges      −∞ gives 0, ∞ gives 1.
  * Method     The upper tail of −x.
  * Accuracy   1e-13 relative down to 1e-100; test/core/distribution/studentT.test.ts.

@@ -2,6 +2,7 @@ import { findPositiveRoot } from "../numeric/findPositiveRoot";
 import { productDifference } from "../numeric/productDifference";
 import { betaFactor, betaTails } from "./betaTails";
 import { logGamma } from "./logGamma";
+import { logGammaStep } from "./logGammaStep";
 import { normalScore } from "./normalScore";
 
 /**
@@ -17,7 +18,7 @@ import { normalScore } from "./normalScore";
 export function betaInverse(lower: number, upper: number, a: number, b: number, start?: number): number {
   if (lower === 0) return 0;
   if (upper === 0) return Infinity;
-  const logBeta = logGamma(a) + logGamma(b) - logGamma(a + b);
+  const logBeta = logGamma(Math.min(a, b)) - logGammaStep(Math.max(a, b), Math.min(a, b));
   const logX = (Math.log(lower) + Math.log(a) + logBeta) / a;
   const logY = (Math.log(upper) + Math.log(b) + logBeta) / b;
   // So near to an end the leading power is the whole function; the result may be below the smallest number.

@@ -2,10 +2,13 @@ import { UnsettledError } from "../domain";
 import { productDifference } from "../numeric/productDifference";
 import { deviance } from "./deviance";
 import { MOST_TERMS, saddleSeries } from "./saddleSeries";
+import { logGammaOnePlus } from "./logGamma";
+import { logGammaStep } from "./logGammaStep";
 import { saddleTails, saddleTerms, type Tails } from "./saddleTails";
 import { stirlingError } from "./stirlingError";
 
 const CAP = 5000;
+const TINY = 1e-290;
 const series = new Float64Array(MOST_TERMS);
 
 /** x^a·y^b/B(a, b), y = 1 − x: what both tails of the beta distribution and the binomial chances have in common. */
@@ -36,6 +39,12 @@ export function betaLambda(a: number, b: number, x: number): number {
 export function betaTails(a: number, b: number, x: number, y: number, lambda: number): Tails {
   if (!(x > 0)) return x === 0 ? { lower: 0, upper: 1 } : { lower: NaN, upper: NaN };
   if (!(y > 0)) return { lower: 1, upper: 0 };
+  if (x < TINY || y < TINY) return atEnd(a, b, x, y);
+  if (a < 1 && x < 0.7 && x * b < 1.5) return smallShape(a, b, x);
+  if (b < 1 && y < 0.7 && y * a < 1.5) {
+    const { lower, upper } = smallShape(b, a, y);
+    return { lower: upper, upper: lower };
+  }
   const small = Math.min(a, b);
   if (small >= 60) {
     const n = a + b;
@@ -55,6 +64,29 @@ export function betaTails(a: number, b: number, x: number, y: number, lambda: nu
   }
   const upper = betaFactor(a, b, x, y, lambda) * fraction(b, a, y, x, -lambda);
   return { lower: Math.max(0, 1 - upper), upper };
+}
+
+/** Both tails from one series in x for a shape below 1: 1 − lower keeps no digits there, and the fraction creeps. */
+function smallShape(a: number, b: number, x: number): Tails {
+  let term = 1;
+  let sum = 0;
+  for (let n = 1; Math.abs(term) > 2 ** -55 * x; n++) {
+    term *= ((n - b) / n) * x;
+    sum += term / (a + n);
+  }
+  const exponent = a * Math.log(x) - logGammaOnePlus(a) + logGammaStep(b, a);
+  const power = Math.exp(exponent);
+  return { lower: power * (1 + a * sum), upper: -Math.expm1(exponent) - power * a * sum };
+}
+
+/** Where the terms themselves leave the range of numbers, a tail is its leading power. */
+function atEnd(a: number, b: number, x: number, y: number): Tails {
+  if (x < y) {
+    const lower = betaTails(a, b, TINY, 1, a).lower * (x / TINY) ** a;
+    return { lower, upper: 1 - lower };
+  }
+  const upper = betaTails(a, b, 1, TINY, -b).upper * (y / TINY) ** b;
+  return { lower: 1 - upper, upper };
 }
 
 /** I_x(a, b) over x^a·y^b/B(a, b), for λ ≥ 0. */

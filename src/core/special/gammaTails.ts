@@ -1,6 +1,6 @@
 import { UnsettledError } from "../domain";
 import { deviance } from "./deviance";
-import { nearTwo } from "./logGamma";
+import { logGammaOnePlus } from "./logGamma";
 import { MOST_TERMS, saddleSeries } from "./saddleSeries";
 import { saddleTails, saddleTerms, type Tails } from "./saddleTails";
 import { stirlingError } from "./stirlingError";
@@ -28,7 +28,9 @@ export function gammaFactor(x: number, a: number): number {
 export function gammaTails(x: number, a: number): Tails {
   if (!(x >= 0 && a > 0 && a < Infinity)) return { lower: NaN, upper: NaN };
   if (x === 0) return { lower: 0, upper: 1 };
-  if (x === Infinity) return { lower: 1, upper: 0 };
+  // So far out the upper tail is below the smallest number.
+  if (x > 10 * a + 2000) return { lower: 1, upper: 0 };
+  if (x < 1e-300) return atNothing(x, a);
   if (a >= 20 && x > 0.4 * a && x < 2 * a) {
     const D = deviance(a, x, x - a);
     return saddleTails(SERIES, saddleTerms(a, D), a, D, x > a);
@@ -75,8 +77,13 @@ function smallShape(x: number, a: number): Tails {
     term *= -x / n;
     sum += term / (a + n);
   }
-  const logGamma1p = a < 0.5 ? nearTwo(a) - Math.log1p(a) : nearTwo(a - 1);
-  const exponent = a * Math.log(x) - logGamma1p;
+  const exponent = a * Math.log(x) - logGammaOnePlus(a);
   const power = Math.exp(exponent);
   return { lower: power * (1 + a * sum), upper: -Math.expm1(exponent) - power * a * sum };
+}
+
+/** Where the terms themselves leave the range of numbers, the lower tail is its leading power of x. */
+function atNothing(x: number, a: number): Tails {
+  const lower = gammaTails(1e-300, a).lower * (x / 1e-300) ** a;
+  return { lower, upper: 1 - lower };
 }

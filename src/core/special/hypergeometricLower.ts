@@ -26,5 +26,6 @@ function outwards(k: number, pool: number, good: number, drawn: number): number 
     term *= (i * (rest + i)) / ((good - i + 1) * (drawn - i + 1));
     sum += term;
   }
-  return sum * hypergeometricMass(k, pool, good, drawn);
+  // At the end of what can occur the rounding may lead past 1.
+  return Math.min(1, sum * hypergeometricMass(k, pool, good, drawn));
 }

@@ -35,8 +35,13 @@ export function logGamma(x: number): number {
   return nearTwo(z) + Math.log(product);
 }
 
+/** ln Γ(1 + a) for 0 ≤ a < 1, with digits also for the smallest a. */
+export function logGammaOnePlus(a: number): number {
+  return a < 0.5 ? nearTwo(a) - Math.log1p(a) : nearTwo(a - 1);
+}
+
 /** ln Γ(2 + z) for |z| ≤ 0.5. */
-export function nearTwo(z: number): number {
+function nearTwo(z: number): number {
   let sum = 0;
   for (let i = SERIES.length - 1; i >= 0; i--) sum = sum * z + SERIES[i];
   return sum * z;
