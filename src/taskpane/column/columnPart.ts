@@ -14,7 +14,7 @@ const MOST_LISTED = 8;
 /** The part that tells which column is in hand, and what in it is no score. */
 export function columnPart(context: PaneContext, follower: Follower): PanePart {
   const { texts, column } = context;
-  const summary = element("div", { class: "summary", "aria-live": "polite" });
+  const summary = element("div", { class: "summary" });
   const aside = element("div", { class: "aside" });
   const offenders = element("div");
   const hold = tickBox(texts.holdColumn, false, (on) => follower.hold(on));

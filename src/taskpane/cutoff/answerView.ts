@@ -11,16 +11,20 @@ import { markText, refusalAdvice, shapeWarnings, takeSentence, trustSentences } 
 /** The answer: the mark in large, how far to trust it, the picture, the three cutoffs, the report. Or the refusal, and what to do next. */
 export function answerView(context: PaneContext): HTMLElement {
   const { texts } = context;
-  const words = element("div", { class: "answer", "aria-live": "polite" });
+  // One sentence is spoken when the answer changes; the rest waits to be read.
+  const spoken = element("p", { class: "mark", role: "status" });
+  const words = element("div", { class: "answer" });
   const picture = pictureFigure(context);
   const below = element("div");
   const reportRoom = element("div");
   const report = fold(texts.reportHeading, false, reportRoom);
-  const root = element("div", {}, words, picture.root, below, report);
+  const root = element("div", {}, spoken, words, picture.root, below, report);
   context.answer.watch((answer) => {
     root.hidden = !answer;
     if (!answer) return;
     fill(words, ...(answer.report ? answerWords(context, answer) : refusalWords(context, answer)));
+    const sentence = answer.report ? takeSentence(answer, texts, context.numbers) : texts.refused;
+    if (spoken.textContent !== sentence) spoken.textContent = sentence;
     picture.show(scoresPicture(answer, context));
     fill(below, ...(answer.report ? belowPicture(context, answer) : []));
     report.hidden = !answer.report;
@@ -31,7 +35,6 @@ export function answerView(context: PaneContext): HTMLElement {
 
 function answerWords({ texts, numbers }: PaneContext, answer: CutoffAnswer): HTMLElement[] {
   return [
-    element("p", { class: "mark" }, takeSentence(answer, texts, numbers)),
     ...trustSentences(answer, texts, numbers).map((sentence) => element("p", {}, sentence)),
     ...shapeWarnings(answer, texts, numbers).map((sentence) => element("p", { class: "notice" }, sentence)),
   ];
@@ -40,7 +43,6 @@ function answerWords({ texts, numbers }: PaneContext, answer: CutoffAnswer): HTM
 function refusalWords({ texts }: PaneContext, { refusal, column }: CutoffAnswer): HTMLElement[] {
   const { error, message } = refusal!;
   return [
-    element("p", { class: "mark" }, texts.refused),
     message !== "" && element("p", { class: "message", lang: "en" }, `${error} ${message}`),
     element("p", {}, refusalAdvice(refusal!, column.offenders.length > 0, texts)),
   ].filter((one) => one instanceof HTMLElement);

@@ -1,7 +1,8 @@
 import type { Cell } from "../../sheet/cell";
 import type { Argument } from "../../sheet/invoke";
 import type { Call } from "../context";
-import { refusalOf, type CutoffAnswer, type Refusal } from "../cutoff/answerCutoff";
+import { refusalOf, type CutoffAnswer, type CutoffFigures, type Refusal } from "../cutoff/answerCutoff";
+import { estimatedLooks } from "./chancePoints";
 import type { SearchQuestion } from "./searchQuestion";
 
 export interface SearchAnswer {
@@ -42,7 +43,7 @@ export function answerSearch(
   const { reach, costs } = stageColumns(question);
   const report = cutoff?.report;
   const learnt = report?.count ?? 0;
-  const atEstimate = report && hits === 1 && chance === 0.9 ? report : undefined;
+  const estimate = report && hits === 1 ? lookEstimates(call, report, fraction, chance) : undefined;
   const curve = cutoff?.question.shape === "normal" ? new Map(cutoff.rows) : undefined;
   const better = cutoff?.question.better;
   const mean = curve?.get("curve mean");
@@ -50,9 +51,9 @@ export function answerSearch(
   const wanted = lookCost !== undefined && typeof mean === "number" && typeof sd === "number";
   return {
     expected: ask("EXPECTED_TRIALS_TO_HIT", [fraction, hits]),
-    looksHalf: atEstimate?.looksHalf ?? ask("TRIALS_FOR_HIT_CHANCE", [fraction, 0.5, hits]),
-    looksMost: atEstimate?.looksMost ?? ask("TRIALS_FOR_HIT_CHANCE", [fraction, chance, hits]),
-    estimated: atEstimate?.looksMost !== undefined,
+    looksHalf: estimate?.half ?? ask("TRIALS_FOR_HIT_CHANCE", [fraction, 0.5, hits]),
+    looksMost: estimate?.most ?? ask("TRIALS_FOR_HIT_CHANCE", [fraction, chance, hits]),
+    estimated: estimate !== undefined,
     load: ask("STAGE_LOAD", [reach, costs, fraction, learnt, hits]),
     budget: ask("SEARCH_BUDGET", [fraction, reach, costs, chance, hits]),
     periods: arrivals === undefined ? undefined : ask("SEARCH_DURATION", [fraction, arrivals, chance, hits]),
@@ -62,4 +63,16 @@ export function answerSearch(
         ? ask("RESERVE_SCHEDULE", [mean, sd, looksLeft, lookCost, undefined, better])
         : undefined,
   };
+}
+
+/** Looks that take into account that the mark is an estimate: those of the report where it has them, else worked out from the chance. */
+function lookEstimates(
+  call: Call,
+  { count, looksHalf, looksMost }: CutoffFigures,
+  fraction: number,
+  chance: number,
+): { half: number; most: number } | undefined {
+  const half = looksHalf ?? estimatedLooks(call, count, fraction, 0.5);
+  const most = chance === 0.9 && looksMost !== undefined ? looksMost : estimatedLooks(call, count, fraction, chance);
+  return half === undefined || most === undefined ? undefined : { half, most };
 }

@@ -31,6 +31,27 @@ export function estimatedChance(call: Call, count: number, fraction: number, mos
   ]);
 }
 
+const MOST_LOOKS = 1_000_000;
+
+/**
+ * The smallest number of looks that gives a first hit with this chance, the mark being estimated from `count` scores; undefined where even
+ * a million are not enough (of a mark from two or three scores some come out so high that nothing ever clears them).
+ */
+export function estimatedLooks(call: Call, count: number, fraction: number, chance: number): number | undefined {
+  const mark = numberOf(call("CURVE_CUTOFF", [0, 1, fraction]));
+  const enough = (looks: number) => numberOf(call("CURVE_HIT_CHANCE", [count, 0, 1, mark, looks])) >= chance;
+  let high = 1;
+  while (!enough(high)) if ((high *= 2) > MOST_LOOKS) return undefined;
+  let low = Math.floor(high / 2);
+  // Not enough at `low`, enough at `high`.
+  while (high - low > 1) {
+    const middle = Math.floor((low + high) / 2);
+    if (enough(middle)) high = middle;
+    else low = middle;
+  }
+  return high;
+}
+
 function numberOf(outcome: ReturnType<Call>): number {
   return outcome && "value" in outcome && typeof outcome.value === "number" ? outcome.value : NaN;
 }

@@ -27,7 +27,8 @@ export function searchFormulas(
     formula: { text: formulaText(name, given), rows, columns },
   });
   const offered = [
-    offer(texts.putLooks, "TRIALS_FOR_HIT_CHANCE", [fraction, chance, hits]),
+    ...estimatedFormulas(question, cutoff, texts),
+    offer(texts.putLooksExact, "TRIALS_FOR_HIT_CHANCE", [fraction, chance, hits]),
     offer(texts.putLoad, "STAGE_LOAD", [reach, costs, fraction, cutoff?.report?.count, hits], stages.length + 2, 5),
     offer(texts.putBudget, "SEARCH_BUDGET", [fraction, reach, costs, chance, hits]),
   ];
@@ -43,4 +44,25 @@ export function searchFormulas(
   if (looksLeft === undefined) return offered;
   const given = [mean, sd, looksLeft, lookCost, undefined, better];
   return [...offered, { ...offer(texts.putSchedule, "RESERVE_SCHEDULE", given, looksLeft + 1, 4), reads: address }];
+}
+
+/** The looks to plan for as the report has them: of the mark that is only an estimate, at the one chance that it knows. */
+function estimatedFormulas(
+  { hits, chance }: SearchQuestion,
+  cutoff: CutoffAnswer | undefined,
+  texts: Texts,
+): OfferedFormula[] {
+  if (!cutoff?.report || hits !== 1 || chance !== 0.9) return [];
+  const { fraction, confidence, shape, better } = cutoff.question;
+  const { address } = cutoff.column;
+  const given = [
+    { reference: address },
+    fraction,
+    confidence === 0.95 ? undefined : confidence,
+    shape === "normal" ? undefined : shape,
+    better === "low" ? better : undefined,
+    "looks for a 90% chance",
+  ];
+  const formula = { text: formulaText("CUTOFF_REPORT", given), rows: 1, columns: 1 };
+  return [{ words: texts.putLooks, formula, reads: address }];
 }

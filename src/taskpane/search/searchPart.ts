@@ -19,7 +19,7 @@ import { loadTable, scheduleTable } from "./searchTables";
 export function searchPart(context: PaneContext, search: Observable<SearchQuestion>): PanePart {
   const { texts, numbers, call, question, answer: cutoff, port } = context;
   const aim = element("p", { class: "quiet" });
-  const words = element("div", { class: "answer", "aria-live": "polite" });
+  const words = element("div", { class: "answer" });
   const picture = pictureFigure(context);
   const load = element("div");
   const reserve = element("div", { "aria-live": "polite" });

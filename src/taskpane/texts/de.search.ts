@@ -22,8 +22,9 @@ export const deSearch: Translated<typeof enSearch> = {
     `Im Mittel ${expected}, für halbe Sicherheit ${half}, wenn die Schwelle genau bekannt ist. Eine geschätzte verlangt mehr.`,
   searchAverage: (expected) => `Bei genau bekannter Schwelle wären es im Mittel ${expected}.`,
   searchBudget: (budget, chance) =>
-    `Ein Budget von ${budget} reicht für die Suche zu ${chance}; die Sichtungen, aus denen die Schwelle gelernt wird, kommen hinzu.`,
-  searchPeriods: (periods, chance) => `Zu ${chance} dauert sie höchstens ${periods} Zeiträume.`,
+    `Bei genau bekannter Schwelle reicht ein Budget von ${budget} für die Suche zu ${chance}; die Sichtungen, aus denen sie gelernt wird, kommen hinzu.`,
+  searchPeriods: (periods, chance) =>
+    `Bei genau bekannter Schwelle dauert sie zu ${chance} höchstens ${periods} Zeiträume.`,
   loadHeading: "Aufwand und Kosten im Mittel",
   loadAll: "alle Stufen",
   loadStage: "Stufe",
@@ -63,6 +64,7 @@ export const deSearch: Translated<typeof enSearch> = {
   scheduleLast: "jeden",
 
   putLooks: "die Zahl der Sichtungen",
+  putLooksExact: "die Zahl der Sichtungen bei genau bekannter Schwelle",
   putLoad: "Aufwand und Kosten je Stufe",
   putBudget: "das Budget",
   putPeriods: "die Zeiträume",

@@ -20,9 +20,9 @@ export const enSearch = {
     `${expected} on average, ${half} for an even chance, if the mark is exact. A mark estimated from scores takes more.`,
   searchAverage: (expected: string) => `With an exact mark the average would be ${expected}.`,
   searchBudget: (budget: string, chance: string) =>
-    `A budget of ${budget} is enough for the search with a chance of ${chance}; looks that teach the mark come on top.`,
+    `With an exact mark a budget of ${budget} is enough for the search with a chance of ${chance}; looks that teach the mark come on top.`,
   searchPeriods: (periods: string, chance: string) =>
-    `It takes no more than ${periods} periods with a chance of ${chance}.`,
+    `With an exact mark it takes no more than ${periods} periods with a chance of ${chance}.`,
   loadHeading: "Load and cost, on average",
   loadAll: "all stages",
   loadStage: "Stage",
@@ -62,6 +62,7 @@ export const enSearch = {
   scheduleLast: "any",
 
   putLooks: "the looks to plan for",
+  putLooksExact: "the looks if the mark were exact",
   putLoad: "load and cost by stage",
   putBudget: "the budget",
   putPeriods: "the periods",

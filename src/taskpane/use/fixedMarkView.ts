@@ -12,7 +12,7 @@ import { driftOf, marksOf, markToday, writeMark } from "./fixedMarks";
 export function fixedMarkView(context: PaneContext): HTMLElement {
   const { texts, call, port, answer } = context;
   let kind: FixedMarkKind = "plain";
-  const drift = element("div", { "aria-live": "polite" });
+  const drift = element("div");
   const history = element("div");
   const proposal = element("p");
   const message = element("p", { "aria-live": "polite" });

@@ -19,7 +19,7 @@ const FEWEST = 4;
 export function watchPart(context: PaneContext): PanePart {
   const { texts, numbers, call, column } = context;
   let typed: number | undefined;
-  const words = element("div", { "aria-live": "polite" });
+  const words = element("div");
   const picture = pictureFigure(context);
   const chooser = formulaChooser(context, texts.formulaHeading);
   const first = field(texts.driftFirst, "", (text) => {
