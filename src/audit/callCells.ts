@@ -49,7 +49,8 @@ function visit(root: AstExpression, tell: (name: string) => void): void {
     if (!node || typeof node !== "object") continue;
     const callee = node["callee"] as { name?: string } | undefined;
     if (node["type"] === "CallExpression" && typeof callee?.name === "string") tell(callee.name);
-    for (const key of ["arguments", "declarations"]) if (Array.isArray(node[key])) waiting.push(...(node[key] as unknown[]));
+    for (const key of ["arguments", "declarations"])
+      if (Array.isArray(node[key])) waiting.push(...(node[key] as unknown[]));
     waiting.push(node["init"], node["body"], callee?.name === undefined ? callee : undefined);
   }
 }

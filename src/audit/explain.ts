@@ -28,8 +28,11 @@ export function explainDifference(compared: Comparison, stored: readonly (readon
   const named = typeof label === "string" ? ` (${showCell(label)})` : "";
   const place = many ? `In row ${row + 1}, column ${column + 1} of the table${named} the` : "The";
   const fresh = compared.recomputed;
-  const outcome = isCellError(fresh) && fresh.message ? `${fresh.code} (${withoutStop(fresh.message)})` : showCell(fresh);
-  const sentences = [`${place} file holds ${showCell(compared.stored)}; the stored inputs give ${outcome}${size(compared)}.`];
+  const outcome =
+    isCellError(fresh) && fresh.message ? `${fresh.code} (${withoutStop(fresh.message)})` : showCell(fresh);
+  const sentences = [
+    `${place} file holds ${showCell(compared.stored)}; the stored inputs give ${outcome}${size(compared)}.`,
+  ];
   if (causes.blanksAsZero) sentences.push(blanksSentence(causes.calls));
   else if (causes.olderRevision !== undefined)
     sentences.push(
@@ -53,7 +56,10 @@ function blanksSentence(calls: readonly OwnCall[]): string {
     for (const value of values) {
       if (!(value instanceof Reference)) continue;
       for (const place of value.places) {
-        const empty = place.sheet.range(usedPart(place)).flat().filter((cell) => cell === null).length;
+        const empty = place.sheet
+          .range(usedPart(place))
+          .flat()
+          .filter((cell) => cell === null).length;
         if (empty > 0) where.add(formatAddress({ sheet: place.sheet.name, ...place.area }));
         blanks += empty;
       }

@@ -16,10 +16,7 @@ export function storedFormula({ formula, shift, row, column }: FormulaCell): str
 
 /** The same formula in every cell that it was filled into has the same text here. */
 export function relativeFormula({ formula, shift, row, column }: FormulaCell): string {
-  return translateFormulaToR1C1(
-    `=${formula}`,
-    cellAddress(row - (shift?.rows ?? 0), column - (shift?.columns ?? 0)),
-  );
+  return translateFormulaToR1C1(`=${formula}`, cellAddress(row - (shift?.rows ?? 0), column - (shift?.columns ?? 0)));
 }
 
 /** A formula as it is typed: our functions by their names, without the prefixes that files put before newer functions and names. */
@@ -40,7 +37,8 @@ export function typedFormula(stored: string): string {
     if (token.value.includes("_xlpm.")) return { ...token, value: token.value.replace(/_xlpm\./gi, "") };
     // `[2]!` before one of ours.
     const behind = token.type === "context" ? tokens[index + 2] : tokens[index + 1];
-    const stray = (token.type === "context" && tokens[index + 1]?.value === "!") || tokens[index - 1]?.type === "context";
+    const stray =
+      (token.type === "context" && tokens[index + 1]?.value === "!") || tokens[index - 1]?.type === "context";
     return stray && behind?.type === "func" ? { ...token, value: "" } : token;
   });
   return stringifyTokens(shown);

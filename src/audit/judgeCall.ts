@@ -1,11 +1,12 @@
 import { NUMBERS_REVISION } from "../core/release";
 import { formatAddress } from "../sheet/address";
-import { isCellError, type Cell } from "../sheet/cell";
+import { isCellError, type Cell, type Range } from "../sheet/cell";
 import type { Workbook } from "../sheet/workbook";
 import type { CallCell } from "./callCells";
 import { compareStored, type Comparison } from "./compareStored";
 import { evaluate, type Answer, type FormulaPlace } from "./evaluate";
 import type { OwnCall } from "./evaluation";
+import { isReleaseCell } from "./fileRevision";
 import { explainAgreement, explainDifference } from "./explain";
 import { storedFormula, typedFormula } from "./formulaText";
 import type { Judgement } from "./judgement";
@@ -34,7 +35,15 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
   const { row, column, array } = cell;
   const calls: OwnCall[] = [];
   const stored = array ? sheet.range(array) : [[sheet.cell(row, column)]];
-  const place: FormulaPlace = { workbook: setting.workbook, sheet, row, column, shift: cell.shift, single: !array, calls };
+  const place: FormulaPlace = {
+    workbook: setting.workbook,
+    sheet,
+    row,
+    column,
+    shift: cell.shift,
+    single: !array,
+    calls,
+  };
   const answer = evaluate(cell.formula, place);
   const judged = {
     sheet,
@@ -45,12 +54,20 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
     recomputed: "value" in answer ? answer.value : undefined,
     calls,
   };
-  const hindrance = cell.calculated ? whatHinders(answer, stored[0]![0], unknown) : "the file holds no value for it: it was never calculated";
+  const hindrance = cell.calculated
+    ? whatHinders(answer, stored[0]![0], unknown)
+    : "the file holds no value for it: it was never calculated";
   if (hindrance !== undefined || !("value" in answer))
     return { ...judged, verdict: "not checkable", why: `Not checkable: ${hindrance}.` };
   const { value } = answer;
   const compared = comparedWith(stored, value, !array, setting);
   if (compared.same) return { ...judged, verdict: "agrees", why: explainAgreement(compared) };
+  if (isReleaseCell(cell.formula)) {
+    const told =
+      setting.fileRevision === undefined ? "another release" : `revision ${setting.fileRevision} of the numbers`;
+    const why = `Not checkable: it tells which release computed this file, ${told}; this is revision ${NUMBERS_REVISION}.`;
+    return { ...judged, verdict: "not checkable", why };
+  }
   const again = (changes: Partial<FormulaPlace>) => evaluate(cell.formula, { ...place, calls: undefined, ...changes });
   // Hosts differ in whether a whole column comes with the blanks below its last cell.
   const full = calls.some(takesWholeColumn) ? again({ inFull: true }) : undefined;
@@ -58,9 +75,10 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
     const why = "Worked out again from the stored inputs, the whole column with its blank cells: the same.";
     return { ...judged, recomputed: full.value, verdict: "agrees", why };
   }
-  const zero = again({ blanks: "zero" });
-  const blanksAsZero = "value" in zero && comparedWith(stored, zero.value, !array, setting).same;
-  const older = setting.fileRevision !== undefined && setting.fileRevision < NUMBERS_REVISION ? setting.fileRevision : undefined;
+  const zero = calls.some(getsBlanks) ? again({ blanks: "zero" }) : undefined;
+  const blanksAsZero = zero !== undefined && "value" in zero && comparedWith(stored, zero.value, !array, setting).same;
+  const older =
+    setting.fileRevision !== undefined && setting.fileRevision < NUMBERS_REVISION ? setting.fileRevision : undefined;
   const why = explainDifference(compared, stored, { blanksAsZero, olderRevision: older, calls });
   return { ...judged, verdict: "differs", why };
 }
@@ -90,6 +108,20 @@ function oneOrRows(rows: readonly (readonly Cell[])[]): Cell | Cell[][] {
   return rows.length === 1 && rows[0]!.length === 1 ? rows[0]![0]! : rows.map((row) => [...row]);
 }
 
+const blanksInside = new WeakMap<Range, boolean>();
+
+function getsBlanks({ given }: OwnCall): boolean {
+  return given.some((argument) => {
+    if (!Array.isArray(argument)) return argument === null;
+    const range = argument as Range;
+    let blanks = blanksInside.get(range);
+    if (blanks === undefined) blanksInside.set(range, (blanks = range.some((row) => row.includes(null))));
+    return blanks;
+  });
+}
+
 function takesWholeColumn({ values }: OwnCall): boolean {
-  return values.some((value) => value instanceof Reference && value.places.some(({ area }) => area.bottom === LAST_ROW));
+  return values.some(
+    (value) => value instanceof Reference && value.places.some(({ area }) => area.bottom === LAST_ROW),
+  );
 }

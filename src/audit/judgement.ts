@@ -35,8 +35,9 @@ export interface Notice {
 export type NoticeKind =
   | "typed over"
   | "leaves data out"
+  | "ranges out of line"
   | "takes in a total"
   | "hidden rows"
   | "asked in two ways"
   | "fixed mark moved"
-  | "older revision";
+  | "second opinion differs";

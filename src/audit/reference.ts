@@ -24,7 +24,9 @@ export function placeCells(place: Place, at: Evaluation): Range {
   refuseUncalculated(place.sheet, area);
   at.spend(1 + count / 100);
   const cells = place.sheet.range(area);
-  return at.setting.inFull && place.area.bottom === LAST_ROW ? filledDown(cells, place.area.bottom - place.area.top + 1) : cells;
+  return at.setting.inFull && place.area.bottom === LAST_ROW
+    ? filledDown(cells, place.area.bottom - place.area.top + 1)
+    : cells;
 }
 
 /** Blank rows behind the used part, one and the same row again and again. */

@@ -1,11 +1,12 @@
 import { nearestName } from "../functions/nearestName";
 import { NUMBERS_REVISION, RELEASE_NAME, RELEASE_VERSION } from "../core/release";
+import { audit } from "./audit";
 import { calc } from "./calc";
 import { functions } from "./functions";
 import { Stop, type Command, type Io } from "./io";
 import { printable } from "./plainText";
 
-const COMMANDS: readonly Command[] = [calc, functions];
+const COMMANDS: readonly Command[] = [calc, audit, functions];
 
 /** Runs the command line and gives its exit code. A fault of the input is a sentence on standard error and 2, never a stack. */
 export async function run(args: readonly string[], io: Io): Promise<number> {

@@ -1,4 +1,4 @@
-import { readFile, stat } from "node:fs/promises";
+import { readFile, stat, writeFile } from "node:fs/promises";
 import { Stop, type Io } from "./io";
 import { run } from "./run";
 
@@ -8,6 +8,7 @@ const io: Io = {
   out: (text) => void process.stdout.write(text),
   err: (text) => void process.stderr.write(text),
   read: (path) => (path === "-" ? readStandardInput() : readPath(path)),
+  write: writePath,
 };
 
 async function readPath(path: string): Promise<Uint8Array> {
@@ -22,6 +23,14 @@ async function readPath(path: string): Promise<Uint8Array> {
     if (code === "EISDIR") throw new Stop(`${path} is a folder, not a file.`);
     if (code === "EACCES" || code === "EPERM") throw new Stop(`${path} may not be read.`);
     throw new Stop(`${path} can't be read (${message}).`);
+  }
+}
+
+async function writePath(path: string, bytes: Uint8Array): Promise<void> {
+  try {
+    await writeFile(path, bytes);
+  } catch (failure) {
+    throw new Stop(`${path} can't be written (${(failure as Error).message}).`);
   }
 }
 

@@ -6,10 +6,13 @@ import { Sample } from "../core/sample/sample";
  */
 const MOST_CELLS = 2_500_000;
 const remembered = new Map<number, Sample[]>();
+const byArray = new WeakMap<Float64Array, Sample>();
 let cellsKept = 0;
 
 /** The sample with just these values: a remembered one where there is one. Never changes `values`, but may keep it. */
 export function sampleOf(values: Float64Array): Sample {
+  const same = byArray.get(values);
+  if (same) return same;
   const key = contentKey(values);
   const bucket = remembered.get(key);
   const known = bucket?.find((sample) => sameBits(sample.values, values));
@@ -17,9 +20,11 @@ export function sampleOf(values: Float64Array): Sample {
     // Last used goes last out.
     remembered.delete(key);
     remembered.set(key, bucket!);
+    byArray.set(values, known);
     return known;
   }
   const sample = new Sample(values);
+  byArray.set(values, sample);
   if (values.length > MOST_CELLS) return sample;
   remembered.set(key, [...(bucket ?? []), sample]);
   cellsKept += values.length;

@@ -110,6 +110,8 @@ export class Sheet {
       this.#ranges.clear();
       this.#remembered = 0;
     }
+    // What reads a frozen range may remember what it read.
+    Object.freeze(cells);
     this.#ranges.set(name, cells);
     this.#remembered += size;
     return cells;

@@ -33,6 +33,9 @@ async function weirmark(...args: string[]): Promise<{ code: number; out: string;
       if (file === undefined) throw new Stop(`There is no file ${path}.`);
       return typeof file === "string" ? new TextEncoder().encode(file) : file;
     },
+    write: async () => {
+      throw new Error("calc writes no file");
+    },
   };
   const code = await run(args, io);
   return { code, out, err };

@@ -1,0 +1,71 @@
+import type { Workbook } from "../sheet/workbook";
+import { callCells } from "./callCells";
+import { fileRevision } from "./fileRevision";
+import { judgeCall } from "./judgeCall";
+import type { Judgement, Notice, Verdict } from "./judgement";
+import { askedInTwoWays } from "./notices/askedInTwoWays";
+import { callRanges } from "./notices/callRanges";
+import { allDataLeftOut, rangesOutOfLine } from "./notices/dataLeftOut";
+import { fixedMarks } from "./notices/fixedMarks";
+import { hiddenRowsInside, totalTakenIn } from "./notices/totalTakenIn";
+import { typedOver } from "./notices/typedOver";
+import { loadSecondOpinion, type SecondOpinion } from "./opinion/secondOpinion";
+
+export interface Audit {
+  readonly judgements: readonly Judgement[];
+  readonly notices: readonly Notice[];
+  readonly counts: Readonly<Record<Verdict, number>>;
+  /** The revision that the file says it was computed by. */
+  readonly fileRevision: number | undefined;
+}
+
+export interface AuditOptions {
+  /** How far two numbers may lie apart, as a part of the larger. */
+  readonly tolerance: number;
+}
+
+/** Judges every cell that calls a function of ours on the values the file itself holds, and looks for what is wrong beside them. */
+export async function auditWorkbook(workbook: Workbook, { tolerance }: AuditOptions): Promise<Audit> {
+  const calls = callCells(workbook);
+  const revision = fileRevision(calls);
+  const opinion = calls.length > 0 ? await loadSecondOpinion() : undefined;
+  const setting = { workbook, tolerance, fileRevision: revision };
+  const judgements: Judgement[] = [];
+  const doubts: Notice[] = [];
+  for (const call of calls) {
+    const judged = judgeCall(call, setting);
+    const heard = opinion && withOpinion(judged, opinion);
+    judgements.push(heard?.judgement ?? judged);
+    doubts.push(...(heard?.doubts ?? []));
+  }
+  const ranges = callRanges(judgements);
+  const notices = [
+    ...typedOver(judgements, workbook, tolerance),
+    ...allDataLeftOut(ranges),
+    ...ranges.flatMap((range) => [...totalTakenIn(range), ...hiddenRowsInside(range)]),
+    ...judgements.flatMap(rangesOutOfLine),
+    ...askedInTwoWays(judgements),
+    ...fixedMarks(workbook, tolerance),
+    ...doubts,
+  ];
+  const counts = { agrees: 0, differs: 0, "not checkable": 0 };
+  for (const { verdict } of judgements) counts[verdict]++;
+  return { judgements, notices, counts, fileRevision: revision };
+}
+
+/** Adds what the other library says of the first call that it can speak on. */
+function withOpinion(
+  judgement: Judgement,
+  opinion: SecondOpinion,
+): { judgement: Judgement; doubts: Notice[] } | undefined {
+  for (const call of judgement.calls) {
+    const heard = opinion.of(call);
+    if (!heard) continue;
+    const { sheet, address } = judgement;
+    const doubts: Notice[] = heard.agrees
+      ? []
+      : [{ sheet: sheet.name, address, kind: "second opinion differs", why: heard.sentence }];
+    return { judgement: { ...judgement, why: `${judgement.why} ${heard.sentence}` }, doubts };
+  }
+  return undefined;
+}

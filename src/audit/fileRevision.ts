@@ -1,0 +1,23 @@
+import type { CallCell } from "./callCells";
+
+/** The revision of the numbers that a file says it was computed by, in a cell that calls RELEASE; undefined where none does. */
+export function fileRevision(calls: readonly CallCell[]): number | undefined {
+  for (const { sheet, cell } of calls) {
+    if (!isReleaseCell(cell.formula)) continue;
+    if (!cell.array) {
+      const value = sheet.cell(cell.row, cell.column);
+      if (typeof value === "number") return value;
+      continue;
+    }
+    const row = sheet
+      .range(cell.array)
+      .find(([label]) => typeof label === "string" && label.toLowerCase() === "revision");
+    if (typeof row?.[1] === "number") return row[1];
+  }
+  return undefined;
+}
+
+/** A cell that calls RELEASE and nothing else: it tells which release computed the file. */
+export function isReleaseCell(formula: string): boolean {
+  return /^@?(\[\d+\]!)?(_xldudf_)?weir[._]release\(\s*("[a-z ]*")?\s*\)$/i.test(formula);
+}
