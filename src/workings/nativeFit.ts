@@ -2,7 +2,7 @@ import type { Curve } from "../core/sample/curve";
 import type { Sample } from "../core/sample/sample";
 import { literal } from "./native";
 import { countNative, orderedNative, shiftedNative } from "./nativeScale";
-import type { Step } from "./steps";
+import { asStep, type Step } from "./steps";
 
 /** Where λ times the spread of the logarithms is smaller, e^{λl} − 1 and its derivative in λ would lose their digits: series take over. */
 const NEAR = 0.3;
@@ -48,10 +48,10 @@ export function fittedPowerCheck(range: string, { shape, power = 0 }: Curve, { m
   const source = "Box & Cox 1964: the power of greatest likelihood";
   if (Math.abs(power) === 5) {
     const meaning = "check: the log-likelihood still rises at this end of the range of powers, must be TRUE";
-    return { meaning, value: true, formula: `=${slope}${power > 0 ? ">" : "<"}0`, source };
+    return asStep(meaning, true, `${slope}${power > 0 ? ">" : "<"}0`, source);
   }
   const meaning = `check: slope of the log-likelihood in the power, per score, at ${shape.kind}(${power}), must be 0`;
-  return { meaning, value: 0, formula: `=${slope}`, source };
+  return asStep(meaning, 0, slope, source);
 }
 
 /** The sum of the powers of w over the divisors: 1/2+w/3+w^2/8 … */

@@ -14,12 +14,22 @@ export interface Step {
   readonly source: string;
 }
 
+/** What Excel takes as the length of a formula. */
+const LONGEST_FORMULA = 8192;
+
+/** One step; `formula` without the sign of equality in front. */
+export function asStep(meaning: string, value: Cell, formula: string, source: string): Step {
+  // A column that came without an address is written out in full: no sheet would take the formula.
+  const fits = formula !== "" && formula.length < LONGEST_FORMULA;
+  return { meaning, value, formula: fits ? `=${formula}` : "", source };
+}
+
 /** Gathers the steps of one derivation in order. */
 export class Steps {
   readonly rows: Step[] = [];
 
   add(meaning: string, value: Cell, formula = "", source = ""): this {
-    this.rows.push({ meaning, value, formula: formula === "" ? "" : `=${formula}`, source });
+    this.rows.push(asStep(meaning, value, formula, source));
     return this;
   }
 }

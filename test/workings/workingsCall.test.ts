@@ -62,3 +62,8 @@ describe("the cells of a headed table", () => {
     expect(rows[200]!.value).toBe(999_999 / 2);
   });
 });
+
+test("a formula too long for a sheet is left out", () => {
+  const { rows } = new Steps().add("fits", 1, "1".repeat(8191)).add("does not", 1, "1".repeat(8192));
+  expect(rows.map((row) => row.formula.length)).toEqual([8192, 0]);
+});
