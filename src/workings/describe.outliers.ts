@@ -21,7 +21,7 @@ export function OUTLIER_FLAGS(call: WorkingsCall): readonly Step[] {
   const { count, sorted } = sample;
   const most = readCount("most", call.cell("most"), 1, undefined, Math.max(1, Math.floor(count / 10)));
   const curve = fitCurve("scores", sample, shape);
-  const { outliers, deviates, upper } = extremeDeviates(curve.scaled, most, alpha);
+  const { outliers, deviates, upper, lowest, highest } = extremeDeviates(curve.scaled, most, alpha);
   const [range, alphaText] = [call.text("scores"), call.text("alpha", "0.05")];
   const ordered = orderedNative(range, shape, curve.power);
   const steps = new Steps();
@@ -57,10 +57,12 @@ export function OUTLIER_FLAGS(call: WorkingsCall): readonly Step[] {
   const laidOut = most <= MOST_REMOVALS && all.length < LONGEST_FORMULA;
   steps.add("outliers: the last removal whose distance exceeds it", outliers, laidOut ? all : "", ROSNER);
 
+  // What the flag says where no removal counts: that there is no outlier at all.
+  const none = laidOut ? `${all}>0` : "";
   const above = upper.subarray(0, outliers).reduce((sum, one) => sum + one, 0);
   const below = outliers - above;
   const { cell, text } = call.firstFilled("scores");
-  const first = Number(cell);
+  const first = curve.toScale(Number(cell));
   const tests: string[] = [];
   if (below > 0) {
     steps.add("scores at or below this are outliers", sorted[below - 1]!, `SMALL(${range},${below})`);
@@ -70,8 +72,8 @@ export function OUTLIER_FLAGS(call: WorkingsCall): readonly Step[] {
     steps.add("scores at or above this are outliers", sorted[count - above]!, `LARGE(${range},${above})`);
     tests.push(`${text}>=LARGE(${range},${above})`);
   }
-  const flag = (below > 0 && first <= sorted[below - 1]!) || (above > 0 && first >= sorted[count - above]!);
-  return steps.add("flag of the first score", flag, tests.length > 0 ? `OR(${tests.join(",")})` : "").rows;
+  const formula = tests.length > 0 ? `OR(${tests.join(",")})` : none;
+  return steps.add("flag of the first score", first <= lowest || first >= highest, formula).rows;
 }
 
 /** The scores left, in rising order, after so many have gone from the lower end; all of them where `left` is undefined. */
