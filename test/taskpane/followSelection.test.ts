@@ -143,6 +143,59 @@ describe("following the selection", () => {
     expect(column.get()!.heading).toBe("days");
   });
 
+  test("a selection is not forgotten where the reading before it is overtaken by an edit", async () => {
+    const { port, column } = follow();
+    await quiet();
+    const read = port.read;
+    vi.spyOn(port, "read").mockImplementationOnce(
+      (address) => new Promise((resolve) => setTimeout(() => resolve(read(address)), 1000)),
+    );
+    port.changed();
+    port.pick("Bids!C1:C5");
+    await quiet();
+    port.changed();
+    await vi.advanceTimersByTimeAsync(2000);
+    expect(column.get()!.heading).toBe("days");
+  });
+
+  test("what changes while the sheet is being read is read too", async () => {
+    const { port, column } = follow();
+    await quiet();
+    const selection = port.selection;
+    vi.spyOn(port, "selection").mockImplementationOnce(async () => {
+      const before = await selection();
+      await new Promise((resolve) => setTimeout(resolve, 100));
+      return before;
+    });
+    port.pick("Bids!B1:B3");
+    await quiet();
+    port.pick("Bids!C1:C5");
+    await vi.advanceTimersByTimeAsync(1000);
+    expect(column.get()!.heading).toBe("days");
+    const read = port.read;
+    vi.spyOn(port, "read").mockImplementationOnce(async (address) => {
+      const before = await read(address);
+      await new Promise((resolve) => setTimeout(resolve, 100));
+      return before;
+    });
+    port.changed();
+    await quiet();
+    await port.write("Bids!C2", [[7]]);
+    port.changed();
+    await vi.advanceTimersByTimeAsync(1000);
+    expect(column.get()!.values[0]).toBe(7);
+  });
+
+  test("a column whose sheet is gone does not keep the pane from the next one", async () => {
+    const { port, column } = follow();
+    await quiet();
+    vi.spyOn(port, "read").mockRejectedValueOnce(new Error("no such sheet"));
+    port.changed();
+    port.pick("Bids!C1:C5");
+    await quiet();
+    expect(column.get()!.heading).toBe("days");
+  });
+
   test("a sheet that can't be read is said, and the next selection is read all the same", async () => {
     const { port, column, selection } = follow();
     await quiet();

@@ -40,7 +40,9 @@ export function followSelection(
   let held = false;
   let growing = false;
   let turn = 0;
-  const waiting = new Set<"selection" | "cells">();
+  // How often selection and cells changed, and up to which change each was read: a reading may be overtaken before it ends.
+  const changes = { selection: 0, cells: 0 };
+  const done = { selection: 0, cells: 0 };
   let timer: ReturnType<typeof setTimeout> | undefined;
 
   /** Does what follows from a reading, unless another was begun meanwhile; `stillLatest` tells the same later on. */
@@ -84,6 +86,14 @@ export function followSelection(
     selection.set(places.length > 1 ? { kind: "columns", block, places, place: best } : { kind: "column" });
   }
 
+  function lookAgain(): Promise<void> {
+    const moves = changes.selection;
+    return latest(port.selection(), async (block, stillLatest) => {
+      await readSelection(block, stillLatest);
+      if (stillLatest()) done.selection = moves;
+    });
+  }
+
   /** The same cells once more, and what was added right below them where the column ended there. */
   async function readAgain(address: string): Promise<Column | undefined> {
     const [block, more] = await Promise.all([
@@ -101,25 +111,28 @@ export function followSelection(
   }
 
   const stop = port.onChange((what) => {
-    waiting.add(what);
+    changes[what]++;
     clearTimeout(timer);
     timer = setTimeout(() => {
-      const [moved, current] = [waiting.has("selection"), column.get()];
-      const again = waiting.has("cells") && current ? readAgain(current.address) : Promise.resolve(undefined);
-      waiting.clear();
+      const current = column.get();
+      const edits = changes.cells;
+      // A column that can't be read any more (its sheet is gone) must not keep the pane from the next one.
+      const again =
+        edits > done.cells && current ? readAgain(current.address).catch(() => undefined) : Promise.resolve(undefined);
       void latest(again, (taken) => {
+        done.cells = edits;
         renew(taken);
-        return moved || !current ? latest(port.selection(), readSelection) : undefined;
+        return changes.selection > done.selection || !current ? lookAgain() : undefined;
       });
     }, QUIET_MS);
   });
-  void latest(port.selection(), readSelection);
+  void lookAgain();
 
   return {
     selection,
     hold(on) {
       held = on;
-      if (!on) void latest(port.selection(), readSelection);
+      if (!on) void lookAgain();
     },
     takeColumn: (letters) => latest(port.read(wholeColumn(letters, selected.get())), readSelection),
     takePlace: (block, place) =>
