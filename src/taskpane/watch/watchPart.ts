@@ -38,7 +38,7 @@ export function watchPart(context: PaneContext): PanePart {
   };
   const look = () => {
     const current = column.get();
-    if (!current) return nothing(texts.useWaits);
+    if (!current) return nothing(texts.noColumn);
     const usual = usualBaseline(current.count);
     hint.textContent = texts.driftFirstHint(numbers.count(usual));
     const baseline = Math.min(typed ?? usual, current.count - 1);
