@@ -20,6 +20,8 @@ import { languageFor, languages } from "./texts/languages";
 import { usePart } from "./use/usePart";
 import { watchPart } from "./watch/watchPart";
 import "./pane.css";
+import "./controls.css";
+import "./pictures.css";
 
 /** Puts the pane into an element and lets it work on whatever world the port opens. */
 export function mountPane(root: HTMLElement, port: Port): void {
