@@ -1,5 +1,5 @@
 import { requireCount, requireInteger, requireProbability } from "../domain";
-import { betaFactor, betaLambda } from "../special/betaTails";
+import { betaFactor, betaLambda } from "../special/betaFactor";
 
 /**
  * P(X = k) for X ~ Binomial(n, p).

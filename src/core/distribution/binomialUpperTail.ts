@@ -1,5 +1,6 @@
 import { requireCount, requireInteger, requireProbability } from "../domain";
-import { betaLambda, betaTails } from "../special/betaTails";
+import { betaLambda } from "../special/betaFactor";
+import { betaTails } from "../special/betaTails";
 
 /**
  * P(X ≥ k) for X ~ Binomial(n, p), k itself included.

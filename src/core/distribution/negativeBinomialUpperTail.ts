@@ -1,5 +1,6 @@
 import { requireInteger, requireShape, requireProbability } from "../domain";
-import { betaLambda, betaTails } from "../special/betaTails";
+import { betaLambda } from "../special/betaFactor";
+import { betaTails } from "../special/betaTails";
 
 /**
  * P(X ≥ k), X the failures before the r-th success, each trial a success with chance p; k itself included.

@@ -1,4 +1,5 @@
-import { betaLambda, betaTails } from "./betaTails";
+import { betaLambda } from "./betaFactor";
+import { betaTails } from "./betaTails";
 
 /**
  * The regularised incomplete beta function I_x(a, b).

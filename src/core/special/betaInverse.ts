@@ -1,6 +1,7 @@
 import { findPositiveRoot } from "../numeric/findPositiveRoot";
 import { productDifference } from "../numeric/productDifference";
-import { betaFactor, betaTails } from "./betaTails";
+import { betaFactor } from "./betaFactor";
+import { betaTails } from "./betaTails";
 import { logGamma } from "./logGamma";
 import { logGammaStep } from "./logGammaStep";
 import { normalScore } from "./normalScore";

@@ -1,11 +1,16 @@
 import { gaussLegendre } from "../numeric/gaussLegendre";
-import { normalTail } from "./normalTail";
+import { normalBetween } from "./normalBetween";
+
+/** Below e^(−40) of its peak the integrand adds nothing. */
+const DEPTH = 40;
+/** The reach of 20 points: e^(−c·e^(2y)) still has its digits on a panel of this width. */
+const PANEL = 1.5;
 
 /**
  * P(X ≤ h, Y ≤ k) for standard normal X and Y with correlation rho, unchecked.
  *
  * Domain     h, k finite; −1 < rho < 1.
- * Method     Plackett's ∂P/∂ρ = φ₂(h, k; ρ), integrated from ρ = −1, where P = max(0, Φ(h) − Φ(−k)): all parts are
+ * Method     Plackett's ∂P/∂ρ = φ₂(h, k; ρ), integrated from ρ = −1, where P = P(−k < Z < h): all parts are
  *            positive, so that far tails keep their digits (integration from ρ = 0, as usual, subtracts where ρ < 0). With
  *            ρ = −tanh y the integrand is exp(−((h − k)² e^(−2y) + (h + k)² e^(2y))/8)/cosh y, which has one peak.
  * Accuracy   1e-13 relative, 1e-12 below 1e-100; test/core/distribution/bivariateNormal.test.ts.
@@ -17,35 +22,12 @@ export function bivariateNormalLower(h: number, k: number, rho: number): number 
   const low = -Math.atanh(rho);
   const logAt = (y: number) => -(A * Math.exp(-2 * y) + B * Math.exp(2 * y)) / 8 - Math.log(Math.cosh(y));
   const slopeAt = (y: number) => (A * Math.exp(-2 * y) - B * Math.exp(2 * y)) / 4 - Math.tanh(y);
-  // The peak of the integrand right of `low`, by halving: it need not be exact.
-  let peak = low;
-  if (slopeAt(low) > 0) {
-    let right = Math.max(low, 0) + 1;
-    while (slopeAt(right) > 0) right += 2;
-    let left = low;
-    for (let i = 0; i < 20; i++) {
-      peak = (left + right) / 2;
-      if (slopeAt(peak) > 0) left = peak;
-      else right = peak;
-    }
-  }
-  const height = logAt(peak);
-  const edge = (inside: number, direction: number) => {
-    let step = 1;
-    while (logAt(inside + direction * step) > height - 40) step *= 2;
-    let near = step / 2;
-    let far = step;
-    if (step === 1) near = 0;
-    for (let i = 0; i < 12; i++) {
-      const middle = (near + far) / 2;
-      if (logAt(inside + direction * middle) > height - 40) near = middle;
-      else far = middle;
-    }
-    return inside + direction * far;
-  };
-  const from = Math.max(low, peak > low ? edge(peak, -1) : low);
-  const to = edge(peak, 1);
-  const panels = Math.max(2, Math.ceil((to - from) / 1.5));
+  const peak = slopeAt(low) > 0 ? crossing(slopeAt, low, 1, 20) : low;
+  const floor = logAt(peak) - DEPTH;
+  const above = (y: number) => logAt(y) - floor;
+  const from = peak > low ? Math.max(low, crossing(above, peak, -1, 12)) : low;
+  const to = crossing(above, peak, 1, 12);
+  const panels = Math.max(2, Math.ceil((to - from) / PANEL));
   const { nodes, weights } = gaussLegendre(20);
   const width = (to - from) / panels;
   let sum = 0;
@@ -56,25 +38,21 @@ export function bivariateNormalLower(h: number, k: number, rho: number): number 
       sum += weights[i] * Math.exp(-(A / v + B * v) / 8 - (h * h + k * k) / 4) * (Math.sqrt(v) / (1 + v));
     }
   }
-  return base(h, k) + (sum * width) / (2 * Math.PI);
+  return normalBetween(-k, h) + (sum * width) / (2 * Math.PI);
 }
 
-/** max(0, Φ(h) − Φ(−k)), without cancellation. */
-export function base(h: number, k: number): number {
-  const gap = h + k;
-  if (!(gap > 0)) return 0;
-  if (gap < 1) {
-    const { nodes, weights } = gaussLegendre(20);
-    let sum = 0;
-    for (let i = 0; i < nodes.length; i++) {
-      const x = (h - k + gap * nodes[i]) / 2;
-      sum += weights[i] * Math.exp(-0.5 * x * x);
-    }
-    return (sum * gap) / (2 * Math.sqrt(2 * Math.PI));
+/** The first place from `start` in this direction where f is no longer above 0, or a little beyond: it need not be exact. */
+function crossing(f: (y: number) => number, start: number, direction: 1 | -1, halvings: number): number {
+  let near = 0;
+  let far = 1;
+  while (f(start + direction * far) > 0) {
+    near = far;
+    far *= 2;
   }
-  return h <= 0
-    ? normalTail(-h) - normalTail(k)
-    : k <= 0
-      ? normalTail(-k) - normalTail(h)
-      : 1 - normalTail(h) - normalTail(k);
+  for (let i = 0; i < halvings; i++) {
+    const middle = (near + far) / 2;
+    if (f(start + direction * middle) > 0) near = middle;
+    else far = middle;
+  }
+  return start + direction * far;
 }

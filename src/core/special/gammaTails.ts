@@ -22,7 +22,7 @@ export function gammaFactor(x: number, a: number): number {
  * Method     Near the mean and from shape 20 on Temme's expansion; else the series below the mean and Legendre's
  *            continued fraction above it, which then settle in a few dozen steps; for shapes below 1 and small x both
  *            tails from one series, since 1 − P keeps no digits there.
- * Accuracy   2e-14 relative for results down to 1e-100; test/core/special/gammaTails.test.ts.
+ * Accuracy   1e-13 relative for results down to 1e-100; test/core/special/gammaTails.test.ts.
  * Reference  Gautschi (1979), A computational procedure for incomplete gamma functions, ACM TOMS 5; Gil, Segura & Temme (2012).
  */
 export function gammaTails(x: number, a: number): Tails {
