@@ -10,6 +10,9 @@ import * as describeChecks from "./describe.checks";
 import * as describeCurves from "./describe.curves";
 import * as describeOutliers from "./describe.outliers";
 import * as plan from "./plan";
+import * as risk from "./risk";
+import * as riskGroups from "./risk.groups";
+import * as riskReliability from "./risk.reliability";
 import * as search from "./search";
 import * as searchPool from "./search.pool";
 import * as searchStages from "./search.stages";
@@ -41,5 +44,8 @@ export const workings: Readonly<Record<string, Workings>> = {
   ...searchStages,
   ...stopping,
   ...stoppingBest,
+  ...risk,
+  ...riskGroups,
+  ...riskReliability,
   ...audit,
 };
