@@ -1,4 +1,4 @@
-import { andersonDarling } from "../sample/andersonDarling";
+import { andersonDarling, type AndersonDarling } from "../sample/andersonDarling";
 import type { Curve } from "../sample/curve";
 import type { Sample } from "../sample/sample";
 import type { Better } from "./better";
@@ -10,7 +10,8 @@ import { safeCutoff, type SafeCutoff } from "./safeCutoff";
 export interface CutoffReport {
   readonly limits: CutoffLimits;
   readonly safe: SafeCutoff;
-  /** Undefined below 8 scores and where a power was fitted. */
+  readonly normality: AndersonDarling;
+  /** Its p-value; undefined below 8 scores and where a power was fitted. */
   readonly normalityP: number | undefined;
   /** Scores of the sample at or beyond the cutoff; NaN where that falls off the scale. */
   readonly passing: number;
@@ -36,10 +37,12 @@ export function cutoffReport(
   better: Better,
 ): CutoffReport {
   const limits = cutoffLimits(curve, fraction, confidence, better);
+  const normality = andersonDarling(curve.scaled);
   return {
     limits,
     safe: safeCutoff(curve, fraction, confidence, better),
-    normalityP: curve.powerFitted ? undefined : andersonDarling(curve.scaled).pValue,
+    normality,
+    normalityP: curve.powerFitted ? undefined : normality.pValue,
     passing: passingNow(sample, limits.cutoff, better),
     passingFractions: passingFractionLimits(curve.count, fraction, confidence),
     looksForHalf: looksForHitChance(curve.count, fraction, 0.5),

@@ -2,11 +2,14 @@ import { requireFraction } from "../domain";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { findRoot } from "../numeric/findRoot";
 import { gatedCurve } from "../sample/gatedCurve";
-import { gatedLogLikelihood, gatedProfile } from "../sample/gatedLikelihood";
+import { gatedLogLikelihood, gatedProfile, type GatedEntries } from "../sample/gatedLikelihood";
 import type { Sample } from "../sample/sample";
 import { requireOnScale } from "./markCurve";
 
 export interface GatedCutoffLimits {
+  readonly entries: GatedEntries;
+  /** The gate in deviations from the mean. */
+  readonly gateScore: number;
   readonly mean: number;
   readonly sd: number;
   readonly z: number;
@@ -16,6 +19,9 @@ export interface GatedCutoffLimits {
   readonly lowerLimit: number;
   readonly cutoff: number;
   readonly upperLimit: number;
+  /** The deviation of the likeliest curve whose mark stands at the limit. */
+  readonly lowerSd: number;
+  readonly upperSd: number;
 }
 
 /**
@@ -39,7 +45,7 @@ export function gatedCutoffLimits(
 ): GatedCutoffLimits {
   requireFraction("fraction", fraction);
   requireFraction("confidence", confidence);
-  const { entries, mean, sd, meanError, sdError } = gatedCurve(sample, gate, below);
+  const { entries, gateScore, mean, sd, meanError, sdError } = gatedCurve(sample, gate, below);
   const z = normalUpperTailQuantile(fraction);
   const cutoff = mean + z * sd;
   const logLikelihood = gatedLogLikelihood(entries, mean, sd);
@@ -50,14 +56,20 @@ export function gatedCutoffLimits(
     while (excess(cutoff + reach) < 0) reach *= 2;
     return requireOnScale(what, findRoot(excess, cutoff, cutoff + reach));
   };
+  const lowerLimit = limit(-1, "lower limit");
+  const upperLimit = limit(1, "upper limit");
   return {
+    entries,
+    gateScore,
     mean,
     sd,
     z,
     logLikelihood,
     allowed,
-    lowerLimit: limit(-1, "lower limit"),
+    lowerLimit,
     cutoff,
-    upperLimit: limit(1, "upper limit"),
+    upperLimit,
+    lowerSd: gatedProfile(entries, lowerLimit, z).sd,
+    upperSd: gatedProfile(entries, upperLimit, z).sd,
   };
 }

@@ -10,6 +10,8 @@ export interface RankCutoff {
   /** Place of the cutoff from the best score (1), between two scores where it is no whole number. */
   readonly place: number;
   readonly cutoff: number;
+  /** What may be left out on either side, (1 − confidence)/2. */
+  readonly alpha: number;
   /** Ranks from the best score of the two limits; undefined where the sample is too small for one. */
   readonly nearRank: number | undefined;
   readonly farRank: number | undefined;
@@ -62,6 +64,7 @@ export function rankCutoff(sample: Sample, fraction: number, confidence: number,
     count,
     place,
     cutoff,
+    alpha,
     nearRank,
     farRank,
     nearTail,
