@@ -77,7 +77,9 @@ export function TOLERANCE_FACTOR(call: WorkingsCall): readonly Step[] {
   const [n, share, trust] = [call.text("count"), call.text("coverage"), call.text("confidence", "0.95")];
   if (readCount("sides", call.cell("sides"), 1, 2, 1) === 2) {
     const { start, factor } = twoSidedFactor(count, coverage, confidence);
-    const howe = `NORM.S.INV((1+${share})/2)*SQRT((1+1/${n})*(${n}-1)/CHISQ.INV(1-${trust},${n}-1))`;
+    // With 1 degree of freedom not every host can invert the chi-square this far down; it is a squared normal.
+    const spread = count === 2 ? `NORM.S.INV(1-${trust}/2)^2` : `CHISQ.INV(1-${trust},${n}-1)`;
+    const howe = `NORM.S.INV((1+${share})/2)*SQRT((1+1/${n})*(${n}-1)/${spread})`;
     return new Steps()
       .add("approximation from which the search for the factor starts", start, howe, "Howe 1969")
       .add(

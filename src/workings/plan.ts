@@ -6,6 +6,8 @@ import { samplesForVarianceStandardError } from "../core/method/samplesForVarian
 import { sdPrecision } from "../core/method/sdPrecision";
 import { spreadCoverage } from "../core/method/spreadCoverage";
 import { readCount, readFlag, readFraction, readPositive } from "../sheet/readArgument";
+import { addPassingMarks } from "./factorSteps";
+import { zNative } from "./markNative";
 import { literal, noncentralTNative } from "./native";
 import { pickItem } from "./pickItem";
 import { Steps, type Step } from "./steps";
@@ -161,28 +163,17 @@ export function SD_PRECISION(call: WorkingsCall): readonly Step[] {
 
 export function CUTOFF_PRECISION(call: WorkingsCall): readonly Step[] {
   const count = readCount("count", call.cell("count"), 2);
-  const { z, alpha, lowestMark, highestMark, lowest, highest } = passingFractionLimits(
+  const limits = passingFractionLimits(
     count,
     readFraction("fraction", call.cell("fraction")),
     readFraction("confidence", call.cell("confidence"), 0.9),
   );
-  const [n, zText] = [call.text("count"), `NORM.S.INV(1-${call.text("fraction")})`];
-  const at = (mark: number) =>
-    noncentralTNative(
-      `${zText}*SQRT(${n})`,
-      `${n}-1`,
-      `${literal(mark)}*SQRT(${n})`,
-      count - 1,
-      mark * Math.sqrt(count),
-    );
+  const [n, fraction] = [call.text("count"), call.text("fraction")];
   const steps = new Steps()
-    .add("z of the fraction", z, zText)
-    .add("chance left out on either side", alpha, `(1-${call.text("confidence", "0.9")})/2`)
-    .add("highest place of the mark, in deviations of the true curve", highestMark, "", OWEN)
-    .add("check: chance that the mark stands higher, must be what is left out", alpha, at(highestMark), OWEN)
-    .add("lowest place of the mark, in deviations of the true curve", lowestMark, "", OWEN)
-    .add("check: chance that the mark stands lower, must be what is left out", alpha, `1-${at(lowestMark)}`, OWEN)
-    .add("lowest passing fraction", lowest, `NORM.S.DIST(-${literal(highestMark)},TRUE)`)
-    .add("highest passing fraction", highest, `NORM.S.DIST(-${literal(lowestMark)},TRUE)`);
+    .add("z of the fraction", limits.z, zNative(fraction))
+    .add("chance left out on either side", limits.alpha, `(1-${call.text("confidence", "0.9")})/2`);
+  addPassingMarks(steps, limits, [n, fraction], count)
+    .add("lowest passing fraction", limits.lowest, `NORM.S.DIST(-${literal(limits.highestMark)},TRUE)`)
+    .add("highest passing fraction", limits.highest, `NORM.S.DIST(-${literal(limits.lowestMark)},TRUE)`);
   return pickItem(steps.rows, 2, call.cell("item"));
 }

@@ -1,7 +1,7 @@
 import { normalQuantile } from "../core/distribution/normalQuantile";
 import { literal } from "./native";
 
-const LARGEST_STEP = 0.3;
+const LARGEST_STEP = 0.15;
 const LEAST_NODES = 40;
 
 /**
