@@ -82,14 +82,9 @@ export function SEARCH_BUDGET(call: WorkingsCall): readonly Step[] {
   const found = enough === "" ? "" : `IF(AND(${enough}>=${wanted}*(1-1E-12)${fewer}),${missUnits},"no")`;
   return steps
     .add("what the hits pay, in units", hitUnits, `${hits}*ROUND(${total}/${unit},0)`)
-    .add(`chance that all misses pay no more than ${missUnits} units`, chance, short(enough), PANJER)
-    .add("smallest number of units that covers the misses", missUnits, short(found), PANJER)
+    .add(`chance that all misses pay no more than ${missUnits} units`, chance, enough, PANJER)
+    .add("smallest number of units that covers the misses", missUnits, found, PANJER)
     .add("budget", budget, `(${hits}*ROUND(${total}/${unit},0)+${missUnits})*${literal(unit)}`).rows;
-}
-
-/** A formula that fits into a cell, else none. */
-function short(formula: string): string {
-  return formula.length < 8000 ? formula : "";
 }
 
 /** What stands for each filled cell of a range, row by row. */
