@@ -44,12 +44,17 @@ describe.skipIf(withoutBrowser)("sheet, pane and command line", () => {
     expect(Number(shown)).toBeCloseTo(expected, shown!.split(".")[1]!.length);
 
     // Typed by hand into a cell, key by key.
+    const selected = () => sheet.page.locator("#cell b").innerText();
     await sheet.select("Bids!O9");
+    await expect.poll(selected).toBe("Bids!O9");
+    // The grid is still scrolling there: a click that comes too early finds nothing, so it is repeated.
     const grid = (await sheet.page.locator("#grid canvas[id^=univer-sheet]").boundingBox())!;
-    await sheet.page.mouse.click(grid.x + 400, grid.y + 300);
-    const place = (await sheet.page.locator("#cell b").innerText()) || "";
-    await sheet.page.waitForFunction((before) => document.querySelector("#cell b")!.textContent !== before, place);
-    const cell = await sheet.page.locator("#cell b").innerText();
+    const click = async () => {
+      await sheet.page.mouse.click(grid.x + 400, grid.y + 300);
+      return selected();
+    };
+    await expect.poll(click, { interval: 500, timeout: 20_000 }).not.toBe("Bids!O9");
+    const cell = await selected();
     await sheet.page.keyboard.type("=WEIR.TOP_FRACTION_CUTOFF(I7:I78,5%)", { delay: 15 });
     await sheet.page.keyboard.press("Enter");
     await sheet.page.waitForTimeout(500);

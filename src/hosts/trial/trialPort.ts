@@ -1,6 +1,11 @@
 import { CommandType, type Univer } from "@univerjs/core";
 import type { FUniver } from "@univerjs/core/facade";
-import { FormulaDataModel, type FWorksheet } from "@univerjs/preset-sheets-core";
+import {
+  FormulaDataModel,
+  SetSelectionsOperation,
+  SetWorksheetActiveOperation,
+  type FWorksheet,
+} from "@univerjs/preset-sheets-core";
 import { parseAddress, type Area } from "../../sheet/address";
 import type { Picture, Port } from "../port";
 import { callCells } from "./callCells";
@@ -51,14 +56,13 @@ export function trialPort({ api, univer, messages, pictures, dark }: TrialHost):
       return readArea(from, sheet, area, true);
     },
     onChange(listener) {
-      const stops = [
-        api.addEvent(api.Event.SelectionChanged, () => listener("selection")),
-        api.addEvent(api.Event.ActiveSheetChanged, () => listener("selection")),
-        api.onCommandExecuted((command) => {
-          if (command.type === CommandType.MUTATION && command.id.startsWith("sheet.mutation.")) listener("cells");
-        }),
-      ];
-      return () => stops.forEach((stop) => stop.dispose());
+      // Not the engine's own SelectionChanged: set up while the grid is still being laid out, it stays silent at times.
+      const told = api.onCommandExecuted((command) => {
+        if (command.id === SetSelectionsOperation.id || command.id === SetWorksheetActiveOperation.id)
+          listener("selection");
+        else if (command.type === CommandType.MUTATION && command.id.startsWith("sheet.mutation.")) listener("cells");
+      });
+      return () => told.dispose();
     },
     async read(address) {
       await settled();
