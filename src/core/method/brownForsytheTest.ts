@@ -23,7 +23,7 @@ export interface BrownForsytheTest {
  */
 export function brownForsytheTest(batches: readonly Sample[]): BrownForsytheTest {
   const medians = batches.map((batch) => middleOf(batch.sorted));
-  const distances = batches.map((batch, i) => new Sample(batch.values.map((score) => Math.abs(score - medians[i]))));
+  const distances = batches.map((batch, i) => new Sample(batch.sorted.map((score) => Math.abs(score - medians[i]))));
   const count = compensatedSum(distances.map((batch) => batch.count));
   const mean = compensatedSum(distances.map((batch) => (batch.count / count) * batch.mean));
   const between = compensatedSum(distances.map((batch) => batch.count * (batch.mean - mean) ** 2));

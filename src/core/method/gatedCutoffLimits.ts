@@ -1,8 +1,9 @@
 import { requireFraction } from "../domain";
+import { chiSquareQuantile } from "../distribution/chiSquareQuantile";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { findRoot } from "../numeric/findRoot";
 import { gatedCurve } from "../sample/gatedCurve";
-import { gatedLogLikelihood, gatedProfile, type GatedEntries } from "../sample/gatedLikelihood";
+import { gatedInUnits, gatedLogLikelihood, gatedProfile, type GatedEntries } from "../sample/gatedLikelihood";
 import type { Sample } from "../sample/sample";
 import { requireOnScale } from "./markCurve";
 
@@ -24,13 +25,17 @@ export interface GatedCutoffLimits {
   readonly upperSd: number;
 }
 
+/** Up to this fall of the likelihood it is a parabola: limits are then standard errors away, to a billionth of one. */
+const LEAST_FALL = 1e-9;
+
 /**
  * The mark that the top fraction of all entries reaches where those below a gate were only counted, with limits by profile likelihood: the
  * marks at which twice the log-likelihood, made as large as it can be, lies a chi-square quantile below its maximum.
  *
  * Domain     as gatedCurve; fraction and confidence in (0, 1). The fraction is of all entries, those below the gate included.
- * Method     One root on either side of the estimate, bracketed outwards in standard errors. Limits from the standard errors are
- *            symmetric, where the likelihood falls more slowly towards the side on which nothing was seen.
+ * Method     One root on either side of the estimate, bracketed outwards in standard errors, all in deviations of the likeliest curve, so
+ *            that no square leaves the range of numbers. Limits from the standard errors are symmetric, where the likelihood falls more
+ *            slowly towards the side on which nothing was seen.
  * Accuracy   1e-10 relative; the limits themselves are large-sample ones. test/core/method/gatedCutoffLimits.test.ts.
  * Reference  Meeker & Escobar (1998), Statistical Methods for Reliability Data, ch. 8.
  *
@@ -45,31 +50,35 @@ export function gatedCutoffLimits(
 ): GatedCutoffLimits {
   requireFraction("fraction", fraction);
   requireFraction("confidence", confidence);
-  const { entries, gateScore, mean, sd, meanError, sdError } = gatedCurve(sample, gate, below);
+  const { entries, gateScore, pull, mean, sd, information } = gatedCurve(sample, gate, below);
   const z = normalUpperTailQuantile(fraction);
-  const cutoff = mean + z * sd;
-  const logLikelihood = gatedLogLikelihood(entries, mean, sd);
-  const allowed = normalUpperTailQuantile((1 - confidence) / 2) ** 2;
-  const excess = (mark: number) => 2 * (logLikelihood - gatedProfile(entries, mark, z).logLikelihood) - allowed;
-  const limit = (side: 1 | -1, what: string) => {
-    let reach = side * Math.sqrt(allowed) * Math.hypot(meanError, z * sdError);
-    while (excess(cutoff + reach) < 0) reach *= 2;
-    return requireOnScale(what, findRoot(excess, cutoff, cutoff + reach));
+  const { inMean, mixed, inSd } = information;
+  const error = Math.sqrt((inSd - 2 * z * mixed + z * z * inMean) / (inMean * inSd - mixed * mixed));
+  const units = gatedInUnits(entries, gateScore, pull, sd);
+  const best = gatedLogLikelihood(units, 0, 1);
+  const allowed =
+    confidence < 0.5 ? chiSquareQuantile(confidence, 1) : normalUpperTailQuantile((1 - confidence) / 2) ** 2;
+  const excess = (point: number) => 2 * (best - gatedProfile(units, point, z).logLikelihood) - allowed;
+  const limit = (side: 1 | -1) => {
+    let reach = side * Math.sqrt(allowed) * error;
+    // So near the top the likelihood falls by less than its last digits.
+    if (allowed < LEAST_FALL) return z + reach;
+    while (excess(z + reach) < 0) reach *= 2;
+    return findRoot(excess, z, z + reach);
   };
-  const lowerLimit = limit(-1, "lower limit");
-  const upperLimit = limit(1, "upper limit");
+  const [lower, upper] = [limit(-1), limit(1)];
   return {
     entries,
     gateScore,
     mean,
     sd,
     z,
-    logLikelihood,
+    logLikelihood: best - entries.scored * Math.log(sd),
     allowed,
-    lowerLimit,
-    cutoff,
-    upperLimit,
-    lowerSd: gatedProfile(entries, lowerLimit, z).sd,
-    upperSd: gatedProfile(entries, upperLimit, z).sd,
+    lowerLimit: requireOnScale("lower limit", mean + lower * sd),
+    cutoff: requireOnScale("cutoff", mean + z * sd),
+    upperLimit: requireOnScale("upper limit", mean + upper * sd),
+    lowerSd: sd * gatedProfile(units, lower, z).sd,
+    upperSd: sd * gatedProfile(units, upper, z).sd,
   };
 }

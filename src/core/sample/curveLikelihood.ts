@@ -35,11 +35,11 @@ export function curveLikelihood(sample: Sample, curve: Curve): CurveLikelihood {
   return { logVariance, logJacobian, logLikelihood, parameters, aicc };
 }
 
-function logJacobianOf({ values }: Sample, { shape, power = 0 }: Curve): number {
+function logJacobianOf({ sorted }: Sample, { shape, power = 0 }: Curve): number {
   if (shape.kind === "normal") return 0;
   if (shape.kind === "logit") {
     const { low, high } = shape;
-    return compensatedSum(values, (x) => Math.log((high - low) / (x - low) / (high - x)));
+    return compensatedSum(sorted, (x) => Math.log((high - low) / (x - low) / (high - x)));
   }
-  return (power - 1) * compensatedSum(values, Math.log);
+  return (power - 1) * compensatedSum(sorted, Math.log);
 }

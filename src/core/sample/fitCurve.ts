@@ -6,6 +6,8 @@ import type { Sample } from "./sample";
 import { logitScale, logScale, NORMAL_SCALE, powerOfLog, powerScale, type Scale } from "./scales";
 import { shapeText, type Shape } from "./shape";
 
+/** Below this the squares of deviations have no digits left. */
+const LEAST_SD = 1e-145;
 const remembered = new WeakMap<Sample, Map<string, Curve>>();
 
 /**
@@ -35,7 +37,7 @@ function fit(argument: string, sample: Sample, shape: Shape): Curve {
   const shownMean = scale.shownMean(mean);
   const shownSd = scale.shownSd(sd);
   // Squares and powers may overflow or vanish: what is left then would look like a curve and be none.
-  if (!(sd > 0 && sd < Infinity && shownSd > 0 && shownSd < Infinity && Number.isFinite(shownMean))) {
+  if (!(sd > LEAST_SD && sd < Infinity && shownSd > 0 && shownSd < Infinity && Number.isFinite(shownMean))) {
     throw new DomainError(
       argument,
       sample.values[0],
@@ -70,13 +72,13 @@ function scaledSample(
     return { scale, scaled: sample.mapped(scale.toScale) };
   }
   requireInside(argument, sample, shape, 0, Infinity);
-  const centre = geometricMean(sample.values);
+  const centre = geometricMean(sample.sorted);
   if (shape.kind === "lognormal") {
     const scale = logScale(centre);
     return { scale, scaled: sample.mapped(scale.toScale) };
   }
   const logs = fitCurve(argument, sample, { kind: "lognormal" }).scaled;
-  const power = shape.power ?? fitPower(logs.values);
+  const power = shape.power ?? fitPower(logs.sorted);
   return { scale: powerScale(power, centre), scaled: logs.mapped(powerOfLog(power)), power };
 }
 

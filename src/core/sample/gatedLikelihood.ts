@@ -1,5 +1,7 @@
 import { DomainError, requireFinite } from "../domain";
 import { normalUpperTail } from "../distribution/normalUpperTail";
+import { representable } from "../method/representable";
+import { compensatedSum } from "../numeric/compensatedSum";
 import { findRoot } from "../numeric/findRoot";
 import { erfcx } from "../special/erfcx";
 import { fitCurve } from "./fitCurve";
@@ -28,9 +30,12 @@ export function gatedEntries(sample: Sample, gate: number, below: number): Gated
     const came = `${gate} was given, and the lowest score is ${sample.minimum}`;
     throw new DomainError("gate", gate, "at or below every score", came);
   }
-  const { count, mean, sd } = fitCurve("scores", sample, NORMAL);
-  const spread = sd * Math.sqrt((count - 1) / count);
-  return { scored: count, below, gate, average: mean, distance: mean - gate, spread };
+  const { count, mean } = fitCurve("scores", sample, NORMAL);
+  const spread = Math.sqrt(sample.sumOfSquares / count);
+  // Of scores that differ in their last digits alone, the mean less the gate would keep none.
+  const sum = compensatedSum(sample.sorted, (score) => score - gate);
+  const distance = representable("gate", gate, sum < Infinity ? sum / count : mean - gate);
+  return { scored: count, below, gate, average: mean, distance, spread };
 }
 
 /** φ(z)/Φ(z), the density over the lower tail; −z + 1/|z| … far below, 0 far above. */
@@ -67,13 +72,19 @@ export function gatedProfile(entries: GatedEntries, mark: number, z: number): { 
   const far = gate - mark;
   const offset = average - mark;
   const squares = spread * spread + offset * offset;
+  // A gate that nothing lies below has no effect, however far it stands: 0 · ∞ would be NaN.
+  const counted = (t: number) => (below === 0 ? 0 : below * millsRatio(far * t + z) * far * t);
   // The derivative times t falls from `scored` at 0 to −∞.
-  const slope = (t: number) =>
-    below * millsRatio(far * t + z) * far * t + scored * (1 - squares * t * t - offset * z * t);
+  const slope = (t: number) => counted(t) + scored * (1 - squares * t * t - offset * z * t);
   let high = 1 / Math.sqrt(squares);
   while (slope(high) > 0) high *= 2;
   let low = high / 2;
   while (slope(low) < 0) low /= 2;
   const sd = 1 / findRoot(slope, low, high);
   return { logLikelihood: gatedLogLikelihood(entries, mark - z * sd, sd), sd };
+}
+
+/** The same entries in deviations from the mean of a curve, where no square leaves the range of numbers. */
+export function gatedInUnits({ scored, below, spread }: GatedEntries, gateScore: number, pull: number, sd: number) {
+  return { scored, below, gate: gateScore, average: pull, distance: pull - gateScore, spread: spread / sd };
 }

@@ -18,11 +18,11 @@ export interface Moments {
  * Accuracy   1e-12 relative to the larger of the result and 1; test/core/sample/moments.test.ts.
  * Reference  Joanes & Gill (1998), Comparing measures of sample skewness and kurtosis, The Statistician 47, 183–189.
  */
-export function moments({ values, count, mean, sd }: Sample): Moments {
+export function moments({ sorted, count, mean, sd }: Sample): Moments {
   const n = count;
   const squared = (x: number) => ((x - mean) / sd) * ((x - mean) / sd);
-  const cubes = () => compensatedSum(values, (x) => squared(x) * ((x - mean) / sd));
-  const fourths = () => compensatedSum(values, (x) => squared(x) * squared(x));
+  const cubes = () => compensatedSum(sorted, (x) => squared(x) * ((x - mean) / sd));
+  const fourths = () => compensatedSum(sorted, (x) => squared(x) * squared(x));
   return {
     skewness: n < 3 ? undefined : (n / ((n - 1) * (n - 2))) * cubes(),
     excessKurtosis:

@@ -1,6 +1,10 @@
 import { compensatedSum } from "../numeric/compensatedSum";
 
-/** The numbers that were scored, in the order in which they came, with what is derived from them worked out once, when first asked for. */
+/**
+ * The numbers that were scored, in the order in which they came, with what is derived from them worked out once, when first asked for.
+ *
+ * Sums go through the sorted values, so that sorting a sheet changes no bit of any result.
+ */
 export class Sample {
   readonly count: number;
   private sortedKept?: Float64Array;
@@ -36,8 +40,10 @@ export class Sample {
   /** The mean, corrected by the mean of the residuals: exact to the last digits also where the values share many leading digits. */
   get mean(): number {
     if (this.meanKept === undefined) {
-      const first = compensatedSum(this.values) / this.count;
-      this.meanKept = Number.isFinite(first) ? first + compensatedSum(this.values, (x) => x - first) / this.count : first;
+      const first = compensatedSum(this.sorted) / this.count;
+      this.meanKept = Number.isFinite(first)
+        ? first + compensatedSum(this.sorted, (x) => x - first) / this.count
+        : first;
     }
     return this.meanKept;
   }
@@ -45,7 +51,7 @@ export class Sample {
   /** Sum of squared deviations from the mean. */
   get sumOfSquares(): number {
     const { mean } = this;
-    return (this.sumOfSquaresKept ??= compensatedSum(this.values, (x) => (x - mean) * (x - mean)));
+    return (this.sumOfSquaresKept ??= compensatedSum(this.sorted, (x) => (x - mean) * (x - mean)));
   }
 
   /** The sample standard deviation, divisor n − 1. */

@@ -25,6 +25,21 @@ describe("gatedCurve", () => {
     expect(curve.sdError).toBeCloseTo(0.5, 15);
   });
 
+  test("a gate that nothing lies below changes no bit, wherever it stands", () => {
+    const { mean, sd, meanError, sdError } = gatedCurve(sampleOf([1, 3, 4]), 1, 0);
+    for (const gate of [0, -1e9, -1e154, -1e300, -Number.MAX_VALUE])
+      expect(gatedCurve(sampleOf([1, 3, 4]), gate, 0)).toMatchObject({ mean, sd, meanError, sdError });
+  });
+
+  test("by hand: far below, the gate alone sets mean and deviation, and a millionth of it in a millionfold unit", () => {
+    // The spread of the scores no longer counts: d = S/0, so that Y(Y − z) = 1 and both are multiples of the gate.
+    const near = gatedCurve(sampleOf([1, 3]), -1e20, 5);
+    const far = gatedCurve(sampleOf([1, 3]), -1e300, 5);
+    expect(relativeError(far.mean / 1e300, near.mean / 1e20)).toBeLessThan(1e-13);
+    expect(relativeError(far.sdError / 1e300, near.sdError / 1e20)).toBeLessThan(1e-13);
+    expect(relativeError(far.pull * (far.pull - far.gateScore), 1)).toBeLessThan(1e-13);
+  });
+
   test("law: no curve nearby is likelier, and the profile of any mark never exceeds it", () => {
     for (const { scores, gate, below } of reference.cases) {
       const { entries, mean, sd } = gatedCurve(sampleOf(scores), gate, below);
@@ -78,6 +93,7 @@ describe("gatedCurve", () => {
     ["gate", 61, 3, /gate must be at or below every score; 61 was given, and the lowest score is 60.5/],
     ["gate", NaN, 3, /gate/],
     ["gate", Infinity, 3, /gate/],
+    ["gate", -1.7e308, 3, /gate must be of a size.*-1.7e\+308/],
     ["below_count", 60, 2.5, /below_count.*2.5/],
     ["below_count", 60, -1, /below_count.*-1/],
     ["below_count", 60, NaN, /below_count/],
@@ -86,6 +102,11 @@ describe("gatedCurve", () => {
     const fit = () => gatedCurve(sampleOf([60.5, 63]), gate, below);
     expect(fit).toThrow(expect.objectContaining({ name: "DomainError", argument }));
     expect(fit).toThrow(message);
+  });
+
+  test("refuses scores whose squares lose their digits, and names them", () => {
+    const fit = () => gatedCurve(sampleOf([1e-160, 3e-160]), 0, 0);
+    expect(fit).toThrow(expect.objectContaining({ name: "DomainError", argument: "scores" }));
   });
 
   test("refuses scores whose spread leaves the range of numbers, and names them", () => {
