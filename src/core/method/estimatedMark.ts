@@ -19,7 +19,7 @@ const BEYOND_TRIALS = 12;
 /**
  * The quadrature for 1 − E[Φ(T)^trials]; with `trials` left out one for the body of T, which serves any number of trials.
  *
- * Domain     count ≥ 2 whole; k finite; trials from 1 to 2⁵³ − 1.
+ * Domain     count ≥ 2 whole; |k| up to 1e9; trials from 1 to 2⁵³ − 1.
  * Method     Trapezoidal rule in T, from the peak of the integrand outwards until nothing is added, so that a far tail keeps its digits.
  *            The step follows the sharper of the density, and of what is averaged, which falls from 1 to 0 within about 1/z of
  *            the score z that one in `trials` passes. For k < 0 the misses are averaged: hits are near certain, and T is wide.
@@ -55,7 +55,10 @@ export function estimatedMark(count: number, k: number, trials?: number): Estima
   return { logBelow: Float64Array.from(logBelow), weights: Float64Array.from(weights), forMisses };
 }
 
-/** About where the integrand is largest, by thirds: the density by its own largest term, in logarithms that don't underflow. */
+/**
+ * About where the integrand is largest, by thirds: the density by its own largest term, in logarithms that don't underflow. Beyond 40
+ * neither hits nor misses are as frequent as the smallest number.
+ */
 function peak(count: number, k: number, trials: number): number {
   const df = count - 1;
   const size = (t: number) => {
@@ -66,8 +69,8 @@ function peak(count: number, k: number, trials: number): number {
       density + (t < 5 ? Math.log(-Math.expm1(trials * logBelowAt(t))) : Math.min(0, Math.log(trials) + logTail(t)))
     );
   };
-  let low = Math.min(k, -40);
-  let high = Math.max(k, 40);
+  let low = -40;
+  let high = 40;
   for (let round = 0; round < 120; round++) {
     const third = (high - low) / 3;
     if (size(low + third) < size(high - third)) low += third;

@@ -8,14 +8,18 @@ import { stirlingError } from "../special/stirlingError";
  * Domain     count ≥ 2 whole; k and t finite.
  * Method     √count·E[φ(√count(t − kU))] by the trapezoidal rule in ln U, from the peak of the integrand outwards until nothing is added;
  *            its terms are positive, so far tails keep their digits. Below 20 degrees of freedom the lower tail of ln U is long, and is
- *            drawn together by τ − e^(−τ).
+ *            drawn together by τ − e^(−τ). Far from the mean, t − kU is a small difference of large numbers: at the peak it comes from the
+ *            quadratic that the peak solves, and beside it from the distance to the peak.
  * Accuracy   1e-13 relative; test/core/method/curveHitChance.test.ts.
  * Reference  Trefethen & Weideman (2014), The exponentially convergent trapezoidal rule, SIAM Review 56.
  */
 export function markDensity(count: number, k: number, t: number): number {
   const df = count - 1;
   const root = Math.sqrt(count);
-  const centre = Math.log(likeliestSpread(count, k, t));
+  const peak = likeliestSpread(count, k, t);
+  const centre = Math.log(peak);
+  const reach = k * peak;
+  const offset = k * k * peak > 1 ? (df * (peak - 1) * (peak + 1)) / (count * reach) : t - reach;
   const step = 0.55 / Math.sqrt(2 * df + (root * Math.abs(t) + 2.5) ** 2);
   const stretch = df < 20;
   let sum = 0;
@@ -24,9 +28,11 @@ export function markDensity(count: number, k: number, t: number): number {
     for (let j = direction === 1 ? 0 : 1; j < 100_000; j++) {
       const tau = direction * j * step;
       const bend = stretch ? Math.exp(-tau) : 0;
-      const s = Math.expm1(centre + (stretch ? (tau - bend + 1) / 2 : tau));
-      const x = root * (t - k - k * s);
-      const term = Math.exp(df * (log1pMinus(s) - (s * s) / 2) - 0.5 * x * x) * (stretch ? (1 + bend) / 2 : 1);
+      const shift = stretch ? (tau - bend + 1) / 2 : tau;
+      const s = Math.expm1(centre + shift);
+      const x = root * (offset - reach * Math.expm1(shift));
+      const size = s < -0.5 ? centre + shift - s : log1pMinus(s);
+      const term = Math.exp(df * (size - (s * s) / 2) - 0.5 * x * x) * (stretch ? (1 + bend) / 2 : 1);
       sum += term;
       if (term <= 1e-18 * sum && term <= before) break;
       before = term;
