@@ -42,7 +42,7 @@ function fit(argument: string, sample: Sample, shape: Shape): Curve {
       argument,
       sample.values[0],
       `numbers with a spread that can be computed on the scale of the shape "${shapeText(shape)}"`,
-      `mean and standard deviation come out as ${shownMean} and ${shownSd} there`,
+      `they run from ${sample.minimum} to ${sample.maximum}`,
     );
   }
   return {

@@ -22,14 +22,20 @@ export function logitScale(low: number, high: number): Scale {
   };
 }
 
-/** ln(x/c) for a positive centre c, shown as ln x; through log1p near the centre, where x/c has lost the digits that tell scores apart. */
+/**
+ * ln(x/c) for a positive centre c, shown as ln x; through log1p near the centre, where x/c has lost the digits that tell scores apart.
+ * Neither x/c nor e^point need be numbers for the result to be one.
+ */
 export function logScale(centre: number): Scale {
   return {
     toScale: (score) => {
       const ratio = score > 0 ? (score - centre) / centre : NaN;
-      return Math.abs(ratio) < 0.5 ? Math.log1p(ratio) : Math.log(score / centre);
+      if (Math.abs(ratio) < 0.5) return Math.log1p(ratio);
+      const quotient = score / centre;
+      return quotient > 1e-290 && quotient < Infinity ? Math.log(quotient) : Math.log(score) - Math.log(centre);
     },
-    fromScale: (point) => finite(centre * Math.exp(point)),
+    fromScale: (point) =>
+      finite(Math.abs(point) < 700 ? centre * Math.exp(point) : centre * Math.exp(point / 2) * Math.exp(point / 2)),
     shownMean: (mean) => Math.log(centre) + mean,
     shownSd: same,
   };
