@@ -53,6 +53,6 @@ export const proofSheet: BookSheet = {
       ["what it does with a blank cell", "=WEIR.BLANK_CHECK(C1)"],
       ["revision of the numbers", '=WEIR.RELEASE("revision")'],
     ]),
-    ...table("D4", "How many to score first, step by step", '=WEIR.WORKINGS("SAMPLES_FOR_SD_PRECISION",10%)'),
+    ...table("D4", "The plain mark, step by step", `=WEIR.WORKINGS("TOP_FRACTION_CUTOFF",${SCORES},10%)`),
   ],
 };
