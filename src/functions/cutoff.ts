@@ -57,7 +57,7 @@ export function CURVE_CUTOFF(mean: any, sd: any, fraction: any, better?: any): a
   const centre = readNumber("mean", mean);
   const spread = readPositive("sd", sd);
   const share = readFraction("fraction", fraction);
-  return requireOnScale("cutoff", plainCutoff(knownCurve(2, centre, spread), share, readBetter(better)).cutoff);
+  return plainCutoff(knownCurve(2, centre, spread), share, readBetter(better)).cutoff;
 }
 
 /**

@@ -84,6 +84,8 @@ function isRange(argument: Argument): argument is Range {
 
 function asMatrix(argument: Argument, blanks: BlankPolicy): Range {
   const range = isRange(argument) ? argument : [[argument]];
+  // No host hands over a range without cells, but a test or a file may; nothing is in it either.
+  if (!(range[0]?.length > 0)) return [[handedBlank(null, blanks)]];
   // Functions only read, and a hole counts as a blank like null: copying a column would cost as much as reading it.
   if (blanks === "null") return range;
   return range.map((row) => row.map((cell) => handedBlank(cell, blanks)));

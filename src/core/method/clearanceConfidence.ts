@@ -1,7 +1,8 @@
-import { requireCount, requireFinite, requireFraction, requirePositive } from "../domain";
+import { requireFinite, requireFraction, requirePositive } from "../domain";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { type Better, directionOf } from "./better";
 import { noncentralTCurve } from "./noncentralTCurve";
+import { requireScored } from "./requireScored";
 
 export interface ClearanceConfidence {
   readonly z: number;
@@ -28,7 +29,7 @@ export function clearanceConfidence(
   fraction: number,
   better: Better,
 ): ClearanceConfidence {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFinite("mean", mean);
   requirePositive("sd", sd);
   requireFraction("fraction", fraction);

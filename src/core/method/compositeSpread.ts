@@ -2,6 +2,7 @@ import { DomainError, requirePositive } from "../domain";
 import { choleskyFactor } from "../numeric/choleskyFactor";
 import { powerOfTwoBelow } from "../numeric/powerOfTwoBelow";
 import { ordinal } from "../ordinal";
+import { representable } from "./representable";
 import { requireWeights } from "./weightedScores";
 
 export interface CompositeSpread {
@@ -31,16 +32,19 @@ export function compositeSpread(weights: Float64Array, sds: Float64Array, correl
   const scale = powerOfTwoBelow(Math.max(...weights));
   const total = weights.reduce((sum, weight) => sum + weight / scale, 0);
   const parts = weights.map((weight, i) => (weight / scale / total) * sds[i]);
-  let variance = 0;
+  // In units of the largest part no square overflows, and none vanishes beside it.
+  const unit = powerOfTwoBelow(Math.max(...parts));
+  for (let i = 0; i < size; i++) parts[i] /= unit;
+  let square = 0;
   for (let i = 0; i < size; i++) {
-    variance += parts[i] * parts[i];
+    square += parts[i] * parts[i];
     for (let j = 0; j < i; j++)
-      variance += (correlations[i * size + j] + correlations[j * size + i]) * parts[i] * parts[j];
+      square += (correlations[i * size + j] + correlations[j * size + i]) * parts[i] * parts[j];
   }
   // Criteria that cancel one another out may leave a variance just below 0.
-  variance = Math.max(0, variance);
-  if (variance === Infinity) throw new DomainError("sds", Math.max(...sds), "small enough to be squared");
-  return { weightTotal: total * scale, variance, spread: Math.sqrt(variance) };
+  const spread = unit * Math.sqrt(Math.max(0, square));
+  const variance = representable("sds", Math.max(...sds), spread * spread);
+  return { weightTotal: representable("weights", Math.max(...weights), total * scale), variance, spread };
 }
 
 function requireCorrelations(correlations: Float64Array, size: number): void {

@@ -5,7 +5,7 @@ import { findRoot } from "../numeric/findRoot";
 import { gatedCurve } from "../sample/gatedCurve";
 import { gatedInUnits, gatedLogLikelihood, gatedProfile, type GatedEntries } from "../sample/gatedLikelihood";
 import type { Sample } from "../sample/sample";
-import { requireOnScale } from "./markCurve";
+import { representable } from "./representable";
 
 export interface GatedCutoffLimits {
   readonly entries: GatedEntries;
@@ -39,7 +39,7 @@ const LEAST_FALL = 1e-9;
  * Accuracy   1e-10 relative; the limits themselves are large-sample ones. test/core/method/gatedCutoffLimits.test.ts.
  * Reference  Meeker & Escobar (1998), Statistical Methods for Reliability Data, ch. 8.
  *
- * @throws {DomainError} @throws {NoAnswerError} where a limit passes the largest number.
+ * @throws {DomainError} naming gate where a limit passes the largest number.
  */
 export function gatedCutoffLimits(
   sample: Sample,
@@ -75,9 +75,9 @@ export function gatedCutoffLimits(
     z,
     logLikelihood: best - entries.scored * Math.log(sd),
     allowed,
-    lowerLimit: requireOnScale("lower limit", mean + lower * sd),
-    cutoff: requireOnScale("cutoff", mean + z * sd),
-    upperLimit: requireOnScale("upper limit", mean + upper * sd),
+    lowerLimit: representable("gate", gate, mean + lower * sd),
+    cutoff: representable("gate", gate, mean + z * sd),
+    upperLimit: representable("gate", gate, mean + upper * sd),
     lowerSd: sd * gatedProfile(units, lower, z).sd,
     upperSd: sd * gatedProfile(units, upper, z).sd,
   };

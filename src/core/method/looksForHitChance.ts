@@ -1,10 +1,11 @@
-import { requireCount, requireFraction } from "../domain";
+import { requireFraction } from "../domain";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { findRoot } from "../numeric/findRoot";
 import { remembered } from "../numeric/remembered";
 import { smallestNear } from "../numeric/smallestNear";
 import { chanceBeyond, estimatedMark } from "./estimatedMark";
 import { chanceSlack } from "./reachesChance";
+import { requireScored } from "./requireScored";
 
 /**
  * The smallest number of looks with a chance of at least `chance` that one of them clears the plain mark x̄ + z·s estimated from `count`
@@ -21,7 +22,7 @@ import { chanceSlack } from "./reachesChance";
  * @throws {DomainError}
  */
 export function looksForHitChance(count: number, fraction: number, chance: number): number {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("fraction", fraction);
   requireFraction("chance", chance);
   return looks(count, fraction, chance);

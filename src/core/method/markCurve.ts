@@ -1,5 +1,7 @@
-import { NoAnswerError, requireCount, requireFinite, requirePositive } from "../domain";
+import { NoAnswerError, requireFinite, requirePositive } from "../domain";
 import type { Curve } from "../sample/curve";
+import { representable } from "./representable";
+import { requireScored } from "./requireScored";
 
 /** What a mark is computed from: a curve fitted to scores, or one known by its three numbers. */
 export type MarkCurve = Pick<Curve, "count" | "mean" | "sd" | "fromScale">;
@@ -7,13 +9,13 @@ export type MarkCurve = Pick<Curve, "count" | "mean" | "sd" | "fromScale">;
 /**
  * A curve known only by count, mean and sd, computed elsewhere; its scale is that of the scores.
  *
- * @throws {DomainError} unless count is whole and at least 2, mean finite, sd above 0.
+ * @throws {DomainError} unless count is whole and at least 2, mean finite, sd above 0; naming sd where a mark passes the largest number.
  */
 export function knownCurve(count: number, mean: number, sd: number): MarkCurve {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFinite("mean", mean);
   requirePositive("sd", sd);
-  return { count, mean, sd, fromScale: (point) => point };
+  return { count, mean, sd, fromScale: (point) => representable("sd", sd, point) };
 }
 
 /**

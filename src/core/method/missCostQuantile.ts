@@ -35,6 +35,20 @@ export function missCostQuantile(
 ): MissCostQuantile {
   const paying = misses.filter((kind) => kind.units > 0);
   if (paying.length === 0) return { units: 0, reached: 1 };
+  // Misses that all pay multiples of 80 leave 79 of 80 totals empty, and nothing would ever settle.
+  const common = paying.reduce((unit, kind) => greatestCommonDivisor(unit, kind.units), 0);
+  const { units, reached } = quantile(
+    paying.map(({ units, share }) => ({ units: units / common, share })),
+    fraction,
+    chance,
+    hits,
+  );
+  return { units: units * common, reached };
+}
+
+type Paying = Pick<MissCost, "units" | "share">;
+
+function quantile(paying: readonly Paying[], fraction: number, chance: number, hits: number): MissCostQuantile {
   const span = Math.max(...paying.map((kind) => kind.units));
   // A miss that pays nothing only lengthens the search: left out, and the others scaled up.
   const paid = paying.reduce((sum, kind) => sum + kind.share, fraction);
@@ -54,9 +68,10 @@ export function missCostQuantile(
   let sum = ring[0];
   let lost = 0;
   let factor = 2 ** exponent;
+  let check = rate > 0 ? 2 * span : Infinity;
   for (let s = 0; ;) {
     if (sum * factor >= target) return { units: s, reached: Math.min(1, sum * factor) };
-    if (rate > 0 && s >= 2 * span && s % span === 0 && settled(ring, mask, s, span, rate)) {
+    if (s === check && (check += span) && settled(ring, mask, s, span, rate)) {
       const tail = ring[s & mask] / Math.expm1(rate);
       const more = Math.max(0, Math.ceil(Math.log(tail / (1 - target)) / rate));
       return { units: s + more, reached: 1 - tail * Math.exp(-rate * more) };
@@ -84,7 +99,8 @@ export function missCostQuantile(
 function tailRate(units: Int32Array, shares: Float64Array, rest: number): number {
   const excess = (rate: number) => shares.reduce((sum, share, j) => sum + share * Math.expm1(rate * units[j]), -rest);
   const bounds = shares.map((share, j) => Math.log1p(rest / share) / units[j]);
-  return findRoot(excess, 0, Math.min(...bounds));
+  // Where one kind of miss is all there is, its bound is the root but for the rounding.
+  return findRoot(excess, 0, Math.min(...bounds) * (1 + 1e-11));
 }
 
 /** Whether Chernoff's bound e^{θs}(p/(1 − Σ qⱼe^{−θCⱼ}))^hits says that no s within `steps` can reach the target: known before the work. */
@@ -111,8 +127,10 @@ function settled(ring: Float64Array, mask: number, s: number, span: number, rate
     const level = ring[(s - back) & mask] * Math.exp(-rate * back);
     if (level < least) least = level;
     if (level > most) most = level;
+    // As a rule the first few already differ: a whole span of exponentials at every span would double the work.
+    if (!(most <= least * (1 + 1e-13))) return false;
   }
-  return most <= least * (1 + 1e-13);
+  return true;
 }
 
 /** base^n as value · 2^exponent, the value between 2⁻⁵⁰⁰ and 1. */
@@ -128,6 +146,11 @@ function scaledPower(base: number, n: number): { value: number; exponent: number
     }
   }
   return { value, exponent };
+}
+
+function greatestCommonDivisor(a: number, b: number): number {
+  while (b > 0) [a, b] = [b, a % b];
+  return a;
 }
 
 function refuse(fraction: number): never {

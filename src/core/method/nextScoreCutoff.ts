@@ -1,7 +1,8 @@
-import { requireCount, requireFraction } from "../domain";
+import { requireFraction } from "../domain";
 import { studentTUpperTailQuantile } from "../distribution/studentTUpperTailQuantile";
 import { type Better, directionOf } from "./better";
 import type { MarkCurve } from "./markCurve";
+import { requireScored } from "./requireScored";
 
 export interface NextScoreCutoff {
   readonly count: number;
@@ -27,7 +28,7 @@ export interface NextScoreCutoff {
  */
 export function nextScoreCutoff(curve: MarkCurve, fraction: number, better: Better): NextScoreCutoff {
   const { count, mean, sd, fromScale } = curve;
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("fraction", fraction);
   const t = studentTUpperTailQuantile(fraction, count - 1);
   const factor = t * Math.sqrt(1 + 1 / count);

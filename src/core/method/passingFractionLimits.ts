@@ -1,9 +1,10 @@
-import { requireCount, requireFraction } from "../domain";
+import { requireFraction } from "../domain";
 import { noncentralTCdf } from "../distribution/noncentralTCdf";
 import { noncentralTUpperTail } from "../distribution/noncentralTUpperTail";
 import { normalUpperTail } from "../distribution/normalUpperTail";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { findRoot } from "../numeric/findRoot";
+import { requireScored } from "./requireScored";
 
 export interface PassingFractionLimits {
   readonly z: number;
@@ -28,7 +29,7 @@ export interface PassingFractionLimits {
  * @throws {DomainError} naming count, fraction or confidence.
  */
 export function passingFractionLimits(count: number, fraction: number, confidence: number): PassingFractionLimits {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("fraction", fraction);
   requireFraction("confidence", confidence);
   const z = normalUpperTailQuantile(fraction);

@@ -1,7 +1,8 @@
-import { requireCount, requireFraction } from "../domain";
+import { requireFraction } from "../domain";
 import { chiSquareUpperTailQuantile } from "../distribution/chiSquareUpperTailQuantile";
 import { findRoot } from "../numeric/findRoot";
 import { spreadCoverage } from "./spreadCoverage";
+import { requireScored } from "./requireScored";
 
 /**
  * The precision that `count` scores buy for a standard deviation: the p with P(|s/σ − 1| ≤ p) = confidence.
@@ -15,7 +16,7 @@ import { spreadCoverage } from "./spreadCoverage";
  * @throws {DomainError} naming count or confidence.
  */
 export function sdPrecision(count: number, confidence: number): { degrees: number; precision: number } {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("confidence", confidence);
   const degrees = count - 1;
   const upperOnly = Math.sqrt(chiSquareUpperTailQuantile(1 - confidence, degrees) / degrees) - 1;

@@ -30,7 +30,7 @@ export function searchDuration(
   requireFraction("fraction", fraction);
   requirePositive("arrivals_per_period", arrivalsPerPeriod);
   requireFraction("chance", chance);
-  requireCount("hits", hits, 1);
+  requireCount("hits", hits, 1, 1e15);
   const hitRate = arrivalsPerPeriod * fraction;
   const quantile = gammaQuantile(chance, hits);
   return { hitRate, quantile, periods: representable("arrivals_per_period", arrivalsPerPeriod, quantile / hitRate) };

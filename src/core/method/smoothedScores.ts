@@ -1,4 +1,5 @@
 import { DomainError, requireFinite, requirePositive } from "../domain";
+import { representable } from "./representable";
 
 export interface SmoothedScores {
   readonly smoothed: Float64Array;
@@ -35,6 +36,7 @@ export function smoothedScores(
   width = SMOOTHING_WIDTH,
 ): SmoothedScores {
   requireWithinReach(recent, mean, sd);
+  representable("sd", sd, Math.abs(mean) + width * sd);
   const smoothed = new Float64Array(recent.length);
   const lower = new Float64Array(recent.length);
   const upper = new Float64Array(recent.length);

@@ -1,9 +1,10 @@
-import { DomainError, requireCount, requireFraction } from "../domain";
+import { DomainError, requireFraction } from "../domain";
 import { noncentralTQuantile } from "../distribution/noncentralTQuantile";
 import { noncentralTUpperTailQuantile } from "../distribution/noncentralTUpperTailQuantile";
 import { normalQuantile } from "../distribution/normalQuantile";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { remembered } from "../numeric/remembered";
+import { requireScored } from "./requireScored";
 
 export interface ToleranceFactor {
   readonly z: number;
@@ -26,7 +27,7 @@ export interface ToleranceFactor {
  * @throws {DomainError}
  */
 export function toleranceFactor(count: number, coverage: number, confidence: number): ToleranceFactor {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("coverage", coverage);
   requireConfidence(confidence);
   return factorFor(count, normalQuantile(coverage), confidence, 0);
@@ -34,7 +35,7 @@ export function toleranceFactor(count: number, coverage: number, confidence: num
 
 /** The same for the mark that a top `fraction` passes: coverage 1 − fraction, without the digits that the difference would lose. */
 export function safeFactor(count: number, fraction: number, confidence: number): ToleranceFactor {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("fraction", fraction);
   requireConfidence(confidence);
   return factorFor(count, normalUpperTailQuantile(fraction), confidence, 0);
@@ -46,7 +47,7 @@ export function limitFactors(
   fraction: number,
   confidence: number,
 ): { alpha: number; lower: ToleranceFactor; upper: ToleranceFactor } {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("fraction", fraction);
   requireFraction("confidence", confidence);
   const z = normalUpperTailQuantile(fraction);

@@ -33,7 +33,8 @@ export function trialsForHitChance(fraction: number, chance: number, hits: numbe
       () => binomialUpperTail(hits, trials, fraction),
       () => binomialCdf(hits - 1, trials, fraction),
     );
-  const guess = hits + gammaQuantile(chance, Math.max(hits * (1 - fraction), 1e-3)) / fraction;
+  const misses = Math.min(Math.max(hits * (1 - fraction), 1e-3), 1e15);
+  const guess = hits + gammaQuantile(chance, misses) / fraction;
   const trials = smallestNear(met, guess, hits);
   if (trials === Infinity) {
     const most = Number.MAX_SAFE_INTEGER;

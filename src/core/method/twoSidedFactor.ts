@@ -1,4 +1,4 @@
-import { requireCount, requireFraction } from "../domain";
+import { requireFraction } from "../domain";
 import { chiSquareQuantile } from "../distribution/chiSquareQuantile";
 import { chiSquareCdf } from "../distribution/chiSquareCdf";
 import { chiSquareUpperTail } from "../distribution/chiSquareUpperTail";
@@ -9,6 +9,7 @@ import { gaussLegendre } from "../numeric/gaussLegendre";
 import { remembered } from "../numeric/remembered";
 import { normalTail } from "../special/normalTail";
 import { requireConfidence } from "./toleranceFactor";
+import { requireScored } from "./requireScored";
 
 export interface TwoSidedFactor {
   /** Howe's approximation, from which the search starts. */
@@ -18,6 +19,7 @@ export interface TwoSidedFactor {
 
 const STEP = 1 / 8;
 const POINTS = 71;
+const LEAST_COVERAGE = 1e-100;
 
 /**
  * The two-sided normal tolerance factor k: with this confidence, x̄ ± k·s holds at least the share `coverage` of the population.
@@ -32,10 +34,13 @@ const POINTS = 71;
  * @throws {DomainError}
  */
 export function twoSidedFactor(count: number, coverage: number, confidence: number): TwoSidedFactor {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("coverage", coverage);
   requireConfidence(confidence);
-  return exactFactor(count, coverage, confidence);
+  // So small a coverage is proportional to the factor, and the numbers around the smallest have no digits to search in.
+  const held = Math.max(coverage, LEAST_COVERAGE);
+  const { start, factor } = exactFactor(count, held, confidence);
+  return { start: start * (coverage / held), factor: factor * (coverage / held) };
 }
 
 const exactFactor = remembered((count: number, coverage: number, confidence: number): TwoSidedFactor => {

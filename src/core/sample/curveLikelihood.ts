@@ -39,7 +39,13 @@ function logJacobianOf({ sorted }: Sample, { shape, power = 0 }: Curve): number 
   if (shape.kind === "normal") return 0;
   if (shape.kind === "logit") {
     const { low, high } = shape;
-    return compensatedSum(sorted, (x) => Math.log((high - low) / (x - low) / (high - x)));
+    return compensatedSum(sorted, (x) => logOfShares(x - low, high - x, high - low));
   }
   return (power - 1) * compensatedSum(sorted, Math.log);
+}
+
+/** ln(whole/(below·above)), also where the quotient itself is no number. */
+function logOfShares(below: number, above: number, whole: number): number {
+  const quotient = whole / below / above;
+  return quotient < Infinity ? Math.log(quotient) : Math.log(whole) - Math.log(below) - Math.log(above);
 }
