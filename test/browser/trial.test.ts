@@ -106,6 +106,12 @@ describe.skipIf(withoutBrowser)("the trial page", () => {
     });
     await sheet.select("Errors!A1");
     await sheet.page.waitForFunction(() => document.getElementById("cell")!.textContent!.includes("precision must be"));
+    await sheet.write("Errors!A1", [['="a"+1']]);
+    expect((await sheet.read("Errors!A1")).values).toEqual([[{ code: "#VALUE!" }]]);
+    await sheet.write("Errors!D1", [[12, "=IF(D1>1,WEIR.SAMPLES_FOR_SD_PRECISION(D1),1/0)"]]);
+    expect((await sheet.read("Errors!E1")).values[0]![0]).toHaveProperty("message");
+    await sheet.write("Errors!D1", [[0]]);
+    expect((await sheet.read("Errors!E1")).values).toEqual([[{ code: "#DIV/0!" }]]);
     await sheet.write("Errors!C1", [['=IFERROR(WEIR.SAMPLES_FOR_SD_PRECISION(12),"caught")']]);
     expect((await sheet.read("Errors!C1")).values).toEqual([["caught"]]);
   });

@@ -51,7 +51,7 @@ function functionClass(entry: FunctionEntry, functions: FunctionSet, messages: M
 
     private result(outcome: Outcome): BaseValueObject {
       if ("value" in outcome) return valueOf(outcome.value);
-      messages.keep(this.subUnitId ?? "", this.row, this.column, outcome.message);
+      messages.keep(this.subUnitId ?? "", this.row, this.column, outcome);
       return ErrorValueObject.create(outcome.error as ErrorType);
     }
 

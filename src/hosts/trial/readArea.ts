@@ -18,7 +18,7 @@ export function readCell(from: ReadFrom, sheet: FWorksheet, row: number, column:
   const spilled = from.formulas.getArrayFormulaCellData()[model.getUnitId()]?.[model.getSheetId()]?.[row]?.[column];
   const cell = typed ?? cellOfData(spilled);
   if (typeof cell !== "object" || cell === null) return cell;
-  const message = from.messages.messageAt(model.getSheetId(), row, column);
+  const message = from.messages.messageAt(model.getSheetId(), row, column, cell.code);
   return message === undefined ? cell : { ...cell, message };
 }
 

@@ -1,6 +1,11 @@
 import { LocaleType, LogLevel, ThemeService, Univer, type IWorkbookData } from "@univerjs/core";
 import { FUniver } from "@univerjs/core/facade";
-import { CalculationMode, UniverSheetsCorePreset } from "@univerjs/preset-sheets-core";
+import {
+  CalculationMode,
+  SetFormulaCalculationResultMutation,
+  UniverSheetsCorePreset,
+  type ISetFormulaCalculationResultMutation,
+} from "@univerjs/preset-sheets-core";
 import english from "@univerjs/preset-sheets-core/locales/en-US";
 import "@univerjs/preset-sheets-core/lib/index.css";
 import { cellFunctions } from "./cellFunctions";
@@ -63,5 +68,19 @@ export function startSheet(
   themes.setTheme({ ...themes.getCurrentTheme(), primary: WATER });
   const api = FUniver.newAPI(univer);
   api.createWorkbook(snapshot);
+  followCalculations(api, messages);
   return { api, univer };
+}
+
+/** Else a cell that fails for another reason than before would go on showing the old one. */
+function followCalculations(api: FUniver, messages: MessageBook): void {
+  api.getFormula().calculationStart(() => messages.startRound());
+  // Not the engine's calculationResultApplied, which comes when others already read the cells.
+  api.onCommandExecuted(({ id, params }) => {
+    if (id !== SetFormulaCalculationResultMutation.id) return;
+    for (const sheets of Object.values((params as ISetFormulaCalculationResultMutation).unitData))
+      for (const [sheetId, rows] of Object.entries(sheets ?? {}))
+        for (const [row, cells] of Object.entries(rows ?? {}))
+          for (const column of Object.keys(cells ?? {})) messages.settle(sheetId, Number(row), Number(column));
+  });
 }
