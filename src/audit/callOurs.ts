@@ -23,7 +23,7 @@ export function callOurs(entry: FunctionEntry, node: CallExpression, at: Evaluat
   while (given.length > 0 && given[given.length - 1] === undefined) given.pop();
   const invocation = entry.takesAddresses ? invocationOf(node, values, at) : undefined;
   const outcome = callFunction(entry.name, given, at.setting.blanks, invocation)!;
-  at.setting.budget.calls?.push({ entry, values, given, outcome });
+  at.setting.budget.calls?.push({ entry, values, given, outcome, source: at.setting.source, node });
   return "error" in outcome ? errorCell(outcome.error, outcome.message) : (outcome.value as Cell | Cell[][]);
 }
 

@@ -4,6 +4,7 @@ import { broadcast } from "./broadcast";
 import { callOurs } from "./callOurs";
 import type { Evaluation } from "./evaluation";
 import { readFunctionName } from "./functionName";
+import { lambdaFunctions } from "./lambda";
 import { lazyFunctions } from "./lazy";
 import { nearestName } from "../functions/nearestName";
 import { natives } from "./natives/index";
@@ -77,7 +78,7 @@ function evaluateCall(node: CallExpression, at: Evaluation): Value {
     const nearest = callee.nearest ? `; the nearest is ${callee.nearest}` : "";
     return errorCell("#NAME?", `There is no function ${callee.shown}${nearest}.`);
   }
-  const lazy = lazyFunctions.get(callee.name);
+  const lazy = lazyFunctions.get(callee.name) ?? lambdaFunctions.get(callee.name);
   if (lazy) return lazy(node.arguments, at);
   const native = natives.get(callee.name);
   if (!native) throw new UnknownFunction(callee.name);
@@ -103,6 +104,6 @@ export class UnknownFunction extends NotKnown {
   }
 
   get nearest(): string | undefined {
-    return nearestName(this.functionName, [...natives.keys(), ...lazyFunctions.keys()]);
+    return nearestName(this.functionName, [...natives.keys(), ...lazyFunctions.keys(), ...lambdaFunctions.keys()]);
   }
 }

@@ -1,4 +1,4 @@
-import type { AstExpression } from "@borgar/fx/xlsx";
+import type { AstExpression, CallExpression } from "@borgar/fx/xlsx";
 import type { Cell, Range } from "../sheet/cell";
 import type { FunctionEntry } from "../sheet/functionTable";
 import type { Argument, BlankPolicy, Outcome } from "../sheet/invoke";
@@ -53,6 +53,9 @@ export interface OwnCall {
   /** The same as the function got them. */
   readonly given: readonly Argument[];
   readonly outcome: Outcome;
+  /** Where it stands: the formula's text, and from where to where in it. */
+  readonly source: string;
+  readonly node: CallExpression;
 }
 
 /** About two seconds' worth of steps. */

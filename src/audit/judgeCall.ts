@@ -51,7 +51,7 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
     address: formatAddress({ top: row, left: column, bottom: row, right: column }),
     formula: typedFormula(storedFormula(cell)),
     stored: oneOrRows(stored),
-    recomputed: "value" in answer ? answer.value : undefined,
+    recomputed: "value" in answer && unknown.length === 0 ? answer.value : undefined,
     calls,
   };
   const hindrance = cell.calculated

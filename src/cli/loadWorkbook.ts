@@ -6,7 +6,10 @@ import { Stop, type Io } from "./io";
 
 /** Reads the file of a command; one that can't be used ends it with the reason. */
 export async function loadWorkbook(path: string, io: Io): Promise<Workbook> {
-  const bytes = await io.read(path);
+  return parseWorkbook(await io.read(path), path);
+}
+
+export async function parseWorkbook(bytes: Uint8Array, path: string): Promise<Workbook> {
   try {
     return await readWorkbook(bytes, path);
   } catch (failure) {

@@ -8,10 +8,21 @@ import { readSharedStrings } from "./xlsxStrings";
 import { readTable } from "./xlsxTable";
 import { ZipArchive } from "./zipArchive";
 
-interface ListedSheet {
+export interface ListedSheet {
   readonly name: string;
   readonly relation: string;
   readonly visible: boolean;
+}
+
+/** The parts of the sheets with cells, by name, in the order of the workbook. */
+export function sheetParts(archive: ZipArchive, part: string): Map<string, string> {
+  const relations = readRelations(archive, part);
+  const parts = new Map<string, string>();
+  for (const { name, relation } of readWorkbookPart(archive, part).listed) {
+    const { kind, target } = relations.find(({ id }) => id === relation) ?? {};
+    if (kind === "worksheet" && target !== undefined) parts.set(name, target);
+  }
+  return parts;
 }
 
 /** Reads the bytes of an .xlsx file (ECMA-376) into a workbook: stored values, formulas as stored, names, tables, what is hidden. */
@@ -44,7 +55,7 @@ export function readXlsx(bytes: Uint8Array): Workbook {
   return { sheets, names, tables, date1904 };
 }
 
-function readWorkbookPart(archive: ZipArchive, part: string) {
+export function readWorkbookPart(archive: ZipArchive, part: string) {
   const listed: ListedSheet[] = [];
   const named: { name: string; formula: string; local?: number }[] = [];
   let date1904 = false;

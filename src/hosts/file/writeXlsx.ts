@@ -39,7 +39,7 @@ export function writeXlsx(sheets: readonly SheetToWrite[]): Uint8Array {
     ]),
     "xl/styles.xml": STYLES,
   };
-  sheets.forEach((sheet, index) => (parts[`xl/worksheets/sheet${index + 1}.xml`] = sheetXml(sheet)));
+  sheets.forEach((sheet, index) => (parts[`xl/worksheets/sheet${index + 1}.xml`] = sheetXml(sheet, true)));
   return zipSync(Object.fromEntries(Object.entries(parts).map(([name, text]) => [name, strToU8(text)])));
 }
 
@@ -50,32 +50,33 @@ function relations(list: readonly (readonly [id: string, kind: string, target: s
   return `${HEAD}<Relationships xmlns="${PACKAGE}/relationships">${inside.join("")}</Relationships>`;
 }
 
-function sheetXml({ rows, widths }: SheetToWrite): string {
+/** The XML of one sheet; `styled` where the workbook has the styles of this file. */
+export function sheetXml({ rows, widths }: SheetToWrite, styled: boolean): string {
   const columns = widths.map(
     (width, index) => `<col min="${index + 1}" max="${index + 1}" width="${width}" customWidth="1"/>`,
   );
   const lines = rows.map((row, top) => {
     const cells = row.map((cell, left) =>
-      cellXml(cell, formatAddress({ top, left, bottom: top, right: left }), top === 0),
+      cellXml(cell, formatAddress({ top, left, bottom: top, right: left }), styled ? cellStyle(cell, top === 0) : 0),
     );
     return `<row r="${top + 1}">${cells.join("")}</row>`;
   });
   return `${HEAD}<worksheet xmlns="${MAIN}"><sheetViews><sheetView workbookViewId="0"><pane ySplit="1" topLeftCell="A2" activePane="bottomLeft" state="frozen"/></sheetView></sheetViews><cols>${columns.join("")}</cols><sheetData>${lines.join("")}</sheetData></worksheet>`;
 }
 
-function cellXml(cell: Cell, address: string, heading: boolean): string {
+function cellStyle(cell: Cell, heading: boolean): number {
+  if (heading) return STYLE.heading;
+  if (typeof cell !== "string") return STYLE.plain;
+  return /^[=+\-@\t\r]/.test(cell) ? STYLE.quoted : cell.length > 60 ? STYLE.wrapped : STYLE.plain;
+}
+
+function cellXml(cell: Cell, address: string, style: number): string {
   if (isBlank(cell)) return "";
-  if (typeof cell === "number") return `<c r="${address}"><v>${cell}</v></c>`;
-  if (typeof cell === "boolean") return `<c r="${address}" t="b"><v>${cell ? 1 : 0}</v></c>`;
+  const place = `<c r="${address}"${style === 0 ? "" : ` s="${style}"`}`;
+  if (typeof cell === "number") return `${place}><v>${cell}</v></c>`;
+  if (typeof cell === "boolean") return `${place} t="b"><v>${cell ? 1 : 0}</v></c>`;
   const text = isCellError(cell) ? cell.code : cell;
-  const style = heading
-    ? STYLE.heading
-    : /^[=+\-@\t\r]/.test(text)
-      ? STYLE.quoted
-      : text.length > 60
-        ? STYLE.wrapped
-        : STYLE.plain;
-  return `<c r="${address}" t="inlineStr"${style ? ` s="${style}"` : ""}><is><t xml:space="preserve">${escapeXml(text.slice(0, 32_000))}</t></is></c>`;
+  return `${place} t="inlineStr"><is><t xml:space="preserve">${escapeXml(text.slice(0, 32_000))}</t></is></c>`;
 }
 
 /** For text and attributes; characters that XML can't hold are left out. */

@@ -49,6 +49,21 @@ export class ZipArchive {
     return true;
   }
 
+  /** A part as a whole; undefined where there is none. */
+  whole(name: string): Uint8Array | undefined {
+    const entry = this.#entries.get(name);
+    if (!entry) return undefined;
+    const pieces: Uint8Array[] = [];
+    this.unpack(name, (piece) => pieces.push(piece.slice()));
+    const bytes = new Uint8Array(entry.size);
+    let at = 0;
+    for (const piece of pieces) {
+      bytes.set(piece, at);
+      at += piece.length;
+    }
+    return bytes;
+  }
+
   #checkSize(name: string, { packedSize }: ZipEntry, size: number, what: string): void {
     const most = Math.min(MOST_BYTES_OF_A_PART, MOST_BYTES_IN_ALL - this.#unpacked);
     const shown = `${(size / 2 ** 20).toFixed(0)} MB`;

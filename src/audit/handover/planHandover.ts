@@ -1,0 +1,86 @@
+import { tokenize } from "@borgar/fx/xlsx";
+import type { Cell } from "../../sheet/cell";
+import type { Workbook } from "../../sheet/workbook";
+import { compareStored } from "../compareStored";
+import { evaluate } from "../evaluate";
+import type { OwnCall } from "../evaluation";
+import { storedFormula, typedFormula } from "../formulaText";
+import { mayCallOurs } from "../functionName";
+import type { Judgement } from "../judgement";
+import { nativeCall } from "./nativeCall";
+import { needsNewHost, storedSpelling } from "./storedSpelling";
+
+/** What becomes of one cell in a copy that is to work without the add-in. */
+export interface Replacement {
+  readonly judgement: Judgement;
+  readonly becomes: "formula" | "value" | "as it was";
+  /** The formula of the host, in the spelling of files and as it is typed. */
+  readonly stored?: string;
+  readonly typed?: string;
+  /** The value to put in where the file holds none. */
+  readonly value?: Cell;
+  readonly note: string;
+}
+
+const MOST_CALLS_IN_A_CELL = 20;
+const LONGEST_FORMULA = 8_192;
+
+/** Decides for every judged cell: the host's own functions where they give the same value, else its value, else nothing. */
+export function planHandover(judgements: readonly Judgement[], workbook: Workbook): Replacement[] {
+  return judgements.map((judgement) => {
+    const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook);
+    const differs = judgement.verdict === "differs" ? ` Mind: ${judgement.why}` : "";
+    if (formula !== undefined) {
+      const asks = needsNewHost(formula) ? ", of 2021 or later," : "";
+      const held = heldNumber(formula, judgement.formula);
+      const follow = held
+        ? `, for as many scores as there are now: ${held} in it was worked out for their number when the copy was made.`
+        : " and follow the scores.";
+      const note = `The host's own functions${asks} give the same value${follow}${differs}`;
+      return { judgement, becomes: "formula", stored: formula, typed: typedFormula(`=${formula}`), note };
+    }
+    const note = `The host has no functions for it: the value stays as it was stored and follows nothing.${differs}`;
+    if (judgement.cell.calculated) return { judgement, becomes: "value", note };
+    const { recomputed } = judgement;
+    if (recomputed === undefined || Array.isArray(recomputed))
+      return { judgement, becomes: "as it was", note: `Left as it was. ${judgement.why}` };
+    const fresh = "The file held no value for it: this one was worked out when the copy was made, and follows nothing.";
+    return { judgement, becomes: "value", value: recomputed, note: fresh };
+  });
+}
+
+/** The cell's formula with every call of ours put in the host's words, innermost first; undefined where one can't be, or where the value would change. */
+function nativeFormula({ sheet, cell, recomputed }: Judgement, workbook: Workbook): string | undefined {
+  if (recomputed === undefined || Array.isArray(recomputed)) return undefined;
+  const { row, column } = cell;
+  const place = { workbook, sheet, row, column };
+  let text = storedFormula(cell);
+  for (let i = 0; i < MOST_CALLS_IN_A_CELL && mayCallOurs(text); i++) {
+    const calls: OwnCall[] = [];
+    evaluate(text, { ...place, single: !cell.array, calls });
+    // A call inside a name of the workbook stands in another text.
+    const innermost = calls.filter(({ source }) => source === text).sort((a, b) => length(a) - length(b))[0];
+    const native = innermost && nativeCall(innermost);
+    if (!native || !innermost.node.loc) return undefined;
+    const [from, to] = innermost.node.loc;
+    const alone = text.slice(0, from).replace(/[@=]/g, "") === "" && to === text.length;
+    text = alone ? `=${native}` : `${text.slice(0, from)}(${native})${text.slice(to)}`;
+  }
+  if (mayCallOurs(text)) return undefined;
+  const stored = storedSpelling(text);
+  if (stored.length > LONGEST_FORMULA) return undefined;
+  const answer = evaluate(stored, place);
+  if (!("value" in answer) || Array.isArray(answer.value)) return undefined;
+  return compareStored([[recomputed]], [[answer.value]], 1e-9).same ? stored.slice(1) : undefined;
+}
+
+/** A number with many digits that nobody typed: a factor that belongs to the count of the scores. */
+function heldNumber(formula: string, typed: string): string | undefined {
+  return tokenize(`=${formula}`).find(
+    ({ type, value }) => type === "number" && /\d\.\d{6,}/.test(value) && !typed.includes(value),
+  )?.value;
+}
+
+function length({ node }: OwnCall): number {
+  return node.loc ? node.loc[1] - node.loc[0] : Infinity;
+}
