@@ -27,12 +27,14 @@ function functionPage(entry, table) {
   const { name, topic, description, parameters, returns, examples, questions, cautions } = entry;
   const signature = (separator) =>
     `=WEIR.${name}(${parameters.map((one) => (one.optional ? `[${one.name}]` : one.name)).join(`${separator} `)})`;
+  const [lead, rest] = firstSentence(description);
   const siblings = table.filter((one) => one.topic === topic && one !== entry);
   return page(
     `WEIR.${name}`,
-    `<p class="topic"><a href="index.html#${topic}">${escape(TOPICS[topic] ?? topic)}</a></p>
+    `<p class="topic"><a href="index.html">Cell functions</a> · <a href="index.html#${topic}">${escape(TOPICS[topic] ?? topic)}</a></p>
 <h1>${breakable(`WEIR.${name}`)}</h1>
-<p class="lead">${escape(description)}</p>
+<p class="lead">${escape(lead)}</p>
+${rest ? `<p>${escape(rest)}</p>` : ""}
 ${list("Cautions", cautions, "caution")}
 <h2>How to write it</h2>
 <pre><code>${escape(signature(","))}</code></pre>
@@ -60,7 +62,7 @@ ${topics.map(([topic, title, entries]) => `<h2 id="${topic}">${escape(title)}</h
 }
 
 function indexRow(entry) {
-  return `<dt>${nameAnchor(entry)}</dt><dd>${escape(entry.description)}</dd>`;
+  return `<dt>${nameAnchor(entry)}</dt><dd>${escape(firstSentence(entry.description)[0])}</dd>`;
 }
 
 function nameLink(entry) {
@@ -85,7 +87,9 @@ function exampleText({ formula, value }) {
 function valueText(value) {
   if (!Array.isArray(value)) return `<p class="value">${escape(cellText(value))}</p>`;
   const cell = (one) => `<td${typeof one === "number" ? ' class="number"' : ""}>${escape(cellText(one))}</td>`;
-  return `<table>${value.map((row) => `<tr>${row.map(cell).join("")}</tr>`).join("")}</table>`;
+  const rows = value.map((row) => `<tr>${row.map(cell).join("")}</tr>`).join("");
+  // A wide table scrolls by itself, also with the keyboard; the page never does.
+  return `<div class="wide" tabindex="0" role="region" aria-label="The value"><table>${rows}</table></div>`;
 }
 
 function cellText(value) {
@@ -104,6 +108,12 @@ export function withSemicolons(formula) {
     .join("");
 }
 
+/** The first sentence of a description, and what follows it. */
+function firstSentence(text) {
+  const end = /[.](?= [A-Z])/.exec(text);
+  return end ? [text.slice(0, end.index + 1), text.slice(end.index + 2)] : [text, ""];
+}
+
 function list(title, sentences, kind = "") {
   if (sentences.length === 0) return "";
   const open = kind ? `<section class="${kind}">` : "<section>";
@@ -118,9 +128,9 @@ function page(title, body) {
 <meta name="viewport" content="width=device-width, initial-scale=1">
 <title>${escape(title)} – Weirmark</title>
 <link rel="stylesheet" href="help.css">
+<link rel="icon" href="../icons/icon-32.png">
 </head>
 <body>
-<nav><a href="index.html">Cell functions</a></nav>
 <main>
 ${body}
 </main>

@@ -31,7 +31,6 @@ body {
 a {
   color: var(--accent);
 }
-nav,
 .topic,
 .kind,
 .gives {
@@ -50,7 +49,7 @@ h2 {
   font-weight: 600;
 }
 .lead {
-  margin: 0;
+  margin: 0 0 0.75rem;
   font-size: 1.15rem;
 }
 .caution {
@@ -99,6 +98,9 @@ dd {
   margin: 0;
   font-weight: 600;
 }
+.wide {
+  overflow-x: auto;
+}
 table {
   border-collapse: collapse;
 }
@@ -116,7 +118,7 @@ td {
     --paper: #fff;
     --accent: #000;
   }
-  nav,
+  .topic,
   .names {
     display: none;
   }
