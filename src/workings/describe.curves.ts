@@ -32,10 +32,9 @@ export function GATED_CURVE(call: WorkingsCall): readonly Step[] {
     .add("mean of the scores", entries.average, `AVERAGE(${range})`)
     .add("its distance from the gate", entries.distance, `AVERAGE(${range})-${gate}`)
     .add("standard deviation of the scores, divisor n", entries.spread, `STDEV.P(${range})`);
-  // Where nothing lies below it the gate may stand farther off than a number can tell.
   if (below === 0) {
     const direct = `-(AVERAGE(${range})-${gate})/STDEV.P(${range})`;
-    if (Number.isFinite(gateScore)) steps.add("the gate in standard deviations from the mean", gateScore, direct);
+    steps.add("the gate in standard deviations from the mean", gateScore, direct);
   } else {
     steps
       .add("the gate in standard deviations from the mean", gateScore, "", COHEN)

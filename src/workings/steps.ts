@@ -21,6 +21,9 @@ const LONGEST_FORMULA = 8192;
 export function asStep(meaning: string, value: Cell, formula: string, source: string): Step {
   // A column that came without an address is written out in full: no sheet would take the formula.
   const fits = formula !== "" && formula.length < LONGEST_FORMULA;
+  // On the way to a good result a square or a sum may pass the largest number, and no sheet follows it there.
+  if (typeof value === "number" && !Number.isFinite(value))
+    return { meaning, value: "out of the range of numbers", formula: "", source };
   return { meaning, value, formula: fits ? `=${formula}` : "", source };
 }
 

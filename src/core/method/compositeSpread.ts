@@ -2,7 +2,6 @@ import { DomainError, requirePositive } from "../domain";
 import { choleskyFactor } from "../numeric/choleskyFactor";
 import { powerOfTwoBelow } from "../numeric/powerOfTwoBelow";
 import { ordinal } from "../ordinal";
-import { representable } from "./representable";
 import { requireWeights } from "./weightedScores";
 
 export interface CompositeSpread {
@@ -43,8 +42,7 @@ export function compositeSpread(weights: Float64Array, sds: Float64Array, correl
   }
   // Criteria that cancel one another out may leave a variance just below 0.
   const spread = unit * Math.sqrt(Math.max(0, square));
-  const variance = representable("sds", Math.max(...sds), spread * spread);
-  return { weightTotal: representable("weights", Math.max(...weights), total * scale), variance, spread };
+  return { weightTotal: total * scale, variance: spread * spread, spread };
 }
 
 function requireCorrelations(correlations: Float64Array, size: number): void {

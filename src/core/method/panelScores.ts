@@ -1,3 +1,4 @@
+import { representable } from "./representable";
 import { requireLinkedRatings } from "./requireLinkedRatings";
 import { solvePanel, type Side } from "./solvePanel";
 
@@ -19,17 +20,19 @@ export interface PanelScores {
  *            same added to all, is filled in, and Cholesky solves them.
  * Accuracy   1e-13 relative on well linked panels, 1e-11 where 300 raters hang together by single entries; test/core/method/panelScores.test.ts.
  * Reference  Searle (1971), Linear Models, ch. 7: the two-way crossed classification without interaction.
- * @throws {DomainError} if ratings fall into groups without a link.
+ * @throws {DomainError} if ratings fall into groups without a link, or are too large to be added up.
  */
 export function panelScores(ratings: Float64Array, raters: number): PanelScores {
   const entries = ratings.length / raters;
   requireLinkedRatings(ratings, raters);
   let ratingCount = 0;
   let total = 0;
+  let largest = 0;
   for (const rating of ratings) {
     if (Number.isNaN(rating)) continue;
     ratingCount++;
     total += rating;
+    if (Math.abs(rating) > Math.abs(largest)) largest = rating;
   }
   const middle = total / ratingCount;
   const byRater: Side = { lines: raters, step: 1 };
@@ -41,11 +44,12 @@ export function panelScores(ratings: Float64Array, raters: number): PanelScores 
   const moreEffects = meansWithout(ratings, middle, fewerEffects, fewer, more);
   const [raterEffects, scores] = ratersAreFewer ? [fewerEffects, moreEffects] : [moreEffects, fewerEffects];
   const surplus = meanOf(raterEffects);
-  return {
-    ratingCount,
-    raterEffects: raterEffects.map((effect) => effect - surplus),
-    scores: scores.map((effect) => effect + surplus + middle),
-  };
+  for (let i = 0; i < scores.length; i++) scores[i] += surplus + middle;
+  // A sum past the largest number would leave NaN, which is shown as a blank.
+  ratings.forEach((rating, i) => {
+    if (!Number.isNaN(rating)) representable("ratings", largest, scores[Math.floor(i / raters)]);
+  });
+  return { ratingCount, raterEffects: raterEffects.map((effect) => effect - surplus), scores };
 }
 
 /** The effects of the longer side, given the shorter one's: means of what is left of the ratings. */

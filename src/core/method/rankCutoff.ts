@@ -2,6 +2,7 @@ import { requireCount, requireFraction } from "../domain";
 import { binomialCdf } from "../distribution/binomialCdf";
 import { binomialUpperTail } from "../distribution/binomialUpperTail";
 import { smallestInteger } from "../numeric/smallestInteger";
+import { between } from "../sample/sampleQuantile";
 import type { Sample } from "../sample/sample";
 import type { Better } from "./better";
 
@@ -45,7 +46,7 @@ export function rankCutoff(sample: Sample, fraction: number, confidence: number,
   const place = 1 + (count - 1) * fraction;
   const whole = Math.floor(place);
   const part = place - whole;
-  const cutoff = part > 0 ? best(whole) + part * (best(whole + 1) - best(whole)) : best(whole);
+  const cutoff = part > 0 ? between(best(whole), best(whole + 1), part) : best(whole);
 
   const alpha = (1 - confidence) / 2;
   // A chance that equals α on paper counts as met.

@@ -22,7 +22,13 @@ export function sdPrecision(count: number, confidence: number): { degrees: numbe
   const upperOnly = Math.sqrt(chiSquareUpperTailQuantile(1 - confidence, degrees) / degrees) - 1;
   if (upperOnly >= 1) return { degrees, precision: upperOnly };
   const excess = (precision: number) => {
-    const { covered, below, above } = spreadCoverage(count, (1 - precision) ** 2, (1 + precision) ** 2);
+    const { covered, below, above } = spreadCoverage(
+      count,
+      (1 - precision) ** 2,
+      (1 + precision) ** 2,
+      -precision,
+      precision,
+    );
     return confidence < 0.5 ? covered - confidence : 1 - confidence - (below + above);
   };
   return { degrees, precision: findRoot(excess, 0, 1) };

@@ -14,5 +14,11 @@ export function sampleQuantile({ sorted, count }: Sample, p: number): number {
   const below = Math.min(Math.floor(place), count - 1);
   const left = sorted[below]!;
   const right = sorted[Math.min(below + 1, count - 1)]!;
-  return left + (place - below) * (right - left);
+  return between(left, right, place - below);
+}
+
+/** The point a share of the way from one score to another, whose distance may be no number where both are. */
+export function between(from: number, to: number, share: number): number {
+  const distance = to - from;
+  return Number.isFinite(distance) ? from + share * distance : from * (1 - share) + to * share;
 }
