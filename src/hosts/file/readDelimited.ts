@@ -12,11 +12,12 @@ const MOST_COLUMNS = 16_384;
 /** Reads the bytes of a .csv or .tsv file into a workbook of one sheet. Separator and decimal sign are found by themselves. */
 export function readDelimited(bytes: Uint8Array, sheetName: string, given?: Separator): Workbook {
   const text = decodeText(bytes);
-  const separator = given ?? findSeparator(text);
-  const records = splitRecords(text.replace(/^sep=[\t;,]\r?\n?/i, ""), separator);
+  const body = text.replace(/^sep=[\t;,]\r?\n?/i, "");
+  let separator = given ?? findSeparator(text);
+  let records = splitRecords(body, separator);
+  if (separator === "," && isColumnOfDecimalCommas(records)) records = splitRecords(body, (separator = ";"));
   if (records.length > MOST_ROWS)
     throw new UnusableFile(`The file has ${records.length} rows; a sheet holds ${MOST_ROWS}.`);
-  refuseCommaMixUp(records, separator);
   const style = findNumberStyle(records, separator);
   const sheet = new Sheet(sheetName);
   records.forEach((record, row) => {
@@ -30,15 +31,11 @@ export function readDelimited(bytes: Uint8Array, sheetName: string, given?: Sepa
   return { sheets: [sheet], names: [], tables: [], date1904: false };
 }
 
-/** One heading over rows of two whole numbers is a column with decimal commas that was saved with commas between the fields. */
-function refuseCommaMixUp(records: readonly (readonly string[])[], separator: Separator): void {
+/** One heading over rows of two whole numbers: no program writes fewer headings than fields, so the commas are decimal ones. */
+function isColumnOfDecimalCommas(records: readonly (readonly string[])[]): boolean {
   const [heading, ...rows] = records.filter((record) => record.length > 1 || record[0] !== "");
-  if (separator !== "," || heading?.length !== 1 || !rows.some(({ length }) => length === 2)) return;
-  const whole = (field: string, sign: boolean) => (sign ? /^[+-]?\d+$/ : /^\d+$/).test(field.trim());
-  const split = (record: readonly string[]) =>
-    whole(record[0]!, true) && (record.length === 1 || whole(record[1]!, false));
-  if (rows.every((record) => record.length <= 2 && split(record)))
-    throw new UnusableFile(
-      "Commas stand between the fields and, it seems, inside the numbers (one heading, two numbers in a row): save the file with semicolons between the fields or with decimal points.",
-    );
+  if (heading?.length !== 1 || !rows.some(({ length }) => length === 2)) return false;
+  const whole = ([first = "", second = "0"]: readonly string[]) =>
+    /^[+-]?\d*$/.test(first.trim()) && /^\d+( ?%)?$/.test(second.trim());
+  return rows.every((record) => record.length <= 2 && whole(record));
 }
