@@ -12,11 +12,12 @@ h2 { font-size: 1.1rem; font-weight: 600; margin: 2rem 0 .5rem; color: var(--acc
 p { margin: 0 0 .4rem; }
 .by { color: var(--pale); }
 table { border-collapse: collapse; width: 100%; font-variant-numeric: tabular-nums; }
-th, td { text-align: left; vertical-align: top; padding: .35rem .7rem .35rem 0; border-bottom: 1px solid var(--line); overflow-wrap: anywhere; }
+th, td { text-align: left; vertical-align: top; padding: .35rem .7rem .35rem 0; border-bottom: 1px solid var(--line); overflow-wrap: break-word; }
 th { font-weight: 600; border-bottom: 2px solid var(--accent); }
+th, td.short { white-space: nowrap; }
 td.number { text-align: right; }
-td.formula { font-family: ui-monospace, monospace; font-size: .87em; }
-td.differs { font-weight: 600; }
+td.formula { font-family: ui-monospace, monospace; font-size: .87em; overflow-wrap: anywhere; min-width: 16rem; }
+.differs { font-weight: 600; }
 @media print { body { margin: 0; max-width: none; } tr { break-inside: avoid; } }
 `;
 
@@ -45,8 +46,15 @@ function table(headings: readonly string[], rows: readonly (readonly Cell[])[]):
   return `<table><thead><tr>${head}</tr></thead><tbody>\n${body}\n</tbody></table>`;
 }
 
+/** Columns whose words are never broken. */
+const SHORT: readonly string[] = ["sheet", "cell", "verdict", "what"];
+
 function field(cell: Cell, heading: string): string {
-  const kind =
-    typeof cell === "number" ? "number" : heading === "formula" ? "formula" : cell === "differs" ? "differs" : "";
-  return `<td${kind ? ` class="${kind}"` : ""}>${escapeXml(plainCell(cell))}</td>`;
+  const classes = [
+    typeof cell === "number" && "number",
+    heading === "formula" && "formula",
+    SHORT.includes(heading) && "short",
+    heading === "verdict" && cell === "differs" && "differs",
+  ].filter(Boolean);
+  return `<td${classes.length > 0 ? ` class="${classes.join(" ")}"` : ""}>${escapeXml(plainCell(cell))}</td>`;
 }
