@@ -1,5 +1,7 @@
 import { groupPassRates } from "../core/method/groupPassRates";
 import { MOST_PEOPLE, passRateRatio } from "../core/method/passRateRatio";
+import { DomainError } from "../core/domain";
+import { MOST_ROWS } from "../sheet/invoke";
 import { readCount, readFraction } from "../sheet/readArgument";
 import { readGroups } from "../sheet/readGroups";
 import { headedTable, labelTable, requireItem } from "../sheet/tables";
@@ -87,6 +89,10 @@ export function PASS_RATE_RATIO(
  */
 export function GROUP_PASS_RATES(groups: any[][], passed: any[][]): any[][] {
   const found = readGroups(groups, passed);
+  if (found.length >= MOST_ROWS) {
+    const requirement = `at most ${MOST_ROWS - 1} different labels, one row each below the heading`;
+    throw new DomainError("groups", groups, requirement, `there are ${found.length}`);
+  }
   const rates = groupPassRates(found);
   return headedTable(
     [

@@ -1,6 +1,8 @@
+import { DomainError } from "../core/domain";
 import { searchBudget } from "../core/method/searchBudget";
 import { stageLoad, type StageWork } from "../core/method/stageLoad";
 import type { Cell } from "../sheet/cell";
+import { MOST_ROWS } from "../sheet/invoke";
 import { readCount, readFraction } from "../sheet/readArgument";
 import { readStages } from "../sheet/readStages";
 import { headedTable } from "../sheet/tables";
@@ -27,6 +29,10 @@ export function STAGE_LOAD(reach: any[][], costs: any[][], fraction: any, learn_
   const learning = readCount("learn_count", learn_count, 0, undefined, 0);
   const wanted = readCount("hits", hits, 1, undefined, 1);
   const given = readStages(reach, costs);
+  if (given.reach.length > MOST_ROWS - 2) {
+    const requirement = `at most ${MOST_ROWS - 2} stages, one row each beside the heading and the sums`;
+    throw new DomainError("reach", reach, requirement, `${given.reach.length} were given`);
+  }
   const { stages, all } = stageLoad(given.reach, given.costs, share, learning, wanted);
   const row = (name: Cell, work: StageWork) => [name, work.learning, work.searching, work.total, work.cost];
   return headedTable(

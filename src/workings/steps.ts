@@ -15,7 +15,7 @@ export interface Step {
 }
 
 /** What Excel takes as the length of a formula. */
-const LONGEST_FORMULA = 8192;
+export const LONGEST_FORMULA = 8192;
 
 /** One step; `formula` without the sign of equality in front. */
 export function asStep(meaning: string, value: Cell, formula: string, source: string): Step {

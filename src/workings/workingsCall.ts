@@ -1,7 +1,7 @@
 import { formatAddress, parseAddress } from "../sheet/address";
 import { isBlank, isCellError, type Cell, type Range } from "../sheet/cell";
 import type { Argument } from "../sheet/invoke";
-import type { Step } from "./steps";
+import { LONGEST_FORMULA, type Step } from "./steps";
 
 /**
  * One call to be worked through: its arguments by name, each as value and as text. The text is what stands for it in a native formula:
@@ -101,10 +101,20 @@ function operandText(typed: string): string {
 
 /** A value as a literal of a formula: 0.05, "low", TRUE, {1,2;3,4}. Blank cells of a range are "". */
 export function literalText(value: Argument): string {
-  if (Array.isArray(value)) return `{${(value as Range).map((row) => row.map(literalText).join(",")).join(";")}}`;
+  if (Array.isArray(value)) return arrayText(value as Range);
   const cell = value as Cell;
   if (isCellError(cell)) return cell.code;
   if (isBlank(cell)) return '""';
   if (typeof cell === "string") return `"${cell.replace(/"/g, '""')}"`;
   return typeof cell === "boolean" ? String(cell).toUpperCase() : String(cell);
+}
+
+/** An array as a literal, row by row until it is too long for any formula to hold: a full column would not fit a text. */
+function arrayText(range: Range): string {
+  let text = "";
+  for (const row of range) {
+    text += `${text && ";"}${row.map(literalText).join(",")}`;
+    if (text.length >= LONGEST_FORMULA) break;
+  }
+  return `{${text}}`;
 }

@@ -20,27 +20,33 @@ const FINEST = 20_000;
  * @throws {DomainError} naming costs.
  */
 export function costUnit(costs: readonly number[]): CostUnit {
-  const largest = Math.max(...costs);
-  const paid = costs.filter((cost) => cost > 0);
-  const smallest = Math.min(...paid);
-  if (!(smallest * FINEST >= largest)) refuse(smallest, largest);
+  const paid = [...new Set(costs)].filter((cost) => cost > 0);
+  const largest = paid.reduce((a, b) => Math.max(a, b), 0);
+  const smallest = paid.reduce((a, b) => Math.min(a, b), largest);
+  // More different costs than there are multiples share no unit: no need to look for one.
+  if (paid.length > FINEST) refuse(largest, `${paid.length} different costs were given`);
+  if (!(smallest * FINEST >= largest)) refuse(smallest, unitText(smallest, largest));
   const decimals = paid.map(decimal);
-  const shift = Math.min(...decimals.map((one) => one.exponent));
+  const shift = decimals.reduce((least, one) => Math.min(least, one.exponent), Infinity);
   const whole = decimals.map(({ digits, exponent }) => digits * 10n ** BigInt(exponent - shift));
   const unit = whole.reduce(greatestCommonDivisor);
   const most = whole.reduce((a, b) => (a > b ? a : b));
   const power = 10 ** Math.abs(shift);
   const numerator = shift < 0 ? Number(unit) : Number(unit) * power;
   const denominator = shift < 0 ? power : 1;
-  if (most > unit * BigInt(FINEST)) refuse(numerator / denominator, largest);
-  let next = 0;
-  const multiples = costs.map((cost) => (cost > 0 ? Number(whole[next++] / unit) : 0));
+  if (most > unit * BigInt(FINEST)) refuse(numerator / denominator, unitText(numerator / denominator, largest));
+  const multipleOf = new Map(paid.map((cost, i) => [cost, Number(whole[i] / unit)]));
+  const multiples = costs.map((cost) => multipleOf.get(cost) ?? 0);
   return { multiples, numerator, denominator };
 }
 
-function refuse(unit: number, largest: number): never {
+function unitText(unit: number, largest: number): string {
+  return `their unit is ${unit} and the largest ${largest}`;
+}
+
+function refuse(unit: number, came: string): never {
   const requirement = `multiples of one common unit of at least a ${FINEST.toLocaleString("en")}th of the largest (round them)`;
-  throw new DomainError("costs", unit, requirement, `their unit is ${unit} and the largest ${largest}`);
+  throw new DomainError("costs", unit, requirement, came);
 }
 
 /** 15.5 → 155 · 10⁻¹, with as few digits as show it. */

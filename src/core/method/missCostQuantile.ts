@@ -4,7 +4,7 @@ import type { MissCost } from "./missCosts";
 import { chanceSlack } from "./reachesChance";
 
 /** Products that the recursion may take: about a tenth of a second. */
-const MOST_WORK = 20_000_000;
+export const MOST_WORK = 20_000_000;
 const STRIDE = 500;
 
 export interface MissCostQuantile {
@@ -21,7 +21,7 @@ export interface MissCostQuantile {
  * Method     The misses are negative binomial in number, so their total g is a compound distribution: s·g(s) = Σ qⱼ(s + (hits − 1)Cⱼ)
  *            g(s − Cⱼ), all terms positive. fraction^hits would underflow: it is carried as a power of two. For one hit g becomes a power
  *            of the root of Σ qⱼ e^{λCⱼ} = 1: e^{λs}g(s) is an average of the span before it, so once a whole span agrees it stays so, and
- *            the rest of the way is one logarithm.
+ *            the rest of the way is one logarithm. A chance within 1e-9 of 1 is met by what lies beyond, counted back from the end.
  * Accuracy   the exact unit, chances within 1e-12; test/core/method/searchBudget.test.ts.
  * Reference  Panjer (1981), Recursive evaluation of a family of compound distributions, ASTIN Bulletin 12.
  *
@@ -49,7 +49,7 @@ export function missCostQuantile(
 type Paying = Pick<MissCost, "units" | "share">;
 
 function quantile(paying: readonly Paying[], fraction: number, chance: number, hits: number): MissCostQuantile {
-  const span = Math.max(...paying.map((kind) => kind.units));
+  const span = paying.reduce((most, kind) => Math.max(most, kind.units), 0);
   // A miss that pays nothing only lengthens the search: left out, and the others scaled up.
   const paid = paying.reduce((sum, kind) => sum + kind.share, fraction);
   const units = Int32Array.from(paying, (kind) => kind.units);
@@ -57,6 +57,7 @@ function quantile(paying: readonly Paying[], fraction: number, chance: number, h
   const bends = shares.map((share, j) => share * (hits - 1) * units[j]);
   const rate = hits === 1 ? tailRate(units, shares, fraction / paid) : 0;
   const target = chance - chanceSlack(chance);
+  const late: number[] | undefined = target > 1 - 1e-9 ? [] : undefined;
   const mask = 2 ** Math.ceil(Math.log2(span + 1)) - 1;
   const steps = Math.floor(MOST_WORK / paying.length);
   if (span > steps || (hits > 1 && outOfReach(steps, units, shares, fraction / paid, hits, target))) refuse(fraction);
@@ -70,11 +71,16 @@ function quantile(paying: readonly Paying[], fraction: number, chance: number, h
   let factor = 2 ** exponent;
   let check = rate > 0 ? 2 * span : Infinity;
   for (let s = 0; ;) {
-    if (sum * factor >= target) return { units: s, reached: Math.min(1, sum * factor) };
+    if (late && sum * factor > 1 - 1e-8) {
+      late.push(ring[s & mask] * factor);
+      const end = late.length % span === 0 ? countedBack(late, span, 1 - target) : undefined;
+      if (end) return { units: s - end.back, reached: end.reached };
+    } else if (!late && sum * factor >= target) return { units: s, reached: Math.min(1, sum * factor) };
     if (s === check && (check += span) && settled(ring, mask, s, span, rate)) {
       const tail = ring[s & mask] / Math.expm1(rate);
-      const more = Math.max(0, Math.ceil(Math.log(tail / (1 - target)) / rate));
-      return { units: s + more, reached: 1 - tail * Math.exp(-rate * more) };
+      const more = Math.ceil(Math.log(tail / (1 - target)) / rate);
+      // Not above 0 only where the end is counted back.
+      if (more > 0) return { units: s + more, reached: 1 - tail * Math.exp(-rate * more) };
     }
     if (++s > steps) refuse(fraction);
     const each = 1 / s;
@@ -100,7 +106,7 @@ function tailRate(units: Int32Array, shares: Float64Array, rest: number): number
   const excess = (rate: number) => shares.reduce((sum, share, j) => sum + share * Math.expm1(rate * units[j]), -rest);
   const bounds = shares.map((share, j) => Math.log1p(rest / share) / units[j]);
   // Where one kind of miss is all there is, its bound is the root but for the rounding.
-  return findRoot(excess, 0, Math.min(...bounds) * (1 + 1e-11));
+  return findRoot(excess, 0, bounds.reduce((a, b) => Math.min(a, b), Infinity) * (1 + 1e-11));
 }
 
 /** Whether Chernoff's bound e^{θs}(p/(1 − Σ qⱼe^{−θCⱼ}))^hits says that no s within `steps` can reach the target: known before the work. */
@@ -117,6 +123,24 @@ function outOfReach(
     if (tilt * steps + hits * Math.log(rest / thinned) < Math.log(target)) return true;
   }
   return false;
+}
+
+/**
+ * How far before the last of the totals the chance of more is at most `miss`, once so little is left that it can be judged from the last
+ * two spans: next to 1 the sum of the chances shows its own rounding, the sum of what is beyond keeps its digits.
+ */
+function countedBack(
+  late: readonly number[],
+  span: number,
+  miss: number,
+): { back: number; reached: number } | undefined {
+  const sumOf = (from: number, to: number) => late.slice(from, to).reduce((sum, g) => sum + g, 0);
+  const [before, last] = [sumOf(-2 * span, -span), sumOf(-span, late.length)];
+  let tail = last > 0 ? (last * last) / (before - last) : 0;
+  if (late.length < 2 * span || last > before || !(tail <= 1e-4 * miss)) return undefined;
+  let back = 0;
+  while (tail + late[late.length - 1 - back] <= miss) tail += late[late.length - 1 - back++];
+  return { back, reached: 1 - tail };
 }
 
 /** Whether e^{λs}·g(s) is the same over the last span. */

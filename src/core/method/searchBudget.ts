@@ -1,9 +1,9 @@
-import { requireCount, requireFraction } from "../domain";
+import { DomainError, requireCount, requireFraction } from "../domain";
 import { costUnit } from "./costUnit";
-import { missCostQuantile } from "./missCostQuantile";
+import { missCostQuantile, MOST_WORK } from "./missCostQuantile";
 import { missCosts, type MissCost } from "./missCosts";
 import { representable } from "./representable";
-import { requireStages } from "./stages";
+import { largestOf, requireStages } from "./stages";
 
 export interface SearchBudget {
   /** The common unit of the costs: numerator / denominator, 0 where nothing costs anything. */
@@ -17,6 +17,9 @@ export interface SearchBudget {
   /** The chance that the search comes within the budget. */
   readonly chance: number;
 }
+
+/** Each such stage makes a kind of miss of its own, and as many units are more than the recursion may take. */
+const MOST_PAYING = Math.floor(Math.sqrt(MOST_WORK));
 
 /**
  * The smallest total cost that covers the search until the last of the hits with the chance asked for.
@@ -40,12 +43,20 @@ export function searchBudget(
   const stages = requireStages(reach, costs, fraction);
   requireFraction("chance", chance);
   requireCount("hits", hits, 1);
+  const paying = stages.filter(({ reach: here, cost }, i) => cost > 0 && here > (reach[i + 1] ?? fraction)).length;
+  if (paying > MOST_PAYING)
+    throw new DomainError(
+      "reach",
+      paying,
+      `falling at ${MOST_PAYING} stages that cost anything at most`,
+      `it falls at ${paying}`,
+    );
   if (costs.every((cost) => cost === 0))
     return { unit: 0, misses: [], hitUnits: 0, missUnits: 0, budget: 0, chance: 1 };
   const { multiples, numerator, denominator } = costUnit(costs);
   const hitUnits = hits * multiples.reduce((sum, units) => sum + units, 0);
   const misses = missCosts(stages, multiples, fraction);
   const { units, reached } = missCostQuantile(misses, fraction, chance, hits);
-  const budget = representable("costs", Math.max(...costs), ((hitUnits + units) * numerator) / denominator);
+  const budget = representable("costs", largestOf(costs), ((hitUnits + units) * numerator) / denominator);
   return { unit: numerator / denominator, misses, hitUnits, missUnits: units, budget, chance: reached };
 }

@@ -62,5 +62,7 @@ export function requireWithinReach(recent: Float64Array, mean: number, sd: numbe
   for (const score of recent) {
     if (!(Math.abs(score - mean) / sd <= MOST_DEVIATIONS))
       throw new DomainError("recent", score, `within ${MOST_DEVIATIONS} standard deviations of mean (${mean})`);
+    // Two of them may lie on either side of the mean.
+    representable("recent", score, 2 * (score - mean));
   }
 }

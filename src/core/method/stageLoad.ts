@@ -1,6 +1,6 @@
 import { requireCount } from "../domain";
 import { representable } from "./representable";
-import { requireStages } from "./stages";
+import { largestOf, requireStages } from "./stages";
 
 export interface StageWork {
   readonly learning: number;
@@ -45,6 +45,6 @@ export function stageLoad(
   const sum = (part: keyof StageWork) => stages.reduce((so, stage) => so + stage[part], 0);
   const all = { learning: sum("learning"), searching: sum("searching"), total: sum("total"), cost: sum("cost") };
   representable("fraction", fraction, all.total);
-  representable("costs", Math.max(...costs), all.cost);
+  representable("costs", largestOf(costs), all.cost);
   return { looks: hits / fraction, stages, all };
 }

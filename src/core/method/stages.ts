@@ -33,3 +33,8 @@ export function requireStages(reach: readonly number[], costs: readonly number[]
     throw new DomainError("fraction", fraction, `at most the reach of the last stage, ${last}`);
   return reach.map((here, index) => ({ reach: here, cost: costs[index] }));
 }
+
+/** The largest of many numbers: a full column as arguments of Math.max would overflow the stack. */
+export function largestOf(numbers: readonly number[]): number {
+  return numbers.reduce((most, number) => Math.max(most, number), -Infinity);
+}
