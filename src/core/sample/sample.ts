@@ -19,9 +19,10 @@ export class Sample {
     this.count = values.length;
   }
 
-  /** The sample carried through a rising function; its order is carried along. */
+  /** The sample carried through a rising function, in rising order. */
   mapped(rising: (value: number) => number): Sample {
-    return new Sample(this.values.map(rising), () => this.sorted.map(rising));
+    const sorted = this.sorted.map(rising);
+    return new Sample(sorted, () => sorted);
   }
 
   /** The values in rising order. */
