@@ -30,9 +30,7 @@ export function andersonDarling(sample: Sample): AndersonDarling {
 }
 
 function compute({ sorted, count, mean, sd }: Sample): AndersonDarling {
-  let sum = 0;
-  let lost = 0;
-  for (let i = 0; i < count; i++) {
+  const termAt = (i: number) => {
     const z = (sorted[i]! - mean) / sd;
     const half = (z * z) / 2;
     const scaled = erfcx(Math.abs(z) * Math.SQRT1_2) / 2;
@@ -40,7 +38,13 @@ function compute({ sorted, count, mean, sd }: Sample): AndersonDarling {
     const logLarge = Math.log1p(-scaled * Math.exp(-half));
     const below = 2 * i + 1;
     const above = 2 * (count - i) - 1;
-    const term = z < 0 ? below * logSmall + above * logLarge : below * logLarge + above * logSmall;
+    return z < 0 ? below * logSmall + above * logLarge : below * logLarge + above * logSmall;
+  };
+  let sum = 0;
+  let lost = 0;
+  // From both ends, so that the mirror image has the same bits.
+  for (let i = 0, j = count - 1; i <= j; i++, j--) {
+    const term = i < j ? termAt(i) + termAt(j) : termAt(i);
     // The sum is near −n², A² what is left of it beside n²: uncompensated, 100,000 scores would leave 8 digits.
     const next = sum + term;
     lost += sum - next + term;

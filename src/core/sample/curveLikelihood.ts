@@ -1,4 +1,4 @@
-import { compensatedSum } from "../numeric/compensatedSum";
+import { symmetricSum } from "../numeric/symmetricSum";
 import type { Curve } from "./curve";
 import type { Sample } from "./sample";
 
@@ -39,9 +39,9 @@ function logJacobianOf({ sorted }: Sample, { shape, power = 0 }: Curve): number 
   if (shape.kind === "normal") return 0;
   if (shape.kind === "logit") {
     const { low, high } = shape;
-    return compensatedSum(sorted, (x) => logOfShares(x - low, high - x, high - low));
+    return symmetricSum(sorted, (x) => logOfShares(x - low, high - x, high - low));
   }
-  return (power - 1) * compensatedSum(sorted, Math.log);
+  return (power - 1) * symmetricSum(sorted, Math.log);
 }
 
 /** ln(whole/(below·above)), also where the quotient itself is no number. */

@@ -1,4 +1,4 @@
-import { compensatedSum } from "../numeric/compensatedSum";
+import { symmetricSum } from "../numeric/symmetricSum";
 import type { Sample } from "./sample";
 
 export interface Moments {
@@ -21,8 +21,8 @@ export interface Moments {
 export function moments({ sorted, count, mean, sd }: Sample): Moments {
   const n = count;
   const squared = (x: number) => ((x - mean) / sd) * ((x - mean) / sd);
-  const cubes = () => compensatedSum(sorted, (x) => squared(x) * ((x - mean) / sd));
-  const fourths = () => compensatedSum(sorted, (x) => squared(x) * squared(x));
+  const cubes = () => symmetricSum(sorted, (x) => squared(x) * ((x - mean) / sd));
+  const fourths = () => symmetricSum(sorted, (x) => squared(x) * squared(x));
   return {
     skewness: n < 3 ? undefined : (n / ((n - 1) * (n - 2))) * cubes(),
     excessKurtosis:

@@ -1,9 +1,10 @@
-import { compensatedSum } from "../numeric/compensatedSum";
+import { symmetricSum } from "../numeric/symmetricSum";
 
 /**
  * The numbers that were scored, in the order in which they came, with what is derived from them worked out once, when first asked for.
  *
- * Sums go through the sorted values, so that sorting a sheet changes no bit of any result.
+ * Sums go through the sorted values, so that sorting a sheet changes no bit of any result, and from both
+ * ends, so that scores where lower is better give the mirror image to the bit.
  */
 export class Sample {
   readonly count: number;
@@ -41,10 +42,8 @@ export class Sample {
   /** The mean, corrected by the mean of the residuals: exact to the last digits also where the values share many leading digits. */
   get mean(): number {
     if (this.meanKept === undefined) {
-      const first = compensatedSum(this.sorted) / this.count;
-      this.meanKept = Number.isFinite(first)
-        ? first + compensatedSum(this.sorted, (x) => x - first) / this.count
-        : first;
+      const first = symmetricSum(this.sorted) / this.count;
+      this.meanKept = Number.isFinite(first) ? first + symmetricSum(this.sorted, (x) => x - first) / this.count : first;
     }
     return this.meanKept;
   }
@@ -52,7 +51,7 @@ export class Sample {
   /** Sum of squared deviations from the mean. */
   get sumOfSquares(): number {
     const { mean } = this;
-    return (this.sumOfSquaresKept ??= compensatedSum(this.sorted, (x) => (x - mean) * (x - mean)));
+    return (this.sumOfSquaresKept ??= symmetricSum(this.sorted, (x) => (x - mean) * (x - mean)));
   }
 
   /** The sample standard deviation, divisor n − 1. */
