@@ -1,4 +1,4 @@
-import { DomainError, requireCount, requireFraction } from "../domain";
+import { DomainError, requireFraction } from "../domain";
 import { noncentralTCdf } from "../distribution/noncentralTCdf";
 import { noncentralTUpperTail } from "../distribution/noncentralTUpperTail";
 import { normalPdf } from "../distribution/normalPdf";
@@ -6,6 +6,7 @@ import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile
 import { studentTUpperTail } from "../distribution/studentTUpperTail";
 import { gaussLegendre } from "../numeric/gaussLegendre";
 import { markFactor, type MarkMethod } from "./markFactor";
+import { requireScored } from "./requireScored";
 
 export interface CutoffErrorRates {
   /** The true mark, z(1 − fraction), and the factor k of the estimated mark x̄ + k·s. */
@@ -42,7 +43,7 @@ export function cutoffErrorRates(
   method: MarkMethod = "plain",
   confidence = 0.95,
 ): CutoffErrorRates {
-  requireCount("count", count, 2);
+  requireScored(count);
   requireFraction("fraction", fraction);
   requireFraction("confidence", confidence);
   if (!(fraction >= LEAST)) throw new DomainError("fraction", fraction, `at least ${LEAST}`);

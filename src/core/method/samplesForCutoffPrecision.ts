@@ -2,7 +2,7 @@ import { DomainError, requireFraction } from "../domain";
 import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile";
 import { markAbove, markBelow } from "./passingFractionLimits";
 import { reachesChance } from "./reachesChance";
-import { requireReachable } from "./requireReachable";
+import { MOST_SCORES, requireReachable } from "./requireReachable";
 
 export interface CutoffSamples {
   readonly count: number;
@@ -67,8 +67,8 @@ function firstCount(missAt: Miss, holds: (miss: number) => boolean, confidence: 
   for (let count = 2; count <= EVERY_COUNT; count++) if (holds(missAt(count))) return count;
   let [before, here] = [EVERY_COUNT - 1, EVERY_COUNT];
   let [missBefore, missHere] = [missAt(before), missAt(here)];
-  while (here < Number.MAX_SAFE_INTEGER) {
-    const next = Math.min(Math.ceil(here * GRID), Number.MAX_SAFE_INTEGER);
+  while (here < MOST_SCORES) {
+    const next = Math.min(Math.ceil(here * GRID), MOST_SCORES);
     const missNext = missAt(next);
     if (missHere <= missBefore && missHere <= missNext && missHere - (1 - confidence) < 0.01) {
       const peak = climb(missAt, before, next);

@@ -5,7 +5,7 @@ import { normalUpperTailQuantile } from "../distribution/normalUpperTailQuantile
 import { studentTUpperTailQuantile } from "../distribution/studentTUpperTailQuantile";
 import { smallestInteger } from "../numeric/smallestInteger";
 import { reachesChance } from "./reachesChance";
-import { requireReachable } from "./requireReachable";
+import { MOST_SCORES, requireReachable } from "./requireReachable";
 
 export interface MeanSamples {
   readonly count: number;
@@ -63,7 +63,7 @@ export function samplesForMeanPrecision(
         () => assuredMiss(count, halfWidthAt(count) / halfWidth),
       );
   }
-  const count = requireReachable("half_width", halfWidth, smallestInteger(holds, sdKnown ? 1 : 2));
+  const count = requireReachable("half_width", halfWidth, smallestInteger(holds, sdKnown ? 1 : 2, MOST_SCORES));
   const expectedHalfWidth = halfWidthAt(count);
   return {
     count,

@@ -1,7 +1,7 @@
 import { requireFraction } from "../domain";
 import { smallestInteger } from "../numeric/smallestInteger";
 import { reachesChance } from "./reachesChance";
-import { requireReachable } from "./requireReachable";
+import { MOST_SCORES, requireReachable } from "./requireReachable";
 import { spreadCoverage, type SpreadCoverage } from "./spreadCoverage";
 
 export interface SpreadSamples extends SpreadCoverage {
@@ -27,25 +27,28 @@ export interface SpreadSamples extends SpreadCoverage {
 export function samplesForSdPrecision(precision: number, confidence: number): SpreadSamples {
   requireFraction("precision", precision);
   requireFraction("confidence", confidence);
-  return spreadSamples(precision, confidence, (1 - precision) ** 2, (1 + precision) ** 2);
+  return spreadSamples(precision, confidence, [(1 - precision) ** 2, (1 + precision) ** 2, -precision, precision]);
 }
 
 /** The same for the variance: P(|s²/σ² − 1| ≤ precision) ≥ confidence. */
 export function samplesForVariancePrecision(precision: number, confidence: number): SpreadSamples {
   requireFraction("precision", precision);
   requireFraction("confidence", confidence);
-  return spreadSamples(precision, confidence, 1 - precision, 1 + precision);
+  const [low, high] = [-precision / (1 + Math.sqrt(1 - precision)), precision / (1 + Math.sqrt(1 + precision))];
+  return spreadSamples(precision, confidence, [1 - precision, 1 + precision, low, high]);
 }
 
-function spreadSamples(precision: number, confidence: number, lowRatio: number, highRatio: number): SpreadSamples {
+type Ends = readonly [lowRatio: number, highRatio: number, low: number, high: number];
+
+function spreadSamples(precision: number, confidence: number, ends: Ends): SpreadSamples {
   const holds = (count: number) => {
-    const { covered, below, above } = spreadCoverage(count, lowRatio, highRatio);
+    const { covered, below, above } = spreadCoverage(count, ...ends);
     return reachesChance(
       confidence,
       () => covered,
       () => below + above,
     );
   };
-  const count = requireReachable("precision", precision, smallestInteger(holds, 2));
-  return { count, lowRatio, highRatio, ...spreadCoverage(count, lowRatio, highRatio) };
+  const count = requireReachable("precision", precision, smallestInteger(holds, 2, MOST_SCORES));
+  return { count, lowRatio: ends[0], highRatio: ends[1], ...spreadCoverage(count, ...ends) };
 }
