@@ -16,10 +16,11 @@ export interface Scores {
 export function readScores(argument: string, range: Range, least = 2, spread: "needed" | "any" = "needed"): Scores {
   const { values, blanks } = numberCells(argument, range);
   if (values.length < least) {
-    const have = values.length === 0 ? "none yet" : `only ${values.length} so far`;
+    const { length } = values;
+    const have = length === 0 ? "there are none yet" : `there ${length === 1 ? "is" : "are"} only ${length} so far`;
     throw new NoAnswerError(
       argument,
-      `${argument} needs at least ${least} numbers, and there are ${have}: score more entries or take a longer range.`,
+      `${argument} needs at least ${least} numbers, and ${have}: score more entries or take a longer range.`,
     );
   }
   const sample = sampleOf(values);

@@ -139,6 +139,6 @@ function greatestCommonDivisor(a: number, b: number): number {
 }
 
 function refuse(fraction: number): never {
-  const requirement = `large enough for a search within ${MOST_WORK / 1e6} million units of cost (or the costs rounded to a coarser unit)`;
+  const requirement = `large enough, and hits few enough, for a search within ${MOST_WORK / 1e6} million units of cost (or the costs rounded to a coarser unit)`;
   throw new DomainError("fraction", fraction, requirement);
 }

@@ -27,7 +27,7 @@ export function ratersNeeded(singleReliability: number, target: number): RatersN
   if (!(raters <= Number.MAX_SAFE_INTEGER))
     throw new NoAnswerError(
       "target",
-      `target ${target} is out of reach: it would take some ${exact.toPrecision(3)} raters.`,
+      `target ${target} is out of reach at a single_reliability of ${singleReliability}: it takes more than ${Number.MAX_SAFE_INTEGER} raters.`,
     );
   return { exact, raters };
 }
