@@ -162,6 +162,7 @@ describe("calls that once went wrong", () => {
     ["SEARCH_BUDGET", 0.999999999999999, 1, 21.87, 0.003],
     ["SEARCH_BUDGET", 7e-18, column(1, 1), column(53, 27), 0.69],
     ["SEARCH_BUDGET", 0.32, column(1, 1), column(96, 46), 1 - 2 ** -53, 124],
+    ["SEARCH_BUDGET", 0.4086695046238777, column(1, 0.4236845667473972), column(22, 99), 0.9999999999999865, 14942],
     [
       "COMPOSITE_SPREAD",
       [[1, 1]],

@@ -50,7 +50,8 @@ export class MissTotals {
     while (this.at < end && !(this.sum >= target)) {
       const factor = 2 ** this.exponent;
       this.recur(end, this.exponent < 0 ? Math.min(2 ** STRIDE, target / factor) : target);
-      if (this.exponent < 0 && this.scaledSum > 2 ** STRIDE) this.rescale();
+      // At the ceiling itself too: a sum that comes to 1 there would else be asked for ever.
+      if (this.exponent < 0 && this.scaledSum >= 2 ** STRIDE) this.rescale();
     }
   }
 
