@@ -7,6 +7,8 @@ import { chanceSlack } from "./reachesChance";
 /** Products that the recursion may take: about a tenth of a second. */
 export const MOST_WORK = 20_000_000;
 const SHORTEST_BLOCK = 1000;
+/** Shares next to the smallest numbers have no digits to search in, and no budget would be a number. */
+const LEAST_REST = 1e-290;
 
 type Paying = Pick<MissCost, "units" | "share">;
 
@@ -55,13 +57,14 @@ function quantile(paying: readonly Paying[], fraction: number, chance: number, h
   const kinds = paying.map(({ units, share }) => ({ units, share: share / paid }));
   const span = kinds.reduce((most, kind) => Math.max(most, kind.units), 0);
   const target = chance - chanceSlack(chance);
-  const steps = Math.floor(MOST_WORK / kinds.length);
-  if (span > steps || (hits > 1 && outOfReach(steps, kinds, rest, hits, target))) refuse(fraction);
+  // Next to 1 the sum of the chances shows its own rounding: there the end is counted back, which is work too.
+  const late: number[] | undefined = target > 1 - 1e-9 ? [] : undefined;
+  const steps = Math.floor(MOST_WORK / (kinds.length + (late ? 1 : 0)));
+  if (!(rest > LEAST_REST) || span > steps || (hits > 1 && outOfReach(steps, kinds, rest, hits, target)))
+    refuse(fraction);
 
   const block = Math.max(span, SHORTEST_BLOCK);
   const totals = new MissTotals(kinds, block, rest, hits);
-  // Next to 1 the sum of the chances shows its own rounding: there the end is counted back.
-  const late: number[] | undefined = target > 1 - 1e-9 ? [] : undefined;
   const rate = hits === 1 ? tailRate(kinds, rest) : 0;
   while (totals.at < steps) {
     const from = totals.at;
