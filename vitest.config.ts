@@ -7,6 +7,7 @@ export default defineConfig({
     testTimeout: 60_000,
     hookTimeout: 120_000,
     pool: "threads",
+    setupFiles: ["test/support/seed.ts"],
     projects: [
       {
         extends: true,

@@ -85,8 +85,14 @@ class MakeExecutable {
   }
 }
 
-/** Topics whose functions Excel loads when a cell first asks for one: those of src/functions/later.ts. */
-const LATER_TOPICS = ["stopping", "risk", "combine", "watch", "simulate"];
+/** Names of the functions that Excel loads when a cell first asks for one: those in the files that src/functions/later.ts imports. */
+function laterNames() {
+  const imported = readFileSync(at("src/functions/later.ts"), "utf8").matchAll(/from "\.\/([\w.]+)"/g);
+  const names = [...imported].flatMap(([, file]) => [
+    ...readFileSync(at(`src/functions/${file}.ts`), "utf8").matchAll(/@customfunction (\w+)/g),
+  ]);
+  return new Set(names.map(([, name]) => name));
+}
 
 /** Names out of the table of functions, as code: the functions bundle needs no more of the table. */
 function functionNames(chosen) {
@@ -106,7 +112,7 @@ function addIn(mode, hostFiles) {
     plugins: [
       new DefinePlugin({
         SPILLING_FUNCTIONS: functionNames(({ result }) => result === "matrix"),
-        LATER_FUNCTIONS: functionNames(({ topic }) => LATER_TOPICS.includes(topic)),
+        LATER_FUNCTIONS: functionNames(({ name }) => laterNames().has(name)),
       }),
       new GeneratedFiles(at(TABLE), () => hostFiles(origin)),
       new MiniCssExtractPlugin({ filename: "[name].css", chunkFilename: "pane/[name].[contenthash:8].css" }),

@@ -8,11 +8,9 @@ import * as describeChecks from "./describe.checks";
 import * as describeCurves from "./describe.curves";
 import * as plan from "./plan";
 import * as search from "./search";
-import * as searchPool from "./search.pool";
-import * as searchStages from "./search.stages";
 
 /**
- * The functions of the main job (plan, describe, cutoff, search) and RELEASE and BLANK_CHECK: what the host loads before the first formula
+ * The functions of the main job (plan, describe, cutoff, most of search) and RELEASE and BLANK_CHECK: what the host loads before the first formula
  * can calculate. The others come in when a cell first asks for one (later.ts, audit.workings.ts).
  */
 export const immediate: Readonly<Record<string, CellFunction>> = {
@@ -24,7 +22,5 @@ export const immediate: Readonly<Record<string, CellFunction>> = {
   ...cutoffLimits,
   ...cutoffReport,
   ...search,
-  ...searchPool,
-  ...searchStages,
   ...audit,
 };

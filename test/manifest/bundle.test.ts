@@ -16,7 +16,8 @@ describe("the functions bundle", () => {
 
   test("holds no pane, no engine of the trial sheet, no second library of statistics", () => {
     const text = bundle.toString("utf8");
-    for (const stranger of ["univer", "jStat", "mountPane", "d3-"]) expect(text.includes(stranger), stranger).toBe(false);
+    for (const stranger of ["univer", "jStat", "mountPane", "d3-"])
+      expect(text.includes(stranger), stranger).toBe(false);
   });
 
   test("associates every function of the table when it is evaluated, with only the host's registry in reach", () => {
@@ -29,6 +30,7 @@ describe("the functions bundle", () => {
     };
     new Function(...Object.keys(scope), bundle.toString("utf8"))(...Object.values(scope));
     const table = JSON.parse(readFileSync(join(dist, "functions.json"), "utf8")) as { functions: { id: string }[] };
+    expect(new Set(associated).size).toBe(associated.length);
     expect(associated.sort()).toEqual(table.functions.map(({ id }) => id).sort());
   });
 

@@ -4,7 +4,7 @@ import { betaFactor, betaLambda } from "../special/betaFactor";
 /**
  * P(X = k) for X ~ Binomial(n, p).
  *
- * Domain     k whole; n whole ≥ 0; p in [0, 1].
+ * Domain     k whole; n whole ≥ 0 (tested to 1e9); p in [0, 1].
  * Edges      k outside 0 … n gives 0; p = 0 and p = 1 put everything on k = 0 and k = n.
  * Method     Loader's saddle-point form; a product of log-gammas loses log₁₀ n digits.
  * Accuracy   1e-13 relative down to 1e-100; test/core/distribution/binomial.test.ts.

@@ -5,7 +5,7 @@ import { betaTails } from "../special/betaTails";
 /**
  * P(X ≥ k) for X ~ Binomial(n, p), k itself included.
  *
- * Domain     k whole; n whole ≥ 0; p in [0, 1].
+ * Domain     k whole; n whole ≥ 0 (tested to 1e9); p in [0, 1].
  * Edges      k ≤ 0 gives 1, k > n gives 0.
  * Method     The incomplete beta function I_p(k, n − k + 1); a sum of chances takes too long for large n.
  * Accuracy   1e-13 relative down to 1e-100; test/core/distribution/binomial.test.ts.

@@ -31,7 +31,7 @@ export function findPositiveRoot(start: number, rising: boolean, at: (x: number)
     if (value < 0 === rising) low = x;
     else high = x;
     // A tail among the denormal numbers moves in steps, and no step of Newton's is ever small.
-    if (high <= low * (1 + 4e-16)) return x;
+    if (low > 0 && high <= low * (1 + 4e-16)) return x;
     const newton = -value / slope;
     const bend = 1 + (0.5 * newton * curvature) / slope;
     const step = newton / Math.min(Math.max(bend, 0.5), 2);

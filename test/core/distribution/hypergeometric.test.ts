@@ -95,6 +95,13 @@ describe("the hypergeometric distribution", () => {
     ]);
   });
 
+  test("the largest pool allowed is answered at once, its tails add up to 1", () => {
+    const [pool, half] = [1e9, 5e8];
+    const k = half / 2 - 30_000;
+    expect(hypergeometricCdf(k, pool, half, half) + hypergeometricUpperTail(k + 1, pool, half, half)).toBe(1);
+    expect(hypergeometricCdf(half / 2, pool, half, half)).toBeGreaterThan(0.5);
+  });
+
   test("jstat 1.9.6, a different program, agrees within its own error", () => {
     for (const [k, pool, good, drawn] of [
       [2, 50, 10, 12],
@@ -113,6 +120,7 @@ describe("the hypergeometric distribution", () => {
       ["pool", 1, -1, 0, 0],
       ["pool", 1, NaN, 4, 3],
       ["pool", 1, Infinity, 4, 3],
+      ["pool", 1, 2e12 + 1, 4, 3],
       ["good", 1, 10, 11, 3],
       ["good", 1, 10, -1, 3],
       ["good", 1, 10, NaN, 3],

@@ -68,7 +68,7 @@ describe("betaTails", () => {
       [0.5, 0, 1],
       [0.5, 1, NaN],
       [0.5, Infinity, 1],
-    ] as const)
+    ] as [number, number, number][])
       expect(betaI(...args)).toBeNaN();
     expect([betaI(0, 2, 3), betaI(1, 2, 3)]).toEqual([0, 1]);
   });
