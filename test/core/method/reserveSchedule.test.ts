@@ -24,7 +24,13 @@ describe("reserveSchedule", () => {
     },
   );
 
-  test("by hand: two looks bring 1/√π·√½ = φ(0) standard deviations, three and more rise as the best of n would, but slower", () => {
+  test("the expected results of Guttman 1960 for 1 to 6 normal offers (values from memory)", () => {
+    [0, 0.3989, 0.6297, 0.7904, 0.9127, 1.0108].forEach((printed, index) =>
+      expect(Math.abs(reserveSchedule(0, 1, index + 1)[0]!.expectedResult - printed)).toBeLessThan(6e-5),
+    );
+  });
+
+  test("by hand: two looks bring 1/√π·√½ = φ(0) standard deviations; three bring less than the best of three", () => {
     const worth = (looks: number) => reserveSchedule(0, 1, looks)[0]!.expectedResult;
     expect(worth(1)).toBe(0);
     expect(worth(2)).toBeCloseTo(1 / Math.sqrt(2 * Math.PI), 15);
