@@ -3,6 +3,7 @@ import { applicantsSheet } from "./book/applicants";
 import { bidsSheet, SCORES } from "./book/bids";
 import { criteriaSheet } from "./book/criteria";
 import { marksSheet, planSheet, riskSheet, searchSheet } from "./book/groups";
+import { ratersSheet } from "./book/raters";
 import { proofSheet, watchSheet } from "./book/watch";
 
 /** The invented workbook of the trial sheet: two lists to try the pane on, then one area for each group of functions. */
@@ -16,6 +17,7 @@ export const exampleBook: Book = {
     searchSheet,
     riskSheet,
     criteriaSheet,
+    ratersSheet,
     watchSheet,
     proofSheet,
   ],

@@ -7,22 +7,23 @@ import { figure, table, type TableCell } from "../dom/table";
 import { pictureFigure } from "../picture/pictureFigure";
 import { fitPicture } from "./fitPicture";
 import { morePicture } from "./morePicture";
+import { outlierWords } from "./outlierWords";
 
 /** Two closer looks, each on request: whether the shape fits, and what more scores would buy. */
 export function closerLook(context: PaneContext): HTMLElement {
   const { texts, answer } = context;
   const fitFigure = pictureFigure(context);
-  const ranking = element("div");
+  const below = element("div");
   const fit = lazyFold(
     texts.fitHeading,
     () => {
       const current = answer.get();
       if (!current?.report) return;
       fitFigure.show(fitPicture(current, context));
-      fill(ranking, ...rankingWords(context));
+      fill(below, ...outlierWords(context).map((sentence) => element("p", {}, sentence)), ...rankingWords(context));
     },
     fitFigure.root,
-    ranking,
+    below,
   );
   const moreFigure = pictureFigure(context);
   const more = lazyFold(

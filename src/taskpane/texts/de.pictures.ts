@@ -14,6 +14,11 @@ export const dePictures: Translated<typeof enPictures> = {
   fitTableScore: "Wert",
   fitTableLow: "Band von",
   fitTableHigh: "Band bis",
+  outliersNone: "Kein Wert fällt aus dieser Form heraus (verallgemeinerter ESD-Test, 5 %).",
+  outliers: (count, places) =>
+    `${count === "1" ? "Ein Wert fällt" : `${count} Werte fallen`} aus dieser Form heraus: ${places} (verallgemeinerter ESD-Test, 5 %).`,
+  outliersAdvice:
+    "Zuerst klären, wie ein solcher Wert zustande kam: Er kann ein Tippfehler sein, die falsche Form anzeigen oder der beste Eintrag von allen sein. Bei weniger als 25 Werten ist der Test grob.",
   ranking: "Formen, die beste zuerst",
   rankingShape: "Form",
   rankingDifference: "AICc-Abstand",

@@ -12,6 +12,11 @@ export const enPictures = {
   fitTableScore: "Score",
   fitTableLow: "Band from",
   fitTableHigh: "Band to",
+  outliersNone: "No score stands out from this shape (generalised ESD test, 5%).",
+  outliers: (count: string, places: string) =>
+    `${count === "1" ? "One score stands" : `${count} scores stand`} out from this shape: ${places} (generalised ESD test, 5%).`,
+  outliersAdvice:
+    "See how such a score came about before anything else: it may be a slip of the keyboard, the wrong shape, or the best entry of all. With fewer than 25 scores the test is rough.",
   ranking: "Shapes, best first",
   rankingShape: "Shape",
   rankingDifference: "AICc difference",

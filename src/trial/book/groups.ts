@@ -12,6 +12,11 @@ function sheet(name: string, title: string, columnWidths: readonly number[], blo
   };
 }
 
+/** How many of the prices are called outliers on the scale of a shape. */
+function outliers(shape: string): string {
+  return `=SUM(IF(WEIR.OUTLIER_FLAGS(${PRICES},,,"${shape}")=TRUE,1,0))`;
+}
+
 export const planSheet = sheet(
   "Plan",
   "How many to score first",
@@ -25,6 +30,10 @@ export const planSheet = sheet(
       ["until a mark for 10 % lets through between 5 % and 18 %", "=WEIR.SAMPLES_FOR_CUTOFF_PRECISION(10%,5%,18%)"],
     ]),
     ...answers(11, "What 65 scores buy", [["the spread is known to", "=WEIR.SD_PRECISION(65)", "0.0%"]]),
+    ...answers(15, "Prices that stand out", [
+      ["taken as normal: a long tail looks like mistakes", outliers("normal")],
+      ["taken as lognormal, as prices often are", outliers("lognormal")],
+    ]),
     ...table("D4", "A mark for 10 % from 65 scores", "=WEIR.CUTOFF_PRECISION(65,10%)", { values: ["0.0%", "0.0%"] }),
     ...table("D9", "The bids’ scores", `=WEIR.SCORE_SUMMARY(${SCORES})`, {
       values: ["0", "0", "0.00", "0.00", "0.00", "0.0", "0.0", "0.0", "0.0", "0.0", "0.000", "0.000"],
@@ -113,7 +122,7 @@ export const riskSheet = sheet(
       at: "A3",
       style: "caution",
       cells: [
-        ["Where a mark falls on people, these are figures for a talk with those who know the law, never the decision."],
+        ["Where a mark falls on people, these are figures to weigh with those who know the law, never the decision."],
       ],
     },
     ...answers(5, "A score is not the worth", [
