@@ -67,11 +67,16 @@ function prepareArguments(entry: FunctionEntry, given: readonly Argument[], blan
     const argument = given[index];
     if (isMissing(argument)) {
       if (!parameter.optional)
-        throw new DomainError(parameter.name, null, `given: ${parameter.description}`, "it was left out");
+        throw new DomainError(parameter.name, null, `given (${inPassing(parameter.description)})`, "it was left out");
       return null;
     }
     return parameter.dimensionality === "matrix" ? asMatrix(argument, blanks) : asScalar(parameter, argument, blanks);
   });
+}
+
+/** A sentence as a remark inside another one. */
+function inPassing(sentence: string): string {
+  return sentence.replace(/\.$/, "").replace(/^[A-Z](?=[a-z ])/, (letter) => letter.toLowerCase());
 }
 
 function isMissing(argument: Argument): argument is undefined {
