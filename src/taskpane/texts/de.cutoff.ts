@@ -40,7 +40,7 @@ export const deCutoff: Translated<typeof enCutoff> = {
   looksAhead: (half, most) =>
     `Rechnen Sie mit ${half} weiteren Einträgen, bis die Aussicht auf einen, der sie erreicht, gleich groß ist wie die auf keinen, und mit ${most} für eine Aussicht von 90 %.`,
   people:
-    "Geht es um Menschen, Kredite oder Ausschreibungen, ist diese Zahl keine Entscheidung. Sie kann Gruppen ungleich treffen; örtliches Recht und zugelassene Fachpraxis gehen vor.",
+    "Geht es um Menschen, Kredite oder Ausschreibungen, ist diese Zahl keine Entscheidung. Sie kann Gruppen ungleich treffen; örtliches Recht und anerkannte Fachpraxis gehen vor.",
 
   threeHeading: "Drei Schwellen, drei Zusagen",
   threeKind: "Schwelle",
