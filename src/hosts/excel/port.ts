@@ -2,6 +2,7 @@ import { formatAddress, formatSheetName, parseAddress } from "../../sheet/addres
 import { isCellError, type Cell } from "../../sheet/cell";
 import { pngOfSvg } from "../pngOfSvg";
 import type { Block, CallCell, Picture, Port, Separators } from "../port";
+import { followChanges } from "./followChanges";
 import { cellsForHost, cellsFromHost } from "./cells";
 
 /** Office.js reads at most 5 million cells at once; a score column is never that long. */
@@ -15,7 +16,7 @@ export async function excelPort(): Promise<Port> {
     kind: "excel",
     selection: () =>
       Excel.run(async (context) => readUsed(context, context.workbook.getSelectedRange())).catch(() => undefined),
-    onChange,
+    onChange: followChanges,
     read: (address) => Excel.run(async (context) => readAll(context, rangeAt(context, address))),
     write: (address, cells) =>
       Excel.run(async (context) => {
@@ -80,32 +81,6 @@ async function readAll(context: Excel.RequestContext, range: Excel.Range): Promi
   range.load("address,values,valueTypes");
   await context.sync();
   return { address: range.address, values: cellsFromHost(range.values, range.valueTypes) };
-}
-
-function onChange(listener: (what: "selection" | "cells") => void): () => void {
-  let stopped = false;
-  const handlers: OfficeExtension.EventHandlerResult<unknown>[] = [];
-  void Excel.run(async (context) => {
-    const { workbook } = context;
-    handlers.push(workbook.onSelectionChanged.add(async () => listener("selection")));
-    if (Office.context.requirements.isSetSupported("ExcelApi", "1.9"))
-      handlers.push(workbook.worksheets.onChanged.add(async () => listener("cells")));
-    await context.sync();
-    if (stopped) removeAll(handlers);
-  });
-  return () => {
-    stopped = true;
-    removeAll(handlers);
-  };
-}
-
-function removeAll(handlers: OfficeExtension.EventHandlerResult<unknown>[]): void {
-  for (const handler of handlers.splice(0)) {
-    void Excel.run(handler.context as Excel.RequestContext, async (context) => {
-      handler.remove();
-      await context.sync();
-    });
-  }
 }
 
 async function addSheet(context: Excel.RequestContext, name: string): Promise<string> {
