@@ -1,4 +1,4 @@
-import { escapeXml } from "../../hosts/file/writeXlsx";
+import { escapeXml } from "../../hosts/file/write/xmlText";
 import type { Cell } from "../../sheet/cell";
 import { plainCell } from "../plainText";
 import { CALL_HEADINGS, callRow, NOTICE_HEADINGS, noticeRow, type AuditReport } from "./auditReport";

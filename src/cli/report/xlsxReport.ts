@@ -1,9 +1,10 @@
+import { listSheet } from "../../hosts/file/write/listSheet";
 import { writeXlsx } from "../../hosts/file/writeXlsx";
 import { CALL_HEADINGS, callRow, NOTICE_HEADINGS, noticeRow, type AuditReport } from "./auditReport";
 
 /** The report as a workbook: a summary, the calls, and what else was noticed. */
 export function xlsxReport({ file, summary, audit, by }: AuditReport): Uint8Array {
-  return writeXlsx([
+  const sheets = [
     {
       name: "Summary",
       rows: [
@@ -19,5 +20,6 @@ export function xlsxReport({ file, summary, audit, by }: AuditReport): Uint8Arra
       widths: [14, 9, 50, 18, 18, 14, 90],
     },
     { name: "Notices", rows: [[...NOTICE_HEADINGS], ...audit.notices.map(noticeRow)], widths: [14, 9, 22, 110] },
-  ]);
+  ];
+  return writeXlsx({ sheets: sheets.map(listSheet) });
 }

@@ -1,6 +1,6 @@
 import { formatAddress } from "../../sheet/address";
 import { addContentType, addRelation, freePart, override, partText, type Parts } from "./writtenParts";
-import { escapeXml } from "./writeXlsx";
+import { escapeXml } from "./write/xmlText";
 import { readRelations } from "./xlsxParts";
 import { edited, walkXml, type Edit } from "./xmlEdits";
 import type { ZipArchive } from "./zipArchive";

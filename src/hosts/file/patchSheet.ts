@@ -2,7 +2,7 @@ import { formatAddress } from "../../sheet/address";
 import { isCellError, type Cell } from "../../sheet/cell";
 import { Sheet } from "../../sheet/workbook";
 import { cellReference } from "./cellReference";
-import { escapeXml } from "./writeXlsx";
+import { escapeXml } from "./write/xmlText";
 import { edited, walkXml, type Edit, type OpenTag } from "./xmlEdits";
 
 /** What is to become of one formula cell: another formula, or its value alone. */

@@ -2,7 +2,9 @@ import { strToU8, zipSync, type Zippable } from "fflate";
 import { addNotes } from "./addNotes";
 import { patchSheet, type CellPatch } from "./patchSheet";
 import { sheetParts } from "./readXlsx";
-import { escapeXml, sheetXml, type SheetToWrite } from "./writeXlsx";
+import { listSheet, type ListToWrite } from "./write/listSheet";
+import { sheetXml } from "./write/sheetXml";
+import { escapeXml } from "./write/xmlText";
 import { workbookPart } from "./xlsxParts";
 import { addContentType, addRelation, freePart, override, partText, relationsPart, type Parts } from "./writtenParts";
 import { edited, walkXml, type Edit } from "./xmlEdits";
@@ -13,7 +15,7 @@ export interface WorkbookPatch {
   readonly cells: ReadonlyMap<string, ReadonlyMap<number, CellPatch>>;
   readonly notes: ReadonlyMap<string, ReadonlyMap<number, string>>;
   /** A sheet to add behind the others, under its name or the next free one like it. */
-  readonly sheet: SheetToWrite;
+  readonly sheet: ListToWrite;
 }
 
 const OFFICE = "http://schemas.openxmlformats.org/officeDocument/2006/relationships";
@@ -42,7 +44,7 @@ export function patchXlsx(bytes: Uint8Array, patch: WorkbookPatch): Uint8Array {
   return zipSync(files);
 }
 
-function addSheet(archive: ZipArchive, parts: Parts, main: string, sheet: SheetToWrite): void {
+function addSheet(archive: ZipArchive, parts: Parts, main: string, sheet: ListToWrite): void {
   const folder = main.slice(0, main.lastIndexOf("/") + 1);
   const part = freePart(archive, parts, `${folder}worksheets/handover`, ".xml");
   const xml = partText(archive, parts, main)!;
@@ -65,7 +67,7 @@ function addSheet(archive: ZipArchive, parts: Parts, main: string, sheet: SheetT
   const id = addRelation(archive, parts, main, "worksheet", `/${part}`);
   const inside = `<${end!.text} xmlns:r="${OFFICE}" name="${escapeXml(name)}" sheetId="${highest + 1}" r:id="${id}"/>`;
   parts.set(main, edited(xml, [{ ...end!, text: inside }]));
-  parts.set(part, sheetXml(sheet, false));
+  parts.set(part, sheetXml(listSheet(sheet), { styles: undefined, dynamic: false }, false));
   addContentType(archive, parts, override(part, SHEET_TYPE));
 }
 
