@@ -34,7 +34,8 @@ export async function auditWorkbook(workbook: Workbook, { tolerance }: AuditOpti
   const doubts: Notice[] = [];
   for (const call of calls) {
     const judged = judgeCall(call, setting);
-    const heard = opinion && withOpinion(judged, opinion);
+    // Beside a value that nobody could judge it would pass for a verdict.
+    const heard = opinion && judged.verdict !== "not checkable" ? withOpinion(judged, opinion) : undefined;
     judgements.push(heard?.judgement ?? judged);
     doubts.push(...(heard?.doubts ?? []));
   }

@@ -36,9 +36,9 @@ export function explainDifference(compared: Comparison, stored: readonly (readon
   if (causes.blanksAsZero) sentences.push(blanksSentence(causes.calls));
   else if (causes.olderRevision !== undefined)
     sentences.push(
-      `The file was computed by revision ${causes.olderRevision} of the numbers; this is revision ${NUMBERS_REVISION}, and the change log says what changed.`,
+      `The file was computed by revision ${causes.olderRevision} of the numbers; this is revision ${NUMBERS_REVISION}. The change log says what changed; calculate the file anew to bring it up to date.`,
     );
-  else sentences.push(...roundedSentence(compared));
+  else sentences.push(usualSentence(compared));
   return sentences.join(" ");
 }
 
@@ -66,15 +66,15 @@ function blanksSentence(calls: readonly OwnCall[]): string {
     }
   }
   const places = blanks > 0 ? ` (${counted(blanks, "blank cell")} in ${[...where].slice(0, 3).join(", ")})` : "";
-  return `That is what comes out when blank cells are taken as 0${places}, as some builds of the host do: the blanks were counted as scores.`;
+  return `That is what comes out when blank cells are taken as 0${places}, as some builds of the host do: the blanks were counted as scores. BLANK_CHECK tells which builds; take the blanks out of the range, or calculate the file in another.`;
 }
 
-function roundedSentence({ stored, recomputed }: Comparison): string[] {
-  if (typeof stored !== "number" || typeof recomputed !== "number") return [];
-  for (let decimals = 0; decimals <= 8; decimals++)
-    if (Number(recomputed.toFixed(decimals)) === stored)
-      return [`It is that value rounded to ${counted(decimals, "decimal")}.`];
-  return ["Either the value was changed by hand, or an input was changed after it was last calculated."];
+function usualSentence({ stored, recomputed }: Comparison): string {
+  if (typeof stored === "number" && typeof recomputed === "number")
+    for (let decimals = 0; decimals <= 8; decimals++)
+      if (Number(recomputed.toFixed(decimals)) === stored)
+        return `It is that value rounded to ${counted(decimals, "decimal")}: the file may be set to calculate with the precision shown.`;
+  return "Either the value was changed by hand, or an input was changed after it was last calculated: calculate the file anew, and ask for the reason if it still differs.";
 }
 
 function withoutStop(message: string): string {

@@ -32,7 +32,7 @@ export function typedFormula(stored: string): string {
       const callee = readFunctionName(token.value);
       if (callee.kind === "ours") return { ...token, value: `WEIR.${callee.entry.name}` };
       if (callee.kind === "unknown") return { ...token, value: callee.shown };
-      return { ...token, value: token.value.replace(/^(_xlfn\.|_xlws\.)+/i, "") };
+      return { ...token, value: token.value.replace(/^(_xlfn\.|_xlws\.)+/i, "").toUpperCase() };
     }
     if (token.value.includes("_xlpm.")) return { ...token, value: token.value.replace(/_xlpm\./gi, "") };
     // `[2]!` before one of ours.
@@ -41,5 +41,9 @@ export function typedFormula(stored: string): string {
       (token.type === "context" && tokens[index + 1]?.value === "!") || tokens[index - 1]?.type === "context";
     return stray && behind?.type === "func" ? { ...token, value: "" } : token;
   });
-  return stringifyTokens(shown);
+  return stringifyTokens(shown).replace(SPILLED, "$1#").replace(ONE_OF, "@$1");
 }
+
+/** What files spell as functions and a sheet shows as signs behind or before an address: `E2#`, `@B2:B9`. */
+const SPILLED = /\bANCHORARRAY\(((?:'[^']*'!|[\w.]+!)?\$?[A-Z]{1,3}\$?\d+)\)/gi;
+const ONE_OF = /\bSINGLE\(((?:'[^']*'!|[\w.]+!)?[\w.$:]+)\)/gi;

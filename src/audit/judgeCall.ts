@@ -20,14 +20,19 @@ export interface JudgeSetting {
   readonly fileRevision: number | undefined;
 }
 
-/** What a host stores while a call is not there to be answered. */
-const NO_ANSWER: Readonly<Record<string, string>> = {
-  "#NAME?": "the file was saved by a program that didn't have the add-in at hand",
-  "#BUSY!": "the file was saved while the call was still being worked out",
-  "#GETTING_DATA": "the file was saved while the call was still being worked out",
-  "#CONNECT!": "the file was saved while the add-in could not be reached",
-  "#BLOCKED!": "the add-in was blocked where the file was saved",
-  "#SPILL!": "other cells stood where the result should spill, so that none was stored",
+const SAVE_ANEW = "Open the file where the add-in is loaded, let it calculate, and save it.";
+
+/** What a host stores while a call is not there to be answered, and what to do about it. */
+const NO_ANSWER: Readonly<Record<string, readonly [why: string, next: string]>> = {
+  "#NAME?": ["the file was saved by a program that didn't have the add-in at hand", SAVE_ANEW],
+  "#BUSY!": ["the file was saved while the call was still being worked out", SAVE_ANEW],
+  "#GETTING_DATA": ["the file was saved while the call was still being worked out", SAVE_ANEW],
+  "#CONNECT!": ["the file was saved while the add-in could not be reached", SAVE_ANEW],
+  "#BLOCKED!": ["the add-in was blocked where the file was saved", SAVE_ANEW],
+  "#SPILL!": [
+    "other cells stood where the result should spill",
+    "Clear the cells beside and below it, and save the file.",
+  ],
 };
 
 /** Judges one cell: its stored value against the one that comes out of the stored inputs. */
@@ -56,9 +61,11 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
   };
   const hindrance = cell.calculated
     ? whatHinders(answer, stored[0]![0], unknown)
-    : "the file holds no value for it: it was never calculated";
-  if (hindrance !== undefined || !("value" in answer))
-    return { ...judged, verdict: "not checkable", why: `Not checkable: ${hindrance}.` };
+    : (["the file holds no value for it, since it was never calculated", SAVE_ANEW] as const);
+  if (hindrance !== undefined || !("value" in answer)) {
+    const [reason, next] = hindrance ?? ["", ""];
+    return { ...judged, verdict: "not checkable", why: `Not checkable: ${reason}. ${next}` };
+  }
   const { value } = answer;
   const compared = comparedWith(stored, value, !array, setting);
   if (compared.same) return { ...judged, verdict: "agrees", why: explainAgreement(compared) };
@@ -83,14 +90,29 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
   return { ...judged, verdict: "differs", why };
 }
 
-function whatHinders(answer: Answer, stored: Cell, unknown: readonly string[]): string | undefined {
-  if (unknown.length > 0) return `this release has no function ${unknown.join(" and ")}`;
-  if ("unreadable" in answer) return `the formula can't be read (${answer.unreadable})`;
-  if ("notKnown" in answer) return answer.notKnown;
+/** The reason why a call can't be judged, and what to do next. */
+function whatHinders(
+  answer: Answer,
+  stored: Cell,
+  unknown: readonly string[],
+): readonly [reason: string, next: string] | undefined {
+  if (unknown.length > 0)
+    return [
+      `this release has no function ${unknown.join(" and ")}`,
+      "Audit with a newer release, or correct the name if it is misspelt.",
+    ];
+  if ("unreadable" in answer)
+    return [`the formula can't be read (${answer.unreadable})`, "Correct it in the sheet, and save the file."];
+  if ("notKnown" in answer)
+    return [
+      answer.notKnown,
+      "Check it by hand, or put that part into a cell of its own: the stored values of other cells are taken as they are.",
+    ];
   const code = isCellError(stored) ? stored.code.toUpperCase() : undefined;
   const recomputed = Array.isArray(answer.value) ? undefined : answer.value;
   if (code === undefined || (isCellError(recomputed) && recomputed.code === code)) return undefined;
-  return NO_ANSWER[code] && `it holds ${code}: ${NO_ANSWER[code]}`;
+  const known = NO_ANSWER[code];
+  return known && [`it holds ${code}, since ${known[0]}`, known[1]];
 }
 
 /** In an old-style cell only the first cell of a table is shown. */

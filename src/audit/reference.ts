@@ -48,7 +48,7 @@ function refuseUncalculated(sheet: Sheet, { top, left, bottom, right }: Area): v
     const { row, column } = sheet.formulas.get(key)!;
     if (row >= top && row <= bottom && column >= left && column <= right) {
       const cell = formatAddress({ sheet: sheet.name, top: row, left: column, bottom: row, right: column });
-      throw new NotKnown(`${cell} holds a formula without a stored value: open the file in its program and save it`);
+      throw new NotKnown(`${cell} holds a formula without a stored value`);
     }
   }
 }

@@ -68,6 +68,8 @@ describe("what a formula refers to", () => {
     ["=B3", 0],
     ["=B2:B4", [[70], [0], [80]]],
     ["=B4:B2", [[70], [0], [80]]],
+    ["=INDEX(B2:B5,{4;1})", [[90], [70]]],
+    ["=SUM(INDEX(A2:C5,{1;3},{2,3}))", 70 + 1 + 80 + 3],
     ["=SUM(B:B)", 240],
     ["=ROWS(B:B)", 1_048_576],
     ["=SUM(2:2)", 70 + 1 + 1 + 2],
@@ -246,6 +248,8 @@ describe("our functions, in every spelling that a file may hold", () => {
 describe("what can't be known is said to be so, never guessed", () => {
   test.each<[string, RegExp]>([
     ["=FROBNICATE(1)", /FROBNICATE is not known/],
+    ["=XLOOKUP(70,B2:B5,A2:A5,0,{0;1})", /hands an array to where one number is taken/],
+    ["=SUM(INDEX(A2:C5,{1;2},0))", /picks whole rows or columns by an array/],
     ["=IFERROR(FROBNICATE(1),2)", /FROBNICATE is not known/],
     ["=NOW()", /something else each time/],
     ["=OFFSET(A1,1,1)", /OFFSET is not known/],

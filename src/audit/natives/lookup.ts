@@ -23,7 +23,19 @@ export const lookup: NativeTable = {
   AREAS: { least: 1, most: 1, run: ([value]) => (value instanceof Reference ? value.places.length : 1) },
 };
 
-function index([source, rowArg, columnArg, areaArg]: readonly Value[], at: Evaluation): Value {
+/** With arrays for row or column it answers cell by cell. */
+function index([source, rowArg = null, columnArg = undefined, areaArg]: readonly Value[], at: Evaluation): Value {
+  const [rows, columns] = [rowArg, columnArg ?? null].map((arg) => at.cells(arg));
+  if (!isArray(rows!) && !isArray(columns!)) return indexOne([source!, rowArg, columnArg, areaArg], at);
+  return broadcast([rows!, columns!], ([row, column]) => {
+    const wanted = columnArg === undefined ? undefined : column!;
+    const found = at.cells(indexOne([source!, row!, wanted, areaArg], at) ?? null);
+    if (isArray(found)) throw new NotKnown("it picks whole rows or columns by an array");
+    return found;
+  });
+}
+
+function indexOne([source, rowArg, columnArg, areaArg]: readonly (Value | undefined)[], at: Evaluation): Value {
   const numbers = [rowArg, columnArg, areaArg].map((arg, i) => oneNumber(arg, at, i === 2 ? 1 : 0));
   const error = numbers.find(isCellError);
   if (error) return error;

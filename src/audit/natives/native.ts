@@ -107,5 +107,8 @@ export function ofNumbers(
 /** One number argument of a function that is not lifted. */
 export function oneNumber(arg: Value | undefined, at: Evaluation, fallback?: number): number | CellError {
   if (arg === undefined && fallback !== undefined) return fallback;
+  // The host answers once for each: to answer for the first alone would be another value.
+  if (isArray(arg ?? null) && isArray(at.cells(arg!)))
+    throw new NotKnown("it hands an array to where one number is taken");
   return toNumber(at.cell(arg ?? null));
 }

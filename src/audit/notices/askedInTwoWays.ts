@@ -18,7 +18,9 @@ interface Asked {
 export function askedInTwoWays(judgements: readonly Judgement[]): Notice[] {
   const asked = new Map<string, Asked>();
   for (const judgement of judgements) {
-    for (const { entry, values, given } of judgement.calls) {
+    for (const { entry, values, given, outcome } of judgement.calls) {
+      // A fraction of 1000% was refused: it judged nothing.
+      if ("error" in outcome) continue;
       const at = entry.parameters.findIndex(({ name }) => name === "scores");
       const place = at < 0 ? undefined : values[at];
       if (!(place instanceof Reference) || place.places.length !== 1) continue;
@@ -51,6 +53,6 @@ function noticeOf({ column, question, answers }: Asked): Notice {
   );
   const shown = all.length > 4 ? `${all.slice(0, 4).join(", ")} and ${all.length - 4} more` : all.join(", ");
   const [, second] = [...answers.values()];
-  const why = `The scores of ${column} are judged with ${answers.size} different values of ${question}: ${shown}.`;
+  const why = `The scores of ${column} are judged with ${answers.size} different values of ${question}: ${shown}. If one was meant, keep it in one cell that all of them refer to.`;
   return { sheet: second!.sheet.name, address: second!.address, kind: "asked in two ways", why };
 }

@@ -41,7 +41,7 @@ export function dataLeftOut(range: CallRange): Notice[] {
   if (above > 0)
     parts.push(`begins at row ${area.top + 1}, but ${goesOn(above)} above it, from row ${area.top + 1 - above}`);
   const also = others > 0 ? ` (${counted(others, "more cell")} take${others === 1 ? "s" : ""} the same range)` : "";
-  const why = `The range ${rangeAddress(range)} ${parts.join(", and ")}: left out, on purpose or by mistake${also}.`;
+  const why = `The range ${rangeAddress(range)} ${parts.join(", and ")}: left out, on purpose or by mistake${also}. Take them into the range if they are scores too.`;
   return [{ sheet: judgement.sheet.name, address: judgement.address, kind: "leaves data out", why }];
 }
 
@@ -89,7 +89,7 @@ export function rangesOutOfLine(judgement: Judgement): Notice[] {
         if (a.sheet !== b.sheet || rows < 2 || b.area.bottom - b.area.top !== rows || apart === 0 || apart > rows)
           continue;
         const [first, second] = [a, b].map(({ sheet, area }) => formatAddress({ sheet: sheet.name, ...area }));
-        const why = `${first} and ${second} are taken side by side, but stand ${counted(apart, "row")} apart: each value may meet the wrong partner.`;
+        const why = `${first} and ${second} are taken side by side, but stand ${counted(apart, "row")} apart: each value may meet the wrong partner. Let both begin in the same row.`;
         return [{ sheet: judgement.sheet.name, address: judgement.address, kind: "ranges out of line", why }];
       }
     }

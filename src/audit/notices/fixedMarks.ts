@@ -33,7 +33,7 @@ export function fixedMarks(workbook: Workbook, tolerance: number): Notice[] {
         sheet: sheet.name,
         address: formatAddress({ top: row, left: 0, bottom: row, right: 0 }),
         kind: "fixed mark moved",
-        why: `The fixed mark ${showCell(mark.mark)}${mark.date ? ` of ${mark.date}` : ""} no longer follows from its scores: ${fault.why}.${older}`,
+        why: `The fixed mark ${showCell(mark.mark)}${mark.date ? ` of ${mark.date}` : ""} no longer follows from its scores: ${fault.why}.${older} Find out which of the two was changed before anyone is judged by it.`,
         stored: mark.mark,
         recomputed: fault.recomputed,
       });

@@ -23,7 +23,7 @@ export function totalTakenIn(range: CallRange): Notice[] {
     const row = summary?.row ?? (last !== undefined && isTotal(sheet, column, area.top, last) ? last : undefined);
     if (row === undefined) continue;
     const cell = formatAddress({ top: row, left: column, bottom: row, right: column });
-    const why = `The range ${rangeAddress(range)} takes in ${cell} (${showCell(sheet.cell(row, column))}), which sums up the cells above it: it counts as one more score.`;
+    const why = `The range ${rangeAddress(range)} takes in ${cell} (${showCell(sheet.cell(row, column))}), which sums up the cells above it: it counts as one more score. Let the range end above it.`;
     return [{ sheet: judgement.sheet.name, address: judgement.address, kind: "takes in a total", why }];
   }
   return [];
@@ -70,7 +70,7 @@ export function hiddenRowsInside(range: CallRange): Notice[] {
   const filtered = sheet.filter && sheet.filter.top <= area.bottom && sheet.filter.bottom >= area.top;
   const how = filtered ? "hidden by a filter" : "hidden";
   const are = hidden === 1 ? "is" : "are";
-  const why = `${counted(hidden, "row")} of ${rangeAddress(range)} with numbers ${are} ${how}: ${hidden === 1 ? "it counts" : "they count"} all the same.`;
+  const why = `${counted(hidden, "row")} of ${rangeAddress(range)} with numbers ${are} ${how}: ${hidden === 1 ? "it counts" : "they count"} all the same. Show ${hidden === 1 ? "it" : "them"} and see whether ${hidden === 1 ? "it belongs" : "they belong"} to the scores.`;
   return [{ sheet: judgement.sheet.name, address: judgement.address, kind: "hidden rows", why }];
 }
 

@@ -100,6 +100,6 @@ function noticeOf(
   const { same } = compareStored([[stored]], [[recomputed]], tolerance);
   const neighbour = formatAddress({ top: like.row, left: like.column, bottom: like.row, right: like.column });
   const outcome = same ? `and it is what the formula would give` : `and the formula would give ${showCell(recomputed)}`;
-  const why = `The number ${showCell(stored)} is typed in where the cells beside it (${neighbour}) call a function; it will not follow the scores, ${outcome}.`;
+  const why = `The number ${showCell(stored)} is typed in where the cells beside it (${neighbour}) call a function; it will not follow the scores, ${outcome}. Fill the formula into it, or note beside it who typed it and why.`;
   return { sheet: sheet.name, kind: "typed over", why, stored, recomputed };
 }

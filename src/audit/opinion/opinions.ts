@@ -75,7 +75,7 @@ export const opinions: Readonly<Record<string, (question: Question) => Check | u
     if (!isNumber(count) || count > 10_000 || !(result < 1)) return undefined;
     const within = (r: number) => jStat.chisquare.cdf((count - 1) * r * r, count - 1);
     const theirs = within(1 + result) - within(1 - result);
-    return { theirs, ours: usual(confidence, 0.95), tolerance: 1e-8, what: "its confidence is" };
+    return { theirs, ours: usual(confidence, 0.95), tolerance: 1e-8, what: "the confidence that belongs to it is" };
   },
 };
 
@@ -98,7 +98,7 @@ function factor(jStat: JStat, k: number, n: number, fraction: Argument, confiden
   const ncp = jStat.normal.inv(1 - fraction, 0, 1) * Math.sqrt(n);
   if (!(n >= 3 && n <= 1000 && Math.abs(ncp) <= 20)) return undefined;
   const theirs = jStat.noncentralt.cdf(k * Math.sqrt(n), n - 1, ncp);
-  return { theirs, ours: usual(confidence, 0.95), tolerance: 1e-7, what: "its confidence is" };
+  return { theirs, ours: usual(confidence, 0.95), tolerance: 1e-7, what: "the confidence that belongs to it is" };
 }
 
 function curveOf(jStat: JStat, scores: Argument): { mean: number; sd: number; n: number } | undefined {

@@ -29,11 +29,12 @@ export async function loadSecondOpinion(): Promise<SecondOpinion> {
       const { theirs, ours, tolerance, what } = check;
       if (!Number.isFinite(theirs)) return undefined;
       const agrees = Math.abs(theirs - ours) <= tolerance;
-      const shown = Number(theirs.toPrecision(8));
-      if (agrees) return { agrees, sentence: `A second opinion by jStat agrees: ${what} ${shown}.` };
+      const heard = `Second opinion, by jStat: ${what} ${Number(theirs.toPrecision(8))}`;
+      const within = `within ${Number(tolerance.toPrecision(1))}`;
+      if (agrees) return { agrees, sentence: `${heard}, the same as worked out here (${within}).` };
       return {
         agrees,
-        sentence: `A second opinion by jStat does not agree: ${what} ${shown}, not ${Number(ours.toPrecision(8))}. Please report this call.`,
+        sentence: `${heard}, and ${Number(ours.toPrecision(8))} was worked out here: they should be the same ${within}. Rest nothing on this call, and report it.`,
       };
     },
   };

@@ -35,6 +35,7 @@ export function readXlsx(bytes: Uint8Array): Workbook {
   const context = {
     archive,
     strings: readSharedStrings(archive, partOf("sharedStrings")),
+    date1904,
     dynamicMarks: readDynamicMarks(archive, partOf("sheetMetadata")),
     cells: 0,
   };

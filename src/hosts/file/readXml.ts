@@ -35,7 +35,11 @@ export function readXml(archive: ZipArchive, part: string, listener: XmlListener
     depth--;
     listener.close?.(localName(name));
   });
-  if (listener.text) parser.on("text", (text) => listener.text!(text));
+  if (listener.text) {
+    parser.on("text", (text) => listener.text!(text));
+    // The same in another spelling: a formula left out would be a call that nobody judges.
+    parser.on("cdata", (text) => listener.text!(text));
+  }
   const found = archive.unpack(part, (piece) => {
     parser.write(decode(decoder, piece, part));
   });

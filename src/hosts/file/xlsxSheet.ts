@@ -12,6 +12,7 @@ const MOST_CELLS = 10_000_000;
 export interface SheetContext {
   readonly archive: ZipArchive;
   readonly strings: readonly string[];
+  readonly date1904: boolean;
   readonly dynamicMarks: ReadonlySet<number>;
   /** Cells read so far, in all sheets. */
   cells: number;
@@ -33,11 +34,12 @@ export function readSheet(context: SheetContext, part: string, sheet: Sheet): vo
   let formulaText = "";
   let value: string | undefined;
   let collecting: "formula" | "value" | undefined;
+  let inPhonetic = false;
 
   const place = () => {
     if (value === undefined && !formula) return;
     if (++context.cells > MOST_CELLS) throw new UnusableFile(`The file holds more than ${MOST_CELLS} cells.`);
-    const stored = value === undefined ? null : storedValue(value, cell["t"], context.strings);
+    const stored = value === undefined ? null : storedValue(value, cell["t"], context);
     if (stored !== null) sheet.set(row, column, stored);
     if (formula) placeFormula(formula, stored);
   };
@@ -82,8 +84,13 @@ export function readSheet(context: SheetContext, part: string, sheet: Sheet): vo
           formula = attributes;
           collecting = "formula";
           break;
+        case "rPh":
+          inPhonetic = true;
+          break;
         case "v":
         case "t":
+          // How a text is read aloud is no part of it.
+          if (inPhonetic) break;
           value ??= "";
           collecting = "value";
           break;
@@ -97,6 +104,7 @@ export function readSheet(context: SheetContext, part: string, sheet: Sheet): vo
     },
     close(name) {
       collecting = undefined;
+      if (name === "rPh") inPhonetic = false;
       if (name === "c") place();
     },
   });

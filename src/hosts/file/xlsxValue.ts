@@ -2,8 +2,14 @@ import type { Cell } from "../../sheet/cell";
 import { UnusableFile } from "./unusableFile";
 import { unescapeText } from "./xlsxStrings";
 
+export interface ValueContext {
+  /** The texts that the cells of all sheets share. */
+  readonly strings: readonly string[];
+  readonly date1904: boolean;
+}
+
 /** The value of a `<c>`, from its `<v>` and the letter of its kind (ECMA-376, ST_CellType). Null where there is none. */
-export function storedValue(text: string, kind: string | undefined, strings: readonly string[]): Cell {
+export function storedValue(text: string, kind: string | undefined, { strings, date1904 }: ValueContext): Cell {
   switch (kind) {
     case "s": {
       const shared = strings[Number(text)];
@@ -19,7 +25,7 @@ export function storedValue(text: string, kind: string | undefined, strings: rea
     case "e":
       return { code: text.trim() };
     case "d":
-      return dateSerial(text.trim());
+      return dateSerial(text.trim(), date1904);
     case undefined:
     case "n": {
       if (text.trim() === "") return null;
@@ -33,8 +39,11 @@ export function storedValue(text: string, kind: string | undefined, strings: rea
   }
 }
 
-/** An ISO date as the number of days that a cell counts in, from 1900. */
-function dateSerial(text: string): Cell {
+/** The same day counts so many fewer in the 1904 system. */
+const DAYS_TO_1904 = 1462;
+
+/** An ISO date as the number of days that the cells of the file count in. */
+function dateSerial(text: string, date1904: boolean): Cell {
   const time = Date.parse(/[Tt]/.test(text) ? text.replace(/Z?$/, "Z") : `${text}T00:00:00Z`);
-  return Number.isNaN(time) ? text : time / 86_400_000 + 25_569;
+  return Number.isNaN(time) ? text : time / 86_400_000 + 25_569 - (date1904 ? DAYS_TO_1904 : 0);
 }
