@@ -1,5 +1,7 @@
 import { parseA1Ref, parseStructRef, type ReferenceIdentifier } from "@borgar/fx/xlsx";
 import type { Area } from "../sheet/address";
+import { isCellError } from "../sheet/cell";
+import { tableArea } from "../sheet/tableArea";
 import { sheetNamed, type DefinedName, type Sheet, type Table } from "../sheet/workbook";
 import type { Evaluation } from "./evaluation";
 import { nearestName } from "../functions/nearestName";
@@ -129,27 +131,8 @@ function resolveTable(text: string, at: Evaluation): Value {
   return tablePart(table, reference.columns ?? [], reference.sections ?? [], at);
 }
 
-/** The rows of a table that the sections name (data where they name none), of the columns named (all where none is). */
 function tablePart(table: Table, columns: readonly string[], sections: readonly string[], at: Evaluation): Value {
-  const { area, headerRows, totalsRows } = table;
-  const indexes = columns.map((name) => table.columns.findIndex((one) => one.toLowerCase() === name.toLowerCase()));
-  const missing = columns[indexes.indexOf(-1)];
-  if (missing !== undefined) return errorCell("#REF!", `The table ${table.name} has no column “${missing}”.`);
-  const firstData = area.top + headerRows;
-  const lastData = area.bottom - totalsRows;
-  const has = (section: string) => sections.includes(section);
-  let [top, bottom] = [firstData, lastData];
-  if (has("this row")) top = bottom = at.setting.row;
-  else if (has("all")) [top, bottom] = [area.top, area.bottom];
-  else if (sections.length > 0) {
-    top = has("headers") ? area.top : has("data") ? firstData : lastData + 1;
-    bottom = has("totals") ? area.bottom : has("data") ? lastData : firstData - 1;
-  }
-  if (has("this row") && (top < firstData || bottom > lastData))
-    return errorCell("#VALUE!", `The formula stands beside no row of the table ${table.name}.`);
-  if (top > bottom) return errorCell("#REF!", `The table ${table.name} has no such rows.`);
-  const left = indexes.length > 0 ? Math.min(...indexes) : 0;
-  const right = indexes.length > 0 ? Math.max(...indexes) : area.right - area.left;
-  const sheet = sheetNamed(at.setting.workbook, table.sheet)!;
-  return new Reference([{ sheet, area: { top, left: area.left + left, bottom, right: area.left + right } }]);
+  const part = tableArea(table, columns, sections, at.setting.row);
+  if (isCellError(part)) return errorCell(part.code, part.message!);
+  return new Reference([{ sheet: sheetNamed(at.setting.workbook, table.sheet)!, area: part }]);
 }

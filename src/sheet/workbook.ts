@@ -45,6 +45,7 @@ export interface Workbook {
 }
 
 const COLUMNS = 16_384;
+const MOST_COLUMNS_IN_TURN = 256;
 const MOST_REMEMBERED_CELLS = 1_000_000;
 
 /** One sheet: the stored values by row, the formulas beside them, and what of it is hidden. */
@@ -91,6 +92,21 @@ export class Sheet {
 
   cell(row: number, column: number): Cell {
     return this.#rows[row]?.[column] ?? null;
+  }
+
+  /** Visits each cell that holds a value; a sheet with one cell in each corner is no more work than any with two cells. */
+  forEachCell(visit: (row: number, column: number, value: Cell) => void): void {
+    for (const [row, stored] of this.#rows.entries()) {
+      if (!stored) continue;
+      if (stored.length > MOST_COLUMNS_IN_TURN) {
+        for (const column of Object.keys(stored)) visit(row, Number(column), stored[Number(column)]!);
+        continue;
+      }
+      for (let column = 0; column < stored.length; column++) {
+        const value = stored[column];
+        if (value !== undefined) visit(row, column, value);
+      }
+    }
   }
 
   /** The stored values of an area, row by row, null for a blank. The same area gives the same array: it must not be changed. */

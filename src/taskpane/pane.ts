@@ -16,7 +16,8 @@ import { observable } from "./observable";
 import { searchPart } from "./search/searchPart";
 import { keptSearch } from "./search/searchQuestion";
 import type { Texts } from "./texts/en";
-import { languageFor, languages } from "./texts/languages";
+import { languageFor } from "./texts/languageFor";
+import { languages } from "./texts/languages";
 import { usePart } from "./use/usePart";
 import { watchPart } from "./watch/watchPart";
 import "./pane.css";
@@ -38,7 +39,7 @@ export function mountPane(root: HTMLElement, port: Port): void {
 async function open(root: HTMLElement, port: Port, inHand?: Column): Promise<void> {
   const kept = (key: string) => port.readSetting(key).catch(() => undefined);
   const [asked, searched, chosen] = await Promise.all([kept("cutoff"), kept("search"), kept("language")]);
-  const language = languageFor(chosen, navigator.languages);
+  const language = languageFor(chosen, navigator.languages, Object.keys(languages));
   const texts = languages[language]!;
   const context: PaneContext = {
     port,

@@ -1,4 +1,5 @@
 import type { Port } from "../hosts/port";
+import { frameTexts } from "./language";
 import { isCellError, type Cell } from "../sheet/cell";
 
 /** What stands in a cell, in words: of an error its reason, of a number all its digits. */
@@ -16,7 +17,7 @@ export function showSelectedCell(port: Port, line: HTMLElement): void {
     const rows = block?.values.length ?? 0;
     const columns = block?.values[0]?.length ?? 0;
     const alone = rows === 1 && columns === 1;
-    const text = !block ? "" : alone ? cellText(block.values[0]![0]) : `${rows} × ${columns} cells`;
+    const text = !block ? "" : alone ? cellText(block.values[0]![0]) : frameTexts().selectedCells(rows, columns);
     line.firstElementChild!.textContent = block?.address ?? "";
     line.lastElementChild!.textContent = text;
   };

@@ -1,9 +1,19 @@
 import "./trial.css";
+import { returnToBookBefore } from "../hosts/trial/keptBook";
 import { setUpFrame, showFailure } from "./frame";
+import { frameTexts, showFrameTexts } from "./language";
 import { openTrial } from "./openTrial";
+import { sayAfterReload, saySaid } from "./saidBefore";
 
+showFrameTexts();
 setUpFrame();
-openTrial().catch((failure: unknown) => {
+saySaid();
+openTrial().catch(async (failure: unknown) => {
   console.error(failure);
-  showFailure("The sheet can’t be opened. “Start over” discards what was kept of it in this browser.");
+  const file = document.getElementById("what")!.dataset["file"] ?? "";
+  // A file that was read and still can't be shown must not take the workbook before with it.
+  if (await returnToBookBefore()) {
+    sayAfterReload(frameTexts().cannotShow(file));
+    location.reload();
+  } else showFailure(frameTexts().cannotOpen);
 });

@@ -1,10 +1,13 @@
 import { Sheet, type DefinedName, type Table, type Workbook } from "../../sheet/workbook";
+import { countExtra, extraParts, type Extras } from "./notShown";
 import { readXml } from "./readXml";
+import { SheetLook, type CellStyle } from "./sheetLook";
 import { UnusableFile } from "./unusableFile";
 import { readDynamicMarks } from "./xlsxMetadata";
 import { readRelations, workbookPart } from "./xlsxParts";
 import { readSheet } from "./xlsxSheet";
 import { readSharedStrings } from "./xlsxStrings";
+import { readStyles } from "./xlsxStyles";
 import { readTable } from "./xlsxTable";
 import { ZipArchive } from "./zipArchive";
 
@@ -25,9 +28,35 @@ export function sheetParts(archive: ZipArchive, part: string): Map<string, strin
   return parts;
 }
 
+/** A workbook with how it looks: what an opened file is laid out from. */
+export interface OpenedXlsx {
+  readonly workbook: Workbook;
+  /** By the name of the sheet. */
+  readonly looks: ReadonlyMap<string, SheetLook>;
+  readonly styles: readonly CellStyle[];
+  /** What the file holds beside all that. */
+  readonly extras: Extras;
+  readonly archive: ZipArchive;
+}
+
 /** Reads the bytes of an .xlsx file (ECMA-376) into a workbook: stored values, formulas as stored, names, tables, what is hidden. */
 export function readXlsx(bytes: Uint8Array): Workbook {
+  return readArchive(new ZipArchive(bytes));
+}
+
+/** The same with number formats, widths and what stays in view, and a count of what is not read. */
+export function openXlsx(bytes: Uint8Array): OpenedXlsx {
   const archive = new ZipArchive(bytes);
+  const looks = new Map<string, SheetLook>();
+  const extras = extraParts(archive);
+  const workbook = readArchive(archive, looks, extras);
+  const styles = readRelations(archive, workbookPart(archive)).find(({ kind }) => kind === "styles")?.target;
+  const { cells, decorated } = readStyles(archive, styles);
+  if (decorated) countExtra(extras, "decoration");
+  return { workbook, looks, styles: cells, extras, archive };
+}
+
+function readArchive(archive: ZipArchive, looks?: Map<string, SheetLook>, extras?: Extras): Workbook {
   const part = workbookPart(archive);
   const relations = readRelations(archive, part);
   const { listed, names, date1904 } = readWorkbookPart(archive, part);
@@ -38,6 +67,7 @@ export function readXlsx(bytes: Uint8Array): Workbook {
     date1904,
     dynamicMarks: readDynamicMarks(archive, partOf("sheetMetadata")),
     cells: 0,
+    extras,
   };
   const sheets: Sheet[] = [];
   const tables: Table[] = [];
@@ -47,7 +77,9 @@ export function readXlsx(bytes: Uint8Array): Workbook {
     // A sheet that is nothing but a chart has no cells.
     if (kind !== "worksheet") continue;
     const sheet = new Sheet(name, visible);
-    readSheet(context, target, sheet);
+    const look = looks && new SheetLook();
+    readSheet(context, target, sheet, look);
+    if (look) looks.set(name, look);
     sheets.push(sheet);
     for (const table of readRelations(archive, target).filter((one) => one.kind === "table"))
       tables.push(...[readTable(archive, table.target, name)].filter((one) => one !== undefined));

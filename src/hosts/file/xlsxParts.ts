@@ -32,8 +32,9 @@ export function workbookPart(archive: ZipArchive): string {
     throw new UnusableFile("The file is a zip archive, but no workbook (.xlsx) in it.");
   let macros = archive.names.some((name) => /(^|\/)vbaProject\.bin$/i.test(name));
   readXml(archive, "[Content_Types].xml", {
-    open(_, { ContentType = "" }) {
-      macros ||= /macroEnabled|vbaProject/i.test(ContentType);
+    open(tag, { ContentType = "" }) {
+      // Some programs list kinds for endings of which the file has no part: only what is said of a part itself counts.
+      macros ||= tag === "Override" && /macroEnabled|vbaProject/i.test(ContentType);
     },
   });
   if (macros) throw new UnusableFile("The file holds macros: save a copy as .xlsx, without them.");

@@ -2,7 +2,10 @@ import type { Area } from "../../sheet/address";
 import type { Cell } from "../../sheet/cell";
 import type { Sheet } from "../../sheet/workbook";
 import { areaReference, cellReference } from "./cellReference";
+import { lookListener } from "./lookListener";
+import type { Extras } from "./notShown";
 import { readXml, type Attributes } from "./readXml";
+import type { SheetLook } from "./sheetLook";
 import { UnusableFile } from "./unusableFile";
 import { storedValue } from "./xlsxValue";
 import type { ZipArchive } from "./zipArchive";
@@ -16,6 +19,8 @@ export interface SheetContext {
   readonly dynamicMarks: ReadonlySet<number>;
   /** Cells read so far, in all sheets. */
   cells: number;
+  /** Counts what is not read; left out where nobody wants to know. */
+  readonly extras?: Extras;
 }
 
 interface SharedFormula {
@@ -24,8 +29,9 @@ interface SharedFormula {
   readonly column: number;
 }
 
-/** Reads the cells of one sheet part into `sheet`. */
-export function readSheet(context: SheetContext, part: string, sheet: Sheet): void {
+/** Reads the cells of one sheet part into `sheet`, and how they look into `look`. */
+export function readSheet(context: SheetContext, part: string, sheet: Sheet, look?: SheetLook): void {
+  const seen = look && lookListener(look, context.extras);
   const shared = new Map<string, SharedFormula>();
   let row = -1;
   let column = -1;
@@ -41,6 +47,7 @@ export function readSheet(context: SheetContext, part: string, sheet: Sheet): vo
     if (++context.cells > MOST_CELLS) throw new UnusableFile(`The file holds more than ${MOST_CELLS} cells.`);
     const stored = value === undefined ? null : storedValue(value, cell["t"], context);
     if (stored !== null) sheet.set(row, column, stored);
+    if (look && cell["s"] !== undefined) look.setStyle(row, column, Number(cell["s"]));
     if (formula) placeFormula(formula, stored);
   };
 
@@ -96,6 +103,9 @@ export function readSheet(context: SheetContext, part: string, sheet: Sheet): vo
           break;
         case "autoFilter":
           if (attributes["ref"] !== undefined) sheet.filter = areaReference(attributes["ref"]);
+          break;
+        default:
+          seen?.(name, attributes);
       }
     },
     text(text) {

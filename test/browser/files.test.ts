@@ -1,0 +1,188 @@
+import { afterAll, afterEach, beforeAll, describe, expect, test } from "vitest";
+import { OPENED_BOOK } from "../support/openedBook";
+import { withoutBrowser } from "./browser";
+import { startTrial, type TrialBrowser, type TrialPage } from "./trialPage";
+
+const file = (name: string, bytes: Uint8Array | string) => ({
+  name,
+  mimeType: "application/octet-stream",
+  buffer: Buffer.from(bytes),
+});
+const CSV = "Entry;Score\n" + Array.from({ length: 40 }, (_, i) => `E${i};${50 + ((i * 7) % 31)},5`).join("\n");
+
+async function computed({ page }: TrialPage): Promise<void> {
+  await page.waitForSelector("body[data-state=computed]", { timeout: 30_000 });
+}
+
+/** Picks a file and waits until the page has been loaded anew with it. */
+async function open(sheet: TrialPage, name: string, bytes: Uint8Array | string): Promise<void> {
+  const loaded = sheet.page.waitForEvent("load");
+  await sheet.page.setInputFiles("#file", file(name, bytes));
+  await loaded;
+  await computed(sheet);
+}
+
+describe.skipIf(withoutBrowser)("files of the user's own in the trial page", () => {
+  let trial: TrialBrowser;
+  let sheet: TrialPage;
+  beforeAll(async () => {
+    trial = await startTrial();
+    sheet = await trial.open();
+  });
+  afterAll(() => trial?.close());
+  afterEach(() => {
+    expect(sheet.problems).toEqual([]);
+    expect(sheet.outside).toEqual([]);
+  });
+
+  test("a broken file is refused aloud, and the workbook stays as it was", async () => {
+    await sheet.page.setInputFiles("#file", file("broken.xlsx", OPENED_BOOK.slice(0, 2000)));
+    const alert = sheet.page.getByRole("alert");
+    await alert.waitFor();
+    expect(await alert.innerText()).toMatch(
+      /broken\.xlsx can’t be opened; the workbook here stays.*\n+.*cut off or damaged/,
+    );
+    expect((await sheet.read("Bids!A1")).values).not.toEqual([[null]]);
+    await sheet.page.locator("#message button").press("Enter");
+    expect(await sheet.page.locator("#message").isVisible()).toBe(false);
+    expect(await sheet.page.evaluate(() => document.activeElement?.id)).toBe("open");
+  });
+
+  test("a list opens at once over the untouched workbook, with its decimal commas", async () => {
+    await open(sheet, "scores.csv", CSV);
+    expect((await sheet.read("scores!A1:B2")).values).toEqual([
+      ["Entry", "Score"],
+      ["E0", 50.5],
+    ]);
+    expect(await sheet.page.textContent(".about")).toMatch(/scores\.csv, opened from your files/);
+    expect(await sheet.page.textContent(".about")).not.toMatch(/invented/);
+    await sheet.select("scores!B2:B41");
+    await sheet.page.getByText("40 scores").first().waitFor();
+  });
+
+  test("before a workbook takes the place of another, the page asks and says what it can't show", async () => {
+    await sheet.page.setInputFiles("#file", file("bids.xlsx", OPENED_BOOK));
+    const message = sheet.page.locator("#message");
+    await sheet.page.getByRole("button", { name: "Open it" }).waitFor();
+    const words = await message.innerText();
+    expect(words).toMatch(/bids\.xlsx: 20 cells on 2 sheets/);
+    expect(words).toMatch(/takes the place of the workbook here/);
+    expect(words).toMatch(/1 chart, 1 picture/);
+    await sheet.page.getByRole("button", { name: "Keep what is here" }).click();
+    expect(await message.isVisible()).toBe(false);
+    expect((await sheet.read("scores!B2")).values).toEqual([[50.5]]);
+
+    await sheet.page.setInputFiles("#file", file("bids.xlsx", OPENED_BOOK));
+    await Promise.all([sheet.page.waitForEvent("load"), sheet.page.getByRole("button", { name: "Open it" }).click()]);
+    await computed(sheet);
+  });
+
+  test("its formulas are computed: ours, names, spills, what was pinned; its errors and flags are those of the file", async () => {
+    // Greenwood & Sandomire 1950 for 10 %; the others by hand: 71.4 + 65.5 + 68 = 204.9, 1 + 2 + 3 + 4 = 10,
+    // 3.1² + 2.8² + 0.3² = 17.54.
+    expect((await sheet.read("Bids!D2")).values).toEqual([[193]]);
+    expect((await sheet.read("Bids!D5:E8")).values).toEqual([
+      [204.9, 12],
+      [1, 2],
+      [3, 4],
+      [10, 0.25],
+    ]);
+    expect((await sheet.read("Bids!D3")).values[0]![0]).toBeCloseTo(Math.sqrt(17.54 / 2), 12);
+    expect((await sheet.read("Bids!A2:A4")).values).toEqual([["=no formula"], [true], [{ code: "#N/A" }]]);
+    await sheet.write("Bids!B2", [[81.4]]);
+    expect((await sheet.read("Bids!D5")).values).toEqual([[214.9]]);
+  });
+
+  test("a reload loses nothing of it", async () => {
+    await sheet.page.waitForTimeout(1200);
+    await sheet.page.reload();
+    await computed(sheet);
+    expect((await sheet.read("Bids!B2:D2")).values).toEqual([[81.4, null, 193]]);
+    expect((await sheet.read("Bids!D6:E7")).values).toEqual([
+      [1, 2],
+      [3, 4],
+    ]);
+    expect(await sheet.page.textContent(".about")).toMatch(/bids\.xlsx/);
+  });
+
+  test("starting over asks, and leads back to the invented workbook", async () => {
+    await sheet.page.click("#start-over");
+    await Promise.all([sheet.page.waitForEvent("load"), sheet.page.click("#discard")]);
+    await computed(sheet);
+    expect(await sheet.page.textContent(".about")).toMatch(/invented/);
+    expect((await sheet.read("Bids!A1")).values).not.toEqual([["entry"]]);
+  });
+
+  test("a file dropped on the page opens, two at once don't", async () => {
+    const drop = (names: readonly string[]) =>
+      sheet.page.evaluate(
+        ({ all, csv }) => {
+          const data = new DataTransfer();
+          for (const name of all) data.items.add(new File([csv], name));
+          const target = document.getElementById("grid")!;
+          for (const kind of ["dragenter", "dragover", "drop"])
+            target.dispatchEvent(new DragEvent(kind, { bubbles: true, cancelable: true, dataTransfer: data }));
+        },
+        { all: names as string[], csv: CSV },
+      );
+    await drop(["a.csv", "b.csv"]);
+    await sheet.page.getByText("One file at a time").waitFor();
+    const loaded = sheet.page.waitForEvent("load");
+    await drop(["dropped.csv"]);
+    await loaded;
+    await computed(sheet);
+    expect((await sheet.read("dropped!B2")).values).toEqual([[50.5]]);
+  });
+
+  test("where the browser keeps nothing, it says so and leaves the workbook as it was", async () => {
+    const other = await trial.open();
+    await other.page.evaluate(() => {
+      // Only the background writes: what it asks of the browser is refused there.
+      const Real = Worker;
+      globalThis.Worker = class extends Real {
+        override postMessage(message: unknown) {
+          if ((message as { kind: string }).kind === "take")
+            this.onmessage?.(new MessageEvent("message", { data: { kind: "notKept" } }));
+          else super.postMessage(message);
+        }
+      };
+    });
+    await other.page.setInputFiles("#file", file("scores.csv", CSV));
+    await other.page.getByText("This browser keeps nothing for this page").waitFor();
+    expect((await other.read("Bids!A1")).values).not.toEqual([[null]]);
+  });
+
+  test("100,000 rows are read in the background: the page never stands still for long", async () => {
+    const rows = Array.from({ length: 100_000 }, (_, i) => `E${i},${(i * 7919) % 1000},${i % 7},late,fine`);
+    const other = await trial.open();
+    await other.page.evaluate(() => {
+      const longest = { ms: 0 };
+      Object.assign(globalThis, { longest });
+      new PerformanceObserver((list) => {
+        for (const { duration } of list.getEntries()) longest.ms = Math.max(longest.ms, duration);
+      }).observe({ type: "longtask" });
+    });
+    const loaded = other.page.waitForEvent("load");
+    await other.page.setInputFiles("#file", file("many.csv", ["Entry,Score,Week,A,B", ...rows].join("\n")));
+    await other.page.getByText("Reading many.csv").waitFor();
+    await other.page.waitForTimeout(300);
+    const longest = await other.page.evaluate(() => (globalThis as unknown as { longest: { ms: number } }).longest.ms);
+    await loaded;
+    await computed(other);
+    expect(longest).toBeLessThan(400);
+    expect((await other.read("many!B100001")).values).toEqual([[(99_999 * 7919) % 1000]]);
+    expect(other.problems).toEqual([]);
+  });
+
+  test("reading can be cancelled", async () => {
+    const other = await trial.open();
+    await other.page.evaluate(() => {
+      globalThis.Worker = class extends Worker {
+        override postMessage() {}
+      };
+    });
+    await other.page.setInputFiles("#file", file("scores.csv", CSV));
+    await other.page.getByRole("button", { name: "Cancel" }).click();
+    expect(await other.page.locator("#message").isVisible()).toBe(false);
+  });
+});
