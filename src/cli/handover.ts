@@ -1,6 +1,6 @@
 import { auditWorkbook } from "../audit/auditWorkbook";
 import { storedFormula } from "../audit/formulaText";
-import { planHandover, type Replacement } from "../audit/handover/planHandover";
+import { endedSpills, planHandover, type Replacement } from "../audit/handover/planHandover";
 import { NUMBERS_REVISION, RELEASE_NAME, RELEASE_VERSION } from "../core/release";
 import type { CellPatch } from "../hosts/file/patchSheet";
 import { formatSheetName } from "../sheet/address";
@@ -48,6 +48,7 @@ async function runHandover(args: readonly string[], io: Io): Promise<number> {
     patchXlsx(bytes, {
       cells: cellPatches(replacements),
       notes: cellNotes(replacements),
+      endedSpill: endedSpills(replacements),
       sheet: listSheet(replacements),
     }),
   );

@@ -45,9 +45,15 @@ export class WorkingsCall {
     return this.partText(name, 0, 0);
   }
 
-  /** What stands for a part of the argument, rows and columns counted from 0, ends included: its address, else its values. */
+  /** What stands for a part of the argument, rows and columns counted from 0, ends included: its address, of one cell its place, else its values. */
   partText(name: string, top: number, left: number, bottom = top, right = left): string {
-    const area = parseAddress(this.texts[this.place(name)] ?? "");
+    const typed = this.texts[this.place(name)];
+    const range = this.range(name);
+    const whole = top === 0 && left === 0 && bottom === range.length - 1 && right === range[0]!.length - 1;
+    const area = parseAddress(typed ?? "");
+    // `F2:F2` and `{7}` are one cell, but arrays to an engine.
+    const array = typed?.startsWith("{") || (area && typed!.includes(":"));
+    if (typed !== undefined && whole && !array) return operandText(typed);
     if (area) {
       const [row, column] = [area.top, area.left];
       return formatAddress({
@@ -58,10 +64,11 @@ export class WorkingsCall {
         right: column + right,
       });
     }
-    const part = this.range(name)
-      .slice(top, bottom + 1)
-      .map((row) => row.slice(left, right + 1));
-    return part.length === 1 && part[0]!.length === 1 ? literalText(part[0]![0]) : literalText(part);
+    const part = range.slice(top, bottom + 1).map((row) => row.slice(left, right + 1));
+    const single = part.length === 1 && part[0]!.length === 1;
+    // A name, a table's column, a calculation: its value written out would follow nothing any more.
+    if (typed !== undefined && single && !array) return `INDEX(${typed},${top + 1},${left + 1})`;
+    return single ? literalText(part[0]![0]) : literalText(part);
   }
 
   /** The first cell of the argument that holds something: in a range of blanks the first one. */

@@ -32,6 +32,15 @@ describe("what stands for an argument in a native formula", () => {
     expect(call(cells, "Bids!$C$4:$D$5").partText("scores", 1, 0, 1, 1)).toBe("Bids!C5:D5");
     expect(call(cells).partText("scores", 1, 0, 1, 1)).toBe('{3,""}');
     expect(call(cells).partText("scores", 0, 1)).toBe("2");
+    expect(call(cells, "{1,2;3,4}").partText("scores", 0, 1)).toBe("2");
+  });
+
+  test("a cell of a name, a table's column or a calculation follows it, and one cell stands as it was typed", () => {
+    expect(call([[1], [3]], "Bids[Score]").firstCellText("scores")).toBe("INDEX(Bids[Score],1,1)");
+    expect(call(7, "INDEX(E2#,2,2)").firstCellText("scores")).toBe("INDEX(E2#,2,2)");
+    expect(call(7, "DAY(C4)+60").firstCellText("scores")).toBe("(DAY(C4)+60)");
+    expect(call([[7]], "$B2").firstCellText("scores")).toBe("$B2");
+    expect(call([[7]], "B2:B2").firstCellText("scores")).toBe("B2");
   });
 
   test("the first cell that holds something is found row by row, with its address", () => {

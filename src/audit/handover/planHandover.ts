@@ -1,5 +1,7 @@
 import { tokenize } from "@borgar/fx/xlsx";
-import type { Cell } from "../../sheet/cell";
+import type { Area } from "../../sheet/address";
+import { isCellError, type Cell } from "../../sheet/cell";
+import { endSpills, type EndedSpill } from "../../sheet/endSpills";
 import type { Workbook } from "../../sheet/workbook";
 import { compareStored } from "../compareStored";
 import { evaluate } from "../evaluate";
@@ -27,26 +29,49 @@ const LONGEST_FORMULA = 8_192;
 
 /** Decides for every judged cell: the host's own functions where they give the same value, else its value, else nothing. */
 export function planHandover(judgements: readonly Judgement[], workbook: Workbook): Replacement[] {
-  return judgements.map((judgement) => {
-    const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook);
-    const differs = judgement.verdict === "differs" ? ` Mind: ${judgement.why}` : "";
-    if (formula !== undefined) {
-      const asks = needsNewHost(formula) ? ", of 2021 or later," : "";
-      const held = heldNumber(formula, judgement.formula);
-      const follow = held
-        ? `, for as many scores as there are now: ${held} in it was worked out for their number when the copy was made.`
-        : " and follow the scores.";
-      const note = `The host's own functions${asks} give the same value${follow}${differs}`;
-      return { judgement, becomes: "formula", stored: formula, typed: typedFormula(`=${formula}`), note };
-    }
-    const note = `The host has no functions for it: the value stays as it was stored and follows nothing.${differs}`;
-    if (judgement.cell.calculated) return { judgement, becomes: "value", note };
-    const { recomputed } = judgement;
-    if (recomputed === undefined || Array.isArray(recomputed))
-      return { judgement, becomes: "as it was", note: `Left as it was. ${judgement.why}` };
-    const fresh = "The file held no value for it: this one was worked out when the copy was made, and follows nothing.";
-    return { judgement, becomes: "value", value: recomputed, note: fresh };
+  const replacements = judgements.map((judgement) => replacementOf(judgement, workbook));
+  const ended = endedSpills(replacements);
+  return replacements.map((one) => {
+    if (one.stored === undefined) return one;
+    const stored = ended ? endSpills(one.stored, one.judgement.sheet.name, ended) : one.stored;
+    return { ...one, stored, typed: typedFormula(`=${stored}`) };
   });
+}
+
+/** What the replaced results filled that spilled by themselves: none of them does any more. */
+export function endedSpills(replacements: readonly Replacement[]): EndedSpill | undefined {
+  const areas = new Map<string, Area>();
+  for (const { becomes, judgement } of replacements)
+    if (becomes !== "as it was" && judgement.cell.array)
+      areas.set(spillKey(judgement.sheet.name, judgement.cell.row, judgement.cell.column), judgement.cell.array);
+  return areas.size === 0 ? undefined : (sheet, row, column) => areas.get(spillKey(sheet, row, column));
+}
+
+function spillKey(sheet: string, row: number, column: number): string {
+  return `${row},${column},${sheet.toLowerCase()}`;
+}
+
+function replacementOf(judgement: Judgement, workbook: Workbook): Replacement {
+  const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook);
+  const differs = judgement.verdict === "differs" ? ` Mind: ${judgement.why}` : "";
+  if (formula !== undefined) {
+    const asks = needsNewHost(formula) ? ", of 2021 or later," : "";
+    const held = heldNumber(formula, judgement.formula);
+    const follow = held
+      ? `, for as many scores as there are now: ${held} in it was worked out from their number and the other arguments when the copy was made.`
+      : " and follow their inputs.";
+    const note = `The host's own functions${asks} give the same value${follow}${differs}`;
+    return { judgement, becomes: "formula", stored: formula, note };
+  }
+  const { recomputed } = judgement;
+  const refused = isCellError(recomputed as Cell)
+    ? "The call gives no value, and its error stays where it was."
+    : "The host has no functions for it: the value stays as it was stored and follows nothing.";
+  if (judgement.cell.calculated) return { judgement, becomes: "value", note: `${refused}${differs}` };
+  if (recomputed === undefined || Array.isArray(recomputed))
+    return { judgement, becomes: "as it was", note: `Left as it was. ${judgement.why}` };
+  const fresh = "The file held no value for it: this one was worked out when the copy was made, and follows nothing.";
+  return { judgement, becomes: "value", value: recomputed, note: fresh };
 }
 
 /** The cell's formula with every call of ours put in the host's words, innermost first; undefined where one can't be, or where the value would change. */
@@ -63,8 +88,10 @@ function nativeFormula({ sheet, cell, recomputed }: Judgement, workbook: Workboo
     const native = innermost && nativeCall(innermost);
     if (!native || !innermost.node.loc) return undefined;
     const [from, to] = innermost.node.loc;
-    const alone = text.slice(0, from).replace(/[@=]/g, "") === "" && to === text.length;
-    text = alone ? `=${native}` : `${text.slice(0, from)}(${native})${text.slice(to)}`;
+    // The link to the add-in's file that some hosts put before the name.
+    const before = text.slice(0, from).replace(/\[\d+\]!$/, "");
+    const alone = before.replace(/[@=]/g, "") === "" && to === text.length;
+    text = alone ? `=${native}` : `${before}(${native})${text.slice(to)}`;
   }
   if (mayCallOurs(text)) return undefined;
   const stored = storedSpelling(text);

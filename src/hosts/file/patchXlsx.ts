@@ -1,4 +1,5 @@
 import { strToU8, zipSync, type Zippable } from "fflate";
+import { endSpills, type EndedSpill } from "../../sheet/endSpills";
 import { addNotes } from "./addNotes";
 import { patchSheet, type CellPatch } from "./patchSheet";
 import { sheetParts } from "./readXlsx";
@@ -14,10 +15,14 @@ export interface WorkbookPatch {
   /** By sheet, then by `Sheet.key`. */
   readonly cells: ReadonlyMap<string, ReadonlyMap<number, CellPatch>>;
   readonly notes: ReadonlyMap<string, ReadonlyMap<number, string>>;
+  /** Results that spill no more; formulas that refer to one get its cells instead. */
+  readonly endedSpill: EndedSpill | undefined;
   /** A sheet to add behind the others, under its name or the next free one like it. */
   readonly sheet: ListToWrite;
 }
 
+const MAIN = "http://schemas.openxmlformats.org/spreadsheetml/2006/main";
+const STRICT = "http://purl.oclc.org/ooxml/";
 const OFFICE = "http://schemas.openxmlformats.org/officeDocument/2006/relationships";
 const SHEET_TYPE = "application/vnd.openxmlformats-officedocument.spreadsheetml.worksheet+xml";
 
@@ -35,13 +40,30 @@ export function patchXlsx(bytes: Uint8Array, patch: WorkbookPatch): Uint8Array {
     if (cells) parts.set(part, patchSheet(partText(archive, parts, part)!, cells));
     const notes = patch.notes.get(sheet);
     if (notes && notes.size > 0) addNotes(archive, parts, part, notes);
+    if (patch.endedSpill) rewrite(archive, parts, part, sheet, patch.endedSpill);
   }
+  if (patch.endedSpill) rewrite(archive, parts, main, "", patch.endedSpill);
   addSheet(archive, parts, main, patch.sheet);
   dropCalculationOrder(archive, parts, main, dropped);
+  if (partText(archive, parts, main)!.includes(STRICT))
+    for (const [name, xml] of parts) parts.set(name, strictXml(xml));
   const files: Zippable = {};
   for (const name of archive.names) if (!dropped.has(name) && !parts.has(name)) files[name] = archive.whole(name)!;
   for (const [name, xml] of parts) files[name] = strToU8(xml);
   return zipSync(files);
+}
+
+function rewrite(archive: ZipArchive, parts: Parts, part: string, sheet: string, ended: EndedSpill): void {
+  const xml = partText(archive, parts, part)!;
+  const changed = endSpills(xml, sheet, ended);
+  if (changed !== xml) parts.set(part, changed);
+}
+
+/** What was put in, in the words of a file of the strict form, which knows no others. */
+function strictXml(xml: string): string {
+  return xml
+    .replaceAll(MAIN, `${STRICT}spreadsheetml/main`)
+    .replaceAll(OFFICE, `${STRICT}officeDocument/relationships`);
 }
 
 function addSheet(archive: ZipArchive, parts: Parts, main: string, sheet: ListToWrite): void {
