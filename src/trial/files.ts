@@ -11,8 +11,8 @@ export function setUpFiles(sheet: TrialSheet): void {
     const texts = frameTexts();
     if (files.length !== 1)
       return showMessage({ kind: "refusal", text: texts.oneFile, actions: [[texts.close, hideMessage]] });
-    const { openFile } = await import("./open/openFile");
-    await openFile(files[0]!, { texts, language: frameLanguage(), functions: functionNames(sheet) });
+    const given = { texts, language: frameLanguage(), functions: functionNames(sheet) };
+    await import("./open/openFile").then(({ openFile }) => openFile(files[0]!, given), notLoaded);
   };
   document.getElementById("open")!.addEventListener("click", () => picked.click());
   picked.addEventListener("change", () => {
@@ -21,9 +21,19 @@ export function setUpFiles(sheet: TrialSheet): void {
     picked.value = "";
     if (files.length > 0) void opened(files);
   });
+  const save = document.getElementById("save")!;
+  save.addEventListener("click", () => {
+    void import("./save/saveFile").then(({ saveFile }) => saveFile(sheet, frameTexts()), notLoaded);
+  });
   const target = document.getElementById("drop")!;
   takeDrops(
     (files) => void opened(files),
     (over) => (target.hidden = !over),
   );
+}
+
+/** The parts that read and write files are fetched when they are first needed: the server may be gone by then. */
+function notLoaded(): void {
+  const texts = frameTexts();
+  showMessage({ kind: "refusal", text: texts.notLoaded, actions: [[texts.close, hideMessage]] });
 }

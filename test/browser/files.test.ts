@@ -1,6 +1,10 @@
 import { afterAll, afterEach, beforeAll, describe, expect, test } from "vitest";
+import { mkdtempSync, readFileSync } from "node:fs";
+import { tmpdir } from "node:os";
+import { join } from "node:path";
+import { read as readIndependently } from "@e965/xlsx";
 import { OPENED_BOOK } from "../support/openedBook";
-import { withoutBrowser } from "./browser";
+import { runWeirmark, withoutBrowser } from "./browser";
 import { startTrial, type TrialBrowser, type TrialPage } from "./trialPage";
 
 const file = (name: string, bytes: Uint8Array | string) => ({
@@ -184,5 +188,84 @@ describe.skipIf(withoutBrowser)("files of the user's own in the trial page", () 
     await other.page.setInputFiles("#file", file("scores.csv", CSV));
     await other.page.getByRole("button", { name: "Cancel" }).click();
     expect(await other.page.locator("#message").isVisible()).toBe(false);
+  });
+});
+
+/** Presses "Save as .xlsx" and gives the path of what the browser was handed. */
+async function save({ page }: TrialPage): Promise<{ name: string; path: string }> {
+  const [download] = await Promise.all([page.waitForEvent("download"), page.click("#save")]);
+  const name = download.suggestedFilename();
+  const path = join(mkdtempSync(join(tmpdir(), "weirmark-")), name);
+  await download.saveAs(path);
+  return { name, path };
+}
+
+/** Every cell of the workbook in the page, sheet by sheet. */
+async function everyCell(sheet: TrialPage): Promise<Record<string, unknown>> {
+  const names = await sheet.page.evaluate(() => weirmarkTrial.port.sheetNames());
+  const cells: Record<string, unknown> = {};
+  for (const name of names) cells[name] = await sheet.read(`'${name.replace(/'/g, "''")}'!A1:Z200`);
+  return cells;
+}
+
+describe.skipIf(withoutBrowser)("a workbook saved from the trial page", () => {
+  let trial: TrialBrowser;
+  beforeAll(async () => {
+    trial = await startTrial();
+  });
+  afterAll(() => trial?.close());
+
+  test("opens again with the same cells, formulas and settings, and the audit agrees with all of it", async () => {
+    const sheet = await trial.open();
+    await sheet.write("Bids!O3", [[0.1, "=WEIR.SAMPLES_FOR_SD_PRECISION(O3)", true, "=O3", '="=" & "x"']]);
+    await sheet.page.evaluate(() => weirmarkTrial.port.keepSetting("test", { asked: "“5 %” & <so on>" }));
+    const before = { cells: await everyCell(sheet), calls: await sheet.calls() };
+    const { name, path } = await save(sheet);
+    expect(name).toBe("weirmark-trial.xlsx");
+    await sheet.page.getByText("handed to your browser").waitFor();
+
+    const audit = runWeirmark(["audit", path, "--json"])
+      .trim()
+      .split("\n")
+      .map((line) => JSON.parse(line) as { verdict: string });
+    expect(audit.length).toBeGreaterThan(50);
+    expect(audit.filter(({ verdict }) => verdict !== "agrees")).toEqual([]);
+
+    const book = readIndependently(readFileSync(path), { type: "buffer", cellFormula: true });
+    expect(book.SheetNames).toEqual(Object.keys(before.cells));
+    expect(book.Sheets["Bids"]!["P3"]).toMatchObject({
+      t: "n",
+      v: 193,
+      f: "_xldudf_WEIR_SAMPLES_FOR_SD_PRECISION(O3)",
+    });
+
+    const other = await trial.open();
+    await open(other, name, readFileSync(path));
+    expect(await other.calls()).toEqual(before.calls);
+    expect(await everyCell(other)).toEqual(before.cells);
+    expect(await other.page.evaluate(() => weirmarkTrial.port.readSetting("test"))).toEqual({
+      asked: "“5 %” & <so on>",
+    });
+    expect([...sheet.problems, ...other.problems]).toEqual([]);
+  });
+
+  test("100,000 rows are written in the background", async () => {
+    const sheet = await trial.open();
+    const rows = Array.from({ length: 100_000 }, (_, i) => `E${i},${(i * 7919) % 1000},${i % 7},late,fine`);
+    await open(sheet, "many.csv", ["Entry,Score,Week,A,B", ...rows].join("\n"));
+    await sheet.page.evaluate(() => {
+      const longest = { ms: 0 };
+      Object.assign(globalThis, { longest });
+      new PerformanceObserver((list) => {
+        for (const { duration } of list.getEntries()) longest.ms = Math.max(longest.ms, duration);
+      }).observe({ type: "longtask" });
+    });
+    const { name, path } = await save(sheet);
+    const longest = await sheet.page.evaluate(() => (globalThis as unknown as { longest: { ms: number } }).longest.ms);
+    expect(name).toBe("many.xlsx");
+    expect(longest).toBeLessThan(1500);
+    expect(readIndependently(readFileSync(path)).Sheets["many"]!["B100001"]).toMatchObject({
+      v: (99_999 * 7919) % 1000,
+    });
   });
 });

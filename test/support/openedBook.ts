@@ -5,7 +5,7 @@ const PACKAGE = "http://schemas.openxmlformats.org/package/2006/relationships";
 const OFFICE = "http://schemas.openxmlformats.org/officeDocument/2006/relationships";
 
 /** Number formats, bold and wrapped letters, and a filled cell, as ECMA-376 writes them. */
-const STYLES = `<styleSheet xmlns="${MAIN}"><numFmts count="2"><numFmt numFmtId="164" formatCode="0.0&quot; points&quot;"/><numFmt numFmtId="165" formatCode="General"/></numFmts><fonts count="2"><font><sz val="11"/></font><font><b/><sz val="11"/></font></fonts><fills count="3"><fill/><fill/><fill><patternFill patternType="solid"/></fill></fills><borders count="1"><border/></borders><cellStyleXfs count="1"><xf numFmtId="9" fontId="1"/></cellStyleXfs><cellXfs count="6"><xf/><xf numFmtId="164"/><xf numFmtId="14"/><xf fontId="1"/><xf numFmtId="10"><alignment wrapText="1"/></xf><xf numFmtId="165" fillId="2"/></cellXfs></styleSheet>`;
+const STYLES = `<styleSheet xmlns="${MAIN}"><numFmts count="2"><numFmt numFmtId="164" formatCode="0.0&quot; points&quot;"/><numFmt numFmtId="165" formatCode="General"/></numFmts><fonts count="2"><font><sz val="11"/></font><font><b/><sz val="11"/></font></fonts><fills count="3"><fill/><fill/><fill><patternFill patternType="solid"><fgColor theme="4"/></patternFill></fill></fills><borders count="1"><border/></borders><cellStyleXfs count="1"><xf numFmtId="9" fontId="1"/></cellStyleXfs><cellXfs count="6"><xf/><xf numFmtId="164"/><xf numFmtId="14"/><xf fontId="1"/><xf numFmtId="10"><alignment wrapText="1"/></xf><xf numFmtId="165" fillId="2"/></cellXfs></styleSheet>`;
 
 /** A workbook with what a real one has beside plain numbers: ours in stored spelling, spills, tables, names, dates, formats, widths. */
 export const OPENED_BOOK = xlsxFile({

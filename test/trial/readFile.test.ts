@@ -71,7 +71,7 @@ describe("a workbook, laid out for the trial sheet", async () => {
 
   test("says in both languages what is not shown", () => {
     expect(summaryWords(summary, en, "en")).toEqual([
-      "Not shown here, and missing in a copy saved from here: 1 chart, 1 picture, conditional formats, and colours and borders. The file itself stays as it is.",
+      "Not shown here, and missing in a copy saved from here: 1 chart, 1 picture, conditional formats, and some colours and borders. The file itself stays as it is.",
       "2 formulas can’t be computed in this sheet (the first in Bids!E5): it shows the values that the file holds.",
       "2 formulas name a spilled range (A1#) or a part of a table: here they stand as plain ranges, which don’t grow.",
     ]);

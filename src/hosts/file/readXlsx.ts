@@ -1,5 +1,6 @@
 import { Sheet, type DefinedName, type Table, type Workbook } from "../../sheet/workbook";
 import { countExtra, extraParts, type Extras } from "./notShown";
+import { readKeptSettings } from "./keptSettings";
 import { readXml } from "./readXml";
 import { SheetLook, type CellStyle } from "./sheetLook";
 import { UnusableFile } from "./unusableFile";
@@ -36,7 +37,8 @@ export interface OpenedXlsx {
   readonly styles: readonly CellStyle[];
   /** What the file holds beside all that. */
   readonly extras: Extras;
-  readonly archive: ZipArchive;
+  /** What the pane kept with it. */
+  readonly settings: Readonly<Record<string, unknown>>;
 }
 
 /** Reads the bytes of an .xlsx file (ECMA-376) into a workbook: stored values, formulas as stored, names, tables, what is hidden. */
@@ -50,10 +52,12 @@ export function openXlsx(bytes: Uint8Array): OpenedXlsx {
   const looks = new Map<string, SheetLook>();
   const extras = extraParts(archive);
   const workbook = readArchive(archive, looks, extras);
-  const styles = readRelations(archive, workbookPart(archive)).find(({ kind }) => kind === "styles")?.target;
+  const relations = readRelations(archive, workbookPart(archive));
+  const styles = relations.find(({ kind }) => kind === "styles")?.target;
+  const custom = relations.filter(({ kind }) => kind === "customXml").map(({ target }) => target);
   const { cells, decorated } = readStyles(archive, styles);
   if (decorated) countExtra(extras, "decoration");
-  return { workbook, looks, styles: cells, extras, archive };
+  return { workbook, looks, styles: cells, extras, settings: readKeptSettings(archive, custom) };
 }
 
 function readArchive(archive: ZipArchive, looks?: Map<string, SheetLook>, extras?: Extras): Workbook {

@@ -1,11 +1,11 @@
 import type { Area } from "../../sheet/address";
+import type { RoleLook } from "../../sheet/cellLook";
 
 /** How a cell is shown, as far as it is read. */
 export interface CellStyle {
   /** A number format, such as "0.0%"; left out for the general one. */
   readonly format?: string;
-  readonly bold?: boolean;
-  readonly wrapped?: boolean;
+  readonly look: RoleLook;
 }
 
 /** How a sheet looks, beside its cells and not in them: what computes has no use for it. */

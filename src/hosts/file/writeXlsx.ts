@@ -4,6 +4,7 @@ import type { CellSetting } from "./write/cellXml";
 import { chartXml } from "./write/chartXml";
 import { drawingXml } from "./write/drawingXml";
 import { METADATA, packageXml, relationsXml } from "./write/packageXml";
+import { SETTINGS_PART, settingsXml } from "./keptSettings";
 import { sheetXml } from "./write/sheetXml";
 import { StyleTable } from "./write/styleTable";
 import { workbookXml } from "./write/workbookXml";
@@ -39,10 +40,12 @@ export function writeXlsx(book: BookToWrite): Uint8Array {
   parts["xl/workbook.xml"] = workbookXml(book);
   parts["xl/styles.xml"] = styles.xml();
   if (setting.dynamic) parts["xl/metadata.xml"] = METADATA;
+  if (book.settings) parts[SETTINGS_PART] = settingsXml(book.settings);
   parts["xl/_rels/workbook.xml.rels"] = relationsXml([
     ...book.sheets.map((_, index) => ["worksheet", `worksheets/sheet${index + 1}.xml`] as const),
     ["styles", "styles.xml"],
     ...(setting.dynamic ? [["sheetMetadata", "metadata.xml"] as const] : []),
+    ...(book.settings ? [["customXml", `../${SETTINGS_PART}`] as const] : []),
   ]);
   Object.assign(parts, packageXml(book, Object.keys(parts)));
   const files: Zippable = {};

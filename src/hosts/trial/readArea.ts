@@ -2,7 +2,7 @@ import { FormulaDataModel, type FWorksheet } from "@univerjs/preset-sheets-core"
 import { formatAddress, type Area } from "../../sheet/address";
 import type { Cell } from "../../sheet/cell";
 import type { Block } from "../port";
-import { cellOfData } from "./cellData";
+import { cellOfData } from "./cellOfData";
 import type { MessageBook } from "./messageBook";
 
 /** What a read of the trial sheet needs beside the sheet itself. */

@@ -4,6 +4,7 @@ import type { CellStyle, SheetLook } from "../../hosts/file/sheetLook";
 import type { Workbook } from "../../sheet/workbook";
 import { cellsOfSheet, type Differences } from "./cellsOfSheet";
 import { frameOfSheet } from "./frameOfSheet";
+import { styleOfLook } from "../styles";
 import { namesResource } from "./namesResource";
 
 /** A file as read: cells, and where it is a workbook with looks also those. */
@@ -16,7 +17,6 @@ export interface ReadFile {
   readonly extras?: Extras;
 }
 
-const WRAP = 3;
 const MIDDLE = 2;
 
 /** A file laid out as the trial sheet opens it; `knows` tells which functions that sheet has. */
@@ -43,7 +43,7 @@ export function bookOfFile(
     name: file.name,
     appVersion: "1",
     locale: "enUS",
-    styles: Object.fromEntries(styles.map((style, index) => [`file-${index}`, engineStyle(style)])),
+    styles: Object.fromEntries(styles.map((style, index) => [`file-${index}`, styleOfLook(style)])),
     defaultStyle: { ff: "Arial", fs: 10, vt: MIDDLE },
     sheetOrder: sheets.map(({ id }) => id),
     sheets: Object.fromEntries(sheets.map((sheet) => [sheet.id, sheet])),
@@ -52,14 +52,6 @@ export function bookOfFile(
   };
   // The engine's list of languages is its code: naming the one here keeps that out of the background.
   return { book: book as unknown as IWorkbookData, differences };
-}
-
-function engineStyle({ format, bold, wrapped }: CellStyle) {
-  return {
-    ...(format !== undefined && { n: { pattern: format } }),
-    ...(bold && { bl: 1 }),
-    ...(wrapped && { tb: WRAP }),
-  };
 }
 
 /** The name of a .csv file may be no name of a sheet. */

@@ -1,5 +1,6 @@
 import type { IWorksheetData } from "@univerjs/core";
 import type { CellStyle, SheetLook } from "../../hosts/file/sheetLook";
+import { CELL_KIND } from "../../hosts/trial/cellKinds";
 import { UnusableFile } from "../../hosts/file/unusableFile";
 import { formatAddress } from "../../sheet/address";
 import { isCellError, type Cell } from "../../sheet/cell";
@@ -26,10 +27,6 @@ export interface SheetToLayOut {
 type Cells = NonNullable<IWorksheetData["cellData"]>;
 type CellData = Cells[number][number];
 
-// The engine's numbers for kinds of values; its own list of them would bring the whole engine into the background.
-const TEXT = 1;
-const NUMBER = 2;
-const FLAG = 3;
 const DAYS_FROM_1900_TO_1904 = 1462;
 const DATE = /[ymdh]/i;
 const MOST_SPILLED = 5_000_000;
@@ -100,7 +97,7 @@ function spilledCells(sheet: Sheet, formulas: readonly Shown[]): ReadonlySet<num
 
 function dataOf(value: Cell): CellData | undefined {
   if (value === null || value === undefined || value === "") return undefined;
-  if (typeof value === "number") return { v: value, t: NUMBER };
-  if (typeof value === "boolean") return { v: value ? 1 : 0, t: FLAG };
-  return { v: isCellError(value) ? value.code : value, t: TEXT };
+  if (typeof value === "number") return { v: value, t: CELL_KIND.number };
+  if (typeof value === "boolean") return { v: value ? 1 : 0, t: CELL_KIND.flag };
+  return { v: isCellError(value) ? value.code : value, t: CELL_KIND.text };
 }

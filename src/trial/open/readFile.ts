@@ -40,7 +40,7 @@ async function read(
   // A workbook begins with the letters of a zip archive; everything else is told apart, or refused, by the common reader.
   if (bytes[0] === 0x50 && bytes[1] === 0x4b) {
     const opened = openXlsx(bytes);
-    return { file: { name, ...opened }, settings: {} };
+    return { file: { name, ...opened }, settings: opened.settings };
   }
   return { file: { name, workbook: await readWorkbook(bytes, name) }, settings: {} };
 }

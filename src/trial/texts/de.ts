@@ -26,6 +26,7 @@ export const de: TrialTexts = {
   cannotOpen: "Das Blatt lässt sich nicht öffnen. „Von vorn anfangen“ verwirft, was dieser Browser davon behalten hat.",
   cannotShow: (file) => `${file} ist gelesen, aber das Blatt kann es nicht zeigen. Was vorher hier war, ist wieder da.`,
 
+  notLoaded: "Ein Teil dieser Seite lässt sich nicht laden: Läuft ihr Server noch? Hier hat sich nichts geändert.",
   dropHere: "Eine .xlsx-, .csv- oder .tsv-Datei hier loslassen, um sie zu öffnen",
   oneFile: "Bitte eine Datei auf einmal: .xlsx, .csv oder .tsv.",
   reading: (file) => `${file} wird gelesen …`,
@@ -46,6 +47,13 @@ export const de: TrialTexts = {
     `${count === 1 ? "1 Formel nennt" : `${count} Formeln nennen`} einen Überlaufbereich (A1#) oder einen Teil einer Tabelle: Hier stehen dafür feste Bereiche, die nicht mitwachsen.`,
   openIt: "Öffnen",
   keepThis: "Behalten, was hier ist",
+
+  saving: (file) => `${file} wird geschrieben …`,
+  saved: (file) => `${file} ist dem Browser übergeben, der die Datei zu den Downloads legt.`,
+  notSaved: "Die Mappe ließ sich nicht schreiben; hier ist nichts von ihr verloren.",
+  picturesLeftOut: (count) =>
+    `${count === 1 ? "Das Bild" : `Die ${count} Bilder`} auf dem Blatt lassen sich nicht in eine Datei schreiben: Der Bereich speichert jedes als PNG oder SVG.`,
+
   extra: {
     charts: counted("Diagramm", "Diagramme"),
     pictures: counted("Bild", "Bilder"),
@@ -56,6 +64,6 @@ export const de: TrialTexts = {
     conditions: () => "bedingte Formate",
     validations: () => "Eingaberegeln",
     links: () => "Hyperlinks",
-    decoration: () => "Farben und Rahmen",
+    decoration: () => "einige Farben und Rahmen",
   },
 };

@@ -28,6 +28,7 @@ export const en = {
   cannotShow: (file: string) => `${file} was read, but the sheet can’t show it. What was here before is back.`,
 
   // Opening a file
+  notLoaded: "A part of this page can’t be fetched: is its server still running? Nothing here has changed.",
   dropHere: "Drop a .xlsx, .csv or .tsv file to open it here",
   oneFile: "One file at a time, please: a .xlsx, .csv or .tsv file.",
   reading: (file: string) => `Reading ${file} …`,
@@ -49,6 +50,15 @@ export const en = {
     `${count === 1 ? "1 formula names" : `${count} formulas name`} a spilled range (A1#) or a part of a table: here they stand as plain ranges, which don’t grow.`,
   openIt: "Open it",
   keepThis: "Keep what is here",
+
+  // Saving
+  saving: (file: string) => `Writing ${file} …`,
+  saved: (file: string) => `${file} is handed to your browser, which puts it where downloads go.`,
+  notSaved: "The workbook could not be written; nothing of it is lost here.",
+  picturesLeftOut: (count: number) =>
+    `${count === 1 ? "The picture" : `The ${count} pictures`} on the sheet can’t be written into a file: the pane saves each as PNG or SVG.`,
+
+  // What a file may hold that is not shown
   extra: {
     charts: counted("chart", "charts"),
     pictures: counted("picture", "pictures"),
@@ -59,7 +69,7 @@ export const en = {
     conditions: () => "conditional formats",
     validations: () => "rules for what may be typed",
     links: () => "hyperlinks",
-    decoration: () => "colours and borders",
+    decoration: () => "some colours and borders",
   } satisfies Record<Extra, (count: number) => string>,
 } as const;
 

@@ -1,6 +1,6 @@
 import type { Area } from "../../../sheet/address";
 import type { Cell } from "../../../sheet/cell";
-import type { CellRole } from "../../../sheet/cellLook";
+import type { CellRole, RoleLook } from "../../../sheet/cellLook";
 import type { ChartToWrite } from "./chart";
 
 /** A workbook to be written as a new .xlsx file. */
@@ -10,12 +10,16 @@ export interface BookToWrite {
   readonly title?: string;
   /** Which sheet is in front when the file is opened; the first where left out. */
   readonly active?: number;
+  /** Plain JSON that the pane keeps with the workbook. */
+  readonly settings?: Readonly<Record<string, unknown>>;
 }
 
-/** A defined name, known on every sheet: `formula` is `Plan!$C$5` or any formula, as typed, with or without "=". */
+/** A defined name, known on every sheet or on one: `formula` is `Plan!$C$5` or any formula, as typed, with or without "=". */
 export interface NameToWrite {
   readonly name: string;
   readonly formula: string;
+  /** The sheet that alone knows it. */
+  readonly sheet?: string;
 }
 
 /** A cell with more to it than its value. */
@@ -26,6 +30,8 @@ export interface CellToWrite {
   /** What the formula fills when it spills, this cell its first; the other cells hold their values. */
   readonly spills?: { readonly rows: number; readonly columns: number };
   readonly role?: CellRole;
+  /** A look of its own, in the place of a role's. */
+  readonly look?: RoleLook;
   /** A number format, such as `0.0%`. */
   readonly format?: string;
 }

@@ -23,8 +23,8 @@ export function asCellToWrite(cell: Cell | CellToWrite): CellToWrite {
 
 /** The `<c>` of a cell; nothing where it holds nothing and looks like nothing. */
 export function cellXml(cell: CellToWrite, row: number, column: number, setting: CellSetting): string {
-  const { value, formula, spills, role = "plain", format } = cell;
-  const style = setting.styles?.number(role, format) ?? 0;
+  const { value, formula, spills, role = "plain", look, format } = cell;
+  const style = setting.styles?.number(role, format, look) ?? 0;
   if (formula === undefined && isBlank(value) && style === 0) return "";
   const address = formatAddress({ top: row, left: column, bottom: row, right: column });
   const place = `<c r="${address}"${style === 0 ? "" : ` s="${style}"`}`;

@@ -23,19 +23,19 @@ export class StyleTable {
   }
 
   /** The number by which a cell names its style. */
-  number(role: CellRole, format: string | undefined): number {
-    const key = `${role}\n${format ?? ""}`;
+  number(role: CellRole, format: string | undefined, own?: RoleLook): number {
+    const key = `${role}\n${format ?? ""}\n${own ? JSON.stringify(own) : ""}`;
     let number = this.#styles.get(key);
     if (number === undefined) {
       number = this.#list.length;
       this.#styles.set(key, number);
-      this.#list.push(this.#style(role, format));
+      this.#list.push(this.#style(role, format, own));
     }
     return number;
   }
 
-  #style(role: CellRole, format: string | undefined): string {
-    const look = ROLE_LOOKS[role];
+  #style(role: CellRole, format: string | undefined, own?: RoleLook): string {
+    const look = own ?? ROLE_LOOKS[role];
     const fontAt = this.#fonts.at(font(look));
     const fillAt = look.fill
       ? this.#fills.at(

@@ -12,7 +12,10 @@ export function workbookXml({ sheets, names = [], active = 0 }: BookToWrite): st
     ({ name, hidden }, index) =>
       `<sheet name="${escapeXml(name)}" sheetId="${index + 1}"${hidden ? ' state="hidden"' : ""} r:id="rId${index + 1}"/>`,
   );
-  const own = names.map(({ name, formula }) => ({ name, local: "", formula: storedSpelling(formula) }));
+  const own = names.map(({ name, formula, sheet }) => {
+    const home = sheets.findIndex((one) => one.name === sheet);
+    return { name, local: home < 0 ? "" : ` localSheetId="${home}"`, formula: storedSpelling(formula) };
+  });
   const printed = sheets.flatMap((sheet, index) =>
     printNames(sheet).map(([name, formula]) => ({ name, local: ` localSheetId="${index}"`, formula })),
   );
