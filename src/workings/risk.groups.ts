@@ -89,7 +89,7 @@ function fisherNative(a: Side, b: Side): string {
 function koopmanNative(low: Side, high: Side, ratio: number): string {
   const p = `((f*(m+y)+x+n)-SQRT((f*(m+y)+x+n)^2-4*f*(m+n)*(x+y)))/(2*(m+n))`;
   // Where everyone passed on the first side its fitted rate is 1, and its own part nothing.
-  const chiSquare = "IF(1-p<1E-9,0,(x-m*p)^2/(m*p*(1-p)))+(y-n*p/f)^2/(n*p/f*(1-p/f))";
+  const chiSquare = "IF(1-p<1E-9,0,(x-m*p)^2/(m*p*(1-p)))+IF(1-p/f<1E-9,0,(y-n*p/f)^2/(n*p/f*(1-p/f)))";
   return `LET(x,${low.x},m,${low.n},y,${high.x},n,${high.n},f,${literal(ratio)},p,${p},${chiSquare})`;
 }
 
