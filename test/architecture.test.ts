@@ -13,10 +13,11 @@ const LAYERS: Record<string, readonly string[]> = {
   functions: ["core", "sheet", "workings"],
   audit: ["core", "sheet", "workings", "functions"],
   plot: ["core", "sheet"],
+  plan: ["core", "sheet", "plot"],
   hosts: ["sheet"],
-  taskpane: ["core", "sheet", "workings", "functions", "audit", "plot", "hosts"],
-  trial: ["core", "sheet", "workings", "functions", "audit", "plot", "hosts", "taskpane"],
-  cli: ["core", "sheet", "workings", "functions", "audit", "plot", "hosts"],
+  taskpane: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts"],
+  trial: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts", "taskpane"],
+  cli: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts"],
 };
 /** Packages that a layer may load; the pure layers get by without any but these. */
 const PACKAGES: Record<string, RegExp> = {
@@ -25,6 +26,7 @@ const PACKAGES: Record<string, RegExp> = {
   workings: /^$/,
   functions: /^$/,
   audit: /^(@borgar\/fx(\/xlsx)?|jstat|saxes|fflate)$/,
+  plan: /^$/,
   plot: /^d3-(scale|shape|array)$/,
 };
 /** Entries of a bundle: the only files of their layer that see the whole house. */

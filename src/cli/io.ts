@@ -4,8 +4,8 @@ export interface Io {
   err(text: string): void;
   /** The bytes of a file, or of standard input for "-". */
   read(path: string): Promise<Uint8Array>;
-  /** Writes a file, in place of one with the same name. */
-  write(path: string, bytes: Uint8Array): Promise<void>;
+  /** Writes a file, in place of one with the same name; with `only` "new" a file that is there already is left alone and ends the command. */
+  write(path: string, bytes: Uint8Array, only?: "new"): Promise<void>;
 }
 
 /** What ends a command: a sentence for the user. Nothing was judged, so the exit code is 2. */

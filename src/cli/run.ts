@@ -5,9 +5,10 @@ import { calc } from "./calc";
 import { functions } from "./functions";
 import { handover } from "./handover";
 import { Stop, type Command, type Io } from "./io";
+import { plan } from "./plan";
 import { printable } from "./plainText";
 
-const COMMANDS: readonly Command[] = [calc, audit, handover, functions];
+const COMMANDS: readonly Command[] = [calc, plan, audit, handover, functions];
 
 /** Runs the command line and gives its exit code. A fault of the input is a sentence on standard error and 2, never a stack. */
 export async function run(args: readonly string[], io: Io): Promise<number> {

@@ -26,11 +26,17 @@ async function readPath(path: string): Promise<Uint8Array> {
   }
 }
 
-async function writePath(path: string, bytes: Uint8Array): Promise<void> {
+async function writePath(path: string, bytes: Uint8Array, only?: "new"): Promise<void> {
   try {
-    await writeFile(path, bytes);
+    await writeFile(path, bytes, { flag: only === "new" ? "wx" : "w" });
   } catch (failure) {
-    throw new Stop(`${path} can't be written (${(failure as Error).message}).`);
+    const { code, message } = failure as NodeJS.ErrnoException;
+    if (code === "EEXIST")
+      throw new Stop(`${path} is there already: give another name, or --replace to write over it.`);
+    if (code === "ENOENT") throw new Stop(`${path} can't be written: there is no such folder.`);
+    if (code === "EISDIR") throw new Stop(`${path} is a folder, not a file.`);
+    if (code === "EACCES" || code === "EPERM" || code === "EROFS") throw new Stop(`${path} may not be written.`);
+    throw new Stop(`${path} can't be written (${message}).`);
   }
 }
 

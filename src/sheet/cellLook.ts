@@ -7,6 +7,7 @@ export const CELL_ROLES = [
   "title",
   "section",
   "heading",
+  "number heading",
   "label",
   "input",
   "result",
@@ -38,6 +39,8 @@ export interface RoleLook {
   readonly rule?: { readonly side: "bottom" | "box" | "left"; readonly colour: string; readonly thick?: boolean };
   readonly wrap?: boolean;
   readonly align?: "left" | "right" | "center";
+  /** Space beside the text, in the format's own unit. */
+  readonly indent?: number;
 }
 
 const WATER = "0B4A6B";
@@ -50,9 +53,10 @@ export const ROLE_LOOKS: Readonly<Record<CellRole, RoleLook>> = {
   title: { size: 16, bold: true },
   section: { size: 12, bold: true, ink: WATER, rule: { side: "bottom", colour: WATER, thick: true } },
   heading: { bold: true, rule: { side: "bottom", colour: LINE } },
+  "number heading": { bold: true, rule: { side: "bottom", colour: LINE }, align: "right", indent: 1 },
   label: { wrap: true },
-  input: { ink: WATER, fill: "EEF6F9", rule: { side: "box", colour: WATER }, align: "right" },
-  result: { bold: true, align: "right" },
+  input: { ink: WATER, fill: "EEF6F9", rule: { side: "box", colour: WATER }, align: "right", indent: 1 },
+  result: { bold: true, align: "right", indent: 1 },
   formula: { size: 9, ink: PALE, wrap: true },
   note: { ink: PALE, wrap: true },
   caution: { bold: true, wrap: true, rule: { side: "left", colour: WATER, thick: true } },

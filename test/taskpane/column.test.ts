@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { gridMark, scoreDecimals } from "../../src/taskpane/column/grid";
+import { gridMark, scoreDecimals } from "../../src/sheet/scoreGrid";
 import { cellAbove, numberColumns, readColumn } from "../../src/taskpane/column/readColumn";
 
 describe("a selected column", () => {

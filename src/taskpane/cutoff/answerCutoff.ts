@@ -1,6 +1,6 @@
 import type { Cell } from "../../sheet/cell";
 import type { Outcome } from "../../sheet/invoke";
-import { gridMark, scoreDecimals, type GridMark } from "../column/grid";
+import { gridMark, scoreDecimals, type GridMark } from "../../sheet/scoreGrid";
 import type { Column } from "../column/readColumn";
 import type { Call } from "../context";
 import type { CutoffQuestion } from "./question";

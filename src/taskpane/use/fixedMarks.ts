@@ -9,7 +9,7 @@ import {
   type FixedMark,
   type FixedMarkKind,
 } from "../../sheet/fixedMark";
-import { gridMark } from "../column/grid";
+import { gridMark } from "../../sheet/scoreGrid";
 import type { Column } from "../column/readColumn";
 import type { Call } from "../context";
 import { answerCutoff, type CutoffAnswer } from "../cutoff/answerCutoff";

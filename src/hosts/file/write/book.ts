@@ -66,6 +66,8 @@ export interface PrintSetup {
   readonly area?: Area;
   /** Rows repeated on every page, from 0, ends included. */
   readonly titleRows?: readonly [first: number, last: number];
+  /** Rows that begin a new page, from 0. */
+  readonly breaksBefore?: readonly number[];
   /** In the code of the format: `&P` the page, `&N` of how many, `&A` the sheet, `&F` the file; `&&` an ampersand. */
   readonly header?: PrintLine;
   readonly footer?: PrintLine;

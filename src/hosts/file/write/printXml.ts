@@ -5,14 +5,20 @@ import { escapeXml } from "./xmlText";
 const PAPER = { Letter: 1, A4: 9 } as const;
 
 /** Margins, paper, and the lines at the head and foot of a page, in the order of the format. */
-export function printXml({ paper, orientation, pagesWide, header, footer }: PrintSetup): string {
+export function printXml({ paper, orientation, pagesWide, header, footer, breaksBefore = [] }: PrintSetup): string {
   const fit = pagesWide ? ` fitToWidth="${pagesWide}" fitToHeight="0"` : "";
   const lines = [
     header && `<oddHeader>${lineXml(header)}</oddHeader>`,
     footer && `<oddFooter>${lineXml(footer)}</oddFooter>`,
   ];
   const around = lines.some(Boolean) ? `<headerFooter>${lines.filter(Boolean).join("")}</headerFooter>` : "";
-  return `<pageMargins left="0.6" right="0.6" top="0.75" bottom="0.75" header="0.3" footer="0.3"/><pageSetup paperSize="${PAPER[paper]}" orientation="${orientation}"${fit}/>${around}`;
+  return `<pageMargins left="0.6" right="0.6" top="0.75" bottom="0.75" header="0.3" footer="0.3"/><pageSetup paperSize="${PAPER[paper]}" orientation="${orientation}"${fit}/>${around}${breaksXml(breaksBefore)}`;
+}
+
+function breaksXml(rows: readonly number[]): string {
+  if (rows.length === 0) return "";
+  const breaks = rows.map((row) => `<brk id="${row}" max="16383" man="1"/>`).join("");
+  return `<rowBreaks count="${rows.length}" manualBreakCount="${rows.length}">${breaks}</rowBreaks>`;
 }
 
 function lineXml({ left, centre, right }: PrintLine): string {

@@ -46,7 +46,7 @@ export class StyleTable {
     const formatAt = format === undefined ? 0 : FIRST_FORMAT + this.#formats.at(format);
     const aligned = look.wrap || look.align || role !== "plain";
     const alignment = aligned
-      ? `<alignment${look.align ? ` horizontal="${look.align}"` : ""} vertical="top"${look.wrap ? ' wrapText="1"' : ""}/>`
+      ? `<alignment${look.align ? ` horizontal="${look.align}"` : ""} vertical="top"${look.indent ? ` indent="${look.indent}"` : ""}${look.wrap ? ' wrapText="1"' : ""}/>`
       : "";
     return `<xf numFmtId="${formatAt}" fontId="${fontAt}" fillId="${fillAt}" borderId="${borderAt}" xfId="0"${role === "text" ? ' quotePrefix="1"' : ""} applyNumberFormat="${format ? 1 : 0}" applyFont="1" applyFill="1" applyBorder="1"${aligned ? ' applyAlignment="1"' : ""}>${alignment}</xf>`;
   }
