@@ -36,7 +36,7 @@ export function PANEL_SCORE(call: WorkingsCall): readonly Step[] {
     steps.add(meaning, 0, remainderNative(ratings, grid.rows, raters, known), SEARLE);
   }
   const severities = solved ? `TRANSPOSE(${solved})` : raters <= MOST_CHECKED ? known : "";
-  const mean = severities && `AVERAGE(IF(${entry.text}<>"",${entry.text}-${severities},""))`;
+  const mean = severities && `AVERAGE(IF(${entry.text}<"",${entry.text}-${severities},""))`;
   return steps.add("score of the first entry: mean of its ratings less severity", scores[entry.row], mean).rows;
 }
 
@@ -47,16 +47,16 @@ export function PANEL_SCORE(call: WorkingsCall): readonly Step[] {
 function severitiesNative(ratings: string, rows: number, raters: number): string {
   const [ones, entries] = [`SEQUENCE(${raters},1,1,0)`, `SEQUENCE(${rows},1,1,0)`];
   return (
-    `LET(x,${ratings},u,IF(x<>"",1,0),n,MMULT(u,${ones}),v,IF(n>0,1/n,0),m,MMULT(IF(x<>"",x,0),${ones})*v,` +
-    `d,MMULT(TRANSPOSE(IF(x<>"",x-m,0)),${entries}),k,MMULT(TRANSPOSE(u),${entries}),p,IF(k>0,1,0),` +
+    `LET(x,${ratings},u,IF(x<"",1,0),n,MMULT(u,${ones}),v,IF(n>0,1/n,0),m,MMULT(IF(x<"",x,0),${ones})*v,` +
+    `d,MMULT(TRANSPOSE(IF(x<"",x-m,0)),${entries}),k,MMULT(TRANSPOSE(u),${entries}),p,IF(k>0,1,0),` +
     `a,IF(SEQUENCE(${raters})=SEQUENCE(1,${raters}),k+1-p,0)-MMULT(TRANSPOSE(u*v),u)+p*TRANSPOSE(p),MMULT(MINVERSE(a),d))`
   );
 }
 
 function remainderNative(ratings: string, rows: number, raters: number, severities: string): string {
   return (
-    `LET(x,${ratings},u,IF(x<>"",1,0),y,IF(x<>"",x-${severities},0),n,MMULT(u,SEQUENCE(${raters},1,1,0)),` +
-    `m,MMULT(y,SEQUENCE(${raters},1,1,0))*IF(n>0,1/n,0),MAX(ABS(MMULT(TRANSPOSE(IF(x<>"",y-m,0)),SEQUENCE(${rows},1,1,0)))))`
+    `LET(x,${ratings},u,IF(x<"",1,0),y,IF(x<"",x-${severities},0),n,MMULT(u,SEQUENCE(${raters},1,1,0)),` +
+    `m,MMULT(y,SEQUENCE(${raters},1,1,0))*IF(n>0,1/n,0),MAX(ABS(MMULT(TRANSPOSE(IF(x<"",y-m,0)),SEQUENCE(${rows},1,1,0)))))`
   );
 }
 

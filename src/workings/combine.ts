@@ -64,7 +64,7 @@ function addMinimums(
 
 function allMetNative(call: WorkingsCall, entry: string): string {
   const minimums = acrossNative(call, "minimums");
-  return `SUM(IF(${minimums}<>"",IF(${entry}<${minimums},1,0),0))=0`;
+  return `SUM(IF(${minimums}<"",IF(${entry}<${minimums},1,0),0))=0`;
 }
 
 /** Answers for each price: the first that is filled is worked. */

@@ -95,7 +95,7 @@ export function CUTOFF_REPORT(call: WorkingsCall): readonly Step[] {
   };
   steps
     .add("scores used", sample.count, n)
-    .add("blanks skipped", blanks, `SUM(IF(${range}="",1,0))`)
+    .add("blanks skipped", blanks, `SUM(IF(${range}<"",0,1))`)
     .add("curve mean", curve.shownMean, `AVERAGE(${scaleNative(range, shape, power)})`)
     .add("curve standard deviation", curve.shownSd, `STDEV.S(${shiftedNative(range, shape, power)})`)
     .add(

@@ -31,7 +31,7 @@ export function SCORE_SUMMARY(call: WorkingsCall): readonly Step[] {
   const steps = new Steps()
     .add("sum of squared distances from the mean", summary.sumOfSquares, `DEVSQ(${range})`)
     .add("scores used", summary.count, countNative(range))
-    .add("blanks skipped", blanks, `SUM(IF(${range}="",1,0))`)
+    .add("blanks skipped", blanks, `SUM(IF(${range}<"",0,1))`)
     .add("mean", summary.mean, `AVERAGE(${range})`)
     .add("standard deviation", summary.sd, `STDEV.S(${range})`)
     .add("standard error of the mean", summary.meanError, `STDEV.S(${range})/SQRT(${countNative(range)})`)

@@ -1,6 +1,9 @@
 /*
  * Pieces of native formulas: texts that the host's own functions compute. Operands are texts too: a caller's address, a literal, or an
  * expression in parentheses.
+ *
+ * `x<""` picks the numbers of a range: in the order of the host every number stands before every text, and a blank cell, "" and a cell of
+ * spaces do not. `x<>""` would take the spaces for a score.
  */
 
 /** A number of ours inside a native formula, all its digits; a negative one in parentheses. */

@@ -39,12 +39,12 @@ export function andersonDarlingTailNative(adjusted: string, value: number): stri
  */
 export function fittedPowerCheck(range: string, { shape, power = 0 }: Curve, { minimum, maximum }: Sample): Step {
   const lambda = literal(power);
-  const logs = `l,IF(${range}<>"",LN(${range}),""),g,AVERAGE(l)`;
+  const logs = `l,IF(${range}<"",LN(${range}),""),g,AVERAGE(l)`;
   const far = Math.abs(power) * Math.log(maximum / minimum) > NEAR;
   const slope = far
-    ? `LET(${logs},u,IF(${range}<>"",EXP(${lambda}*(l-g)),""),1/${lambda}-SUM(IF(${range}<>"",u*(l-g)*(u-AVERAGE(u)),0))/DEVSQ(u))`
-    : `LET(${logs},w,IF(${range}<>"",${lambda}*(l-g),""),y,IF(${range}<>"",(l-g)*${nested(RISE, "w")},""),` +
-      `-SUM(IF(${range}<>"",(l-g)^2*${nested(BEND, "w")}*(y-AVERAGE(y)),0))/DEVSQ(y))`;
+    ? `LET(${logs},u,IF(${range}<"",EXP(${lambda}*(l-g)),""),1/${lambda}-SUM(IF(${range}<"",u*(l-g)*(u-AVERAGE(u)),0))/DEVSQ(u))`
+    : `LET(${logs},w,IF(${range}<"",${lambda}*(l-g),""),y,IF(${range}<"",(l-g)*${nested(RISE, "w")},""),` +
+      `-SUM(IF(${range}<"",(l-g)^2*${nested(BEND, "w")}*(y-AVERAGE(y)),0))/DEVSQ(y))`;
   const source = "Box & Cox 1964: the power of greatest likelihood";
   if (Math.abs(power) === 5) {
     const meaning = "check: the log-likelihood still rises at this end of the range of powers, must be TRUE";
@@ -67,8 +67,8 @@ export function logVarianceNative(range: string, { shape, power }: Curve): strin
 /** Σ ln dy/dx over the scores. */
 export function logJacobianNative(range: string, { shape, power = 0 }: Curve): string {
   if (shape.kind === "normal") return "0";
-  if (shape.kind === "lognormal") return `-SUM(IF(${range}<>"",LN(${range}),0))`;
-  if (shape.kind === "boxcox") return `${literal(power - 1)}*SUM(IF(${range}<>"",LN(${range}),0))`;
+  if (shape.kind === "lognormal") return `-SUM(IF(${range}<"",LN(${range}),0))`;
+  if (shape.kind === "boxcox") return `${literal(power - 1)}*SUM(IF(${range}<"",LN(${range}),0))`;
   const [low, high] = [literal(shape.low), literal(shape.high)];
-  return `SUM(IF(${range}<>"",LN((${high}-${low})/((${range}-${low})*(${high}-${range}))),0))`;
+  return `SUM(IF(${range}<"",LN((${high}-${low})/((${range}-${low})*(${high}-${range}))),0))`;
 }

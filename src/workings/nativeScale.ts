@@ -7,7 +7,7 @@ import { literal } from "./native";
 
 /** How many scores a range holds; written-out arrays are counted by hand, since not every host lets COUNT see into one. */
 export function countNative(range: string): string {
-  return range.startsWith("{") ? `SUM(IF(${range}<>"",1,0))` : `COUNT(${range})`;
+  return range.startsWith("{") ? `SUM(IF(${range}<"",1,0))` : `COUNT(${range})`;
 }
 
 /** One score on the shape's scale: ln x, ln((x − low)/(high − x)), (x^λ − 1)/λ. `score` is an address, a literal or something in parentheses. */
@@ -20,7 +20,7 @@ export function pointNative(score: string, shape: Shape, power?: number): string
 
 /** The scores of a range on the shape's scale, for use inside AVERAGE, STDEV.S and the like, which skip what was blank. */
 export function scaleNative(range: string, shape: Shape, power?: number): string {
-  return shape.kind === "normal" ? range : `IF(${range}<>"",${pointNative(range, shape, power)},"")`;
+  return shape.kind === "normal" ? range : `IF(${range}<"",${pointNative(range, shape, power)},"")`;
 }
 
 /**
@@ -28,13 +28,13 @@ export function scaleNative(range: string, shape: Shape, power?: number): string
  * 1, the 1 would swallow its digits.
  */
 export function shiftedNative(range: string, shape: Shape, power?: number): string {
-  return shape.kind === "normal" ? range : `IF(${range}<>"",${shiftedPoint(range, shape, power)},"")`;
+  return shape.kind === "normal" ? range : `IF(${range}<"",${shiftedPoint(range, shape, power)},"")`;
 }
 
 /** The scores up to a constant as one column in rising order, without the blanks, of a range of any form. Needs TOCOL (Excel 365). */
 export function orderedNative(range: string, shape: Shape, power?: number): string {
   const point = shape.kind === "normal" ? `${range}*1` : shiftedPoint(range, shape, power);
-  return `SORT(TOCOL(IF(${range}<>"",${point},NA()),3))`;
+  return `SORT(TOCOL(IF(${range}<"",${point},NA()),3))`;
 }
 
 /** From a point of the scale back to a score. */

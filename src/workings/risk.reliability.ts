@@ -81,8 +81,8 @@ export function SCORE_VALIDITY(call: WorkingsCall): readonly Step[] {
   const [a, b] = [call.text("scores"), call.text("outcomes")];
   const r = `CORREL(${a},${b})`;
   // Only rows with both count.
-  const count = `SUM(IF(${a}<>"",IF(${b}<>"",1,0),0))`;
-  const sd = `STDEV.S(IF(${a}<>"",IF(${b}<>"",${a},""),""))`;
+  const count = `SUM(IF(${a}<"",IF(${b}<"",1,0),0))`;
+  const sd = `STDEV.S(IF(${a}<"",IF(${b}<"",${a},""),""))`;
   const half = `NORM.S.INV((1+${call.text("confidence", "0.95")})/2)/SQRT(${count}-3)`;
   const k = `(${call.text("unselected_sd")}/${sd})`;
   const steps = new Steps()

@@ -67,7 +67,7 @@ export function DRIFT_COMPARISON(call: WorkingsCall): readonly Step[] {
 }
 
 function distancesNative(range: string): string {
-  return `IF(${range}<>"",ABS(${range}-MEDIAN(${range})),"")`;
+  return `IF(${range}<"",ABS(${range}-MEDIAN(${range})),"")`;
 }
 
 function meanDistanceNative(range: string): string {
@@ -88,8 +88,8 @@ function forsytheTail(statistic: string, n: string, m: string): string {
 
 /** The largest difference of the two shares at or below a score, over all scores. */
 function distanceNative(a: string, b: string): string {
-  const share = (range: string) => `SUM(IF(${range}<>"",IF(${range}<=v,1,0),0))/${countNative(range)}`;
-  const at = (range: string) => `MAX(MAP(${range},LAMBDA(v,IF(v="",0,ABS(${share(a)}-${share(b)})))))`;
+  const share = (range: string) => `SUM(IF(${range}<"",IF(${range}<=v,1,0),0))/${countNative(range)}`;
+  const at = (range: string) => `MAX(MAP(${range},LAMBDA(v,IF(v<"",ABS(${share(a)}-${share(b)}),0))))`;
   return `MAX(${at(a)},${at(b)})`;
 }
 
@@ -98,7 +98,7 @@ function distanceNative(a: string, b: string): string {
  * from the left or from below, and counts as touched where the path is that far out and the next score is another.
  */
 function pathsNative(a: string, b: string, distance: string): string {
-  const column = (range: string) => `TOCOL(IF(${range}<>"",${range}*1,NA()),3)`;
+  const column = (range: string) => `TOCOL(IF(${range}<"",${range}*1,NA()),3)`;
   return (
     `LET(n,${countNative(a)},m,${countNative(b)},g,ROUND((${distance})*n*m,0),z,SORT(VSTACK(${column(a)},${column(b)})),` +
     `l,REDUCE(SEQUENCE(1,m+1)*0,SEQUENCE(n+1,1,0),LAMBDA(p,i,SCAN(0,SEQUENCE(1,m+1,0),LAMBDA(q,j,IF(i+j=0,0,` +

@@ -84,7 +84,7 @@ function foldedScores(call: WorkingsCall): (i: number, start: string, step: stri
   const inLine = parseAddress(text) !== undefined && (columns === 1 || range.length === 1);
   return (i, start, step) => {
     const place = places[i]!;
-    const over = `IF(x="",a,${step})`;
+    const over = `IF(x<"",${step},a)`;
     if (inLine) {
       const upTo = columns === 1 ? call.partText("recent", 0, 0, place, 0) : call.partText("recent", 0, 0, 0, place);
       return `REDUCE(${start},${upTo},LAMBDA(a,x,${over}))`;

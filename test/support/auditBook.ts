@@ -52,6 +52,9 @@ export function sheetRows(cells: Readonly<Record<string, Cell | CellXml>>): stri
 }
 
 function cellXml(address: string, { f, v, attributes = "", formulaAttributes = "" }: CellXml): string {
+  // Without a formula as Excel writes a text in place, so that a reader keeps its spaces.
+  if (f === undefined && typeof v === "string")
+    return `<c r="${address}" t="inlineStr"${attributes}><is><t xml:space="preserve">${escape(v)}</t></is></c>`;
   const formula = f === undefined ? "" : `<f${formulaAttributes}>${escape(f)}</f>`;
   const [kind, value] =
     v === undefined || v === null

@@ -2,7 +2,7 @@ import { readFileSync } from "node:fs";
 import { createRequire } from "node:module";
 import { join } from "node:path";
 import * as ironcalc from "@ironcalc/wasm";
-import { isBlank, isCellError, type Cell } from "../../src/sheet/cell";
+import { isCellError, type Cell } from "../../src/sheet/cell";
 
 const resolve = createRequire(__filename).resolve;
 let started = false;
@@ -22,7 +22,7 @@ export class NativeSheet {
     this.model.pauseEvaluation();
     columns.forEach((cells, c) =>
       cells.forEach((cell, r) => {
-        if (!isBlank(cell)) this.model.setUserInput(0, r + 1, c + 1, inputText(cell));
+        if (!isEmpty(cell)) this.model.setUserInput(0, r + 1, c + 1, inputText(cell));
       }),
     );
     this.model.resumeEvaluation();
@@ -47,6 +47,11 @@ export class NativeSheet {
 }
 
 const CELL = (row: number) => `$CV$${row}`;
+
+/** A cell of spaces is put in as it is: a text to the engine, a blank to our functions. */
+function isEmpty(cell: Cell): boolean {
+  return cell === null || cell === undefined || cell === "";
+}
 
 function inputText(cell: Cell): string {
   if (isCellError(cell)) return cell.code;

@@ -112,7 +112,7 @@ describe("the workings of RANK_CUTOFF", () => {
     const [, , value, native] = step("=WEIR.RANK_CUTOFF({1;2;3;4;5},25%)", "rank of the far limit");
     expect([value, native]).toEqual([
       "none",
-      '=IF((1-25%)^SUM(IF({1;2;3;4;5}<>"",1,0))>(1-0.95)/2*(1+1E-12),"none","no")',
+      '=IF((1-25%)^SUM(IF({1;2;3;4;5}<"",1,0))>(1-0.95)/2*(1+1E-12),"none","no")',
     ]);
   });
 });

@@ -29,7 +29,7 @@ describe("the workings of DRIFT_FLAGS", () => {
 
   test("a score is worked from the cells down to its own", () => {
     const row = prove("=WEIR.DRIFT_FLAGS(D2:D8,60,8)").find(([, meaning]) => meaning === "score 5: smoothed")!;
-    expect(row[3]).toBe('=REDUCE(60,D2:D7,LAMBDA(a,x,IF(x="",a,a+0.2*(x-a))))');
+    expect(row[3]).toBe('=REDUCE(60,D2:D7,LAMBDA(a,x,IF(x<"",a+0.2*(x-a),a)))');
   });
 
   test("of a long column the first and the last twenty scores are laid out", () => {
