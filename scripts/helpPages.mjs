@@ -15,15 +15,15 @@ const TOPICS = {
 };
 
 /** @returns {[path: string, text: string][]} */
-export function helpPages(table) {
+export function helpPages(table, methods) {
   return [
     ["help/help.css", helpStyle],
     ["help/index.html", indexPage(table)],
-    ...table.map((entry) => [entry.helpPath, functionPage(entry, table)]),
+    ...table.map((entry) => [entry.helpPath, functionPage(entry, table, methods)]),
   ];
 }
 
-function functionPage(entry, table) {
+function functionPage(entry, table, methods) {
   const { name, topic, description, parameters, returns, examples, questions, cautions } = entry;
   const signature = (separator) =>
     `=WEIR.${name}(${parameters.map((one) => (one.optional ? `[${one.name}]` : one.name)).join(`${separator} `)})`;
@@ -45,6 +45,10 @@ ${parameters.length > 0 ? `<h2>What it takes</h2>\n<dl>${parameters.map(paramete
 <h2>Examples</h2>
 ${examples.map(exampleText).join("\n")}
 ${list("Questions that it answers", questions)}
+${methods
+  .filter(({ functions }) => functions.includes(name))
+  .map(methodText)
+  .join("\n")}
 ${siblings.length > 0 ? `<h2>Beside it</h2>\n<ul class="names">${siblings.map(nameLink).join("\n")}</ul>` : ""}`,
   );
 }
@@ -82,6 +86,26 @@ function exampleText({ formula, value }) {
   const semicolon = withSemicolons(formula);
   const other = semicolon === undefined || semicolon === formula ? "" : `\n${escape(semicolon)}`;
   return `<div class="example"><pre><code>${escape(formula)}${other}</code></pre>\n<p class="gives">gives</p>${valueText(JSON.parse(value))}</div>`;
+}
+
+/** How it is computed, what it takes for granted and how exact it is: the page of its method, folded by section. */
+function methodText({ title, sections }) {
+  const section = ({ heading, paragraphs }) =>
+    `<h3>${escape(heading)}</h3>\n${paragraphs.map((one) => `<p>${markedText(one)}</p>`).join("\n")}`;
+  return `<section class="method"><h2>The method: ${escape(title)}</h2>\n${sections.map(section).join("\n")}</section>`;
+}
+
+/** Code, bold and italic words of the method pages. */
+function markedText(text) {
+  return text
+    .split(/(`[^`]+`)/)
+    .map((part) => {
+      if (part.startsWith("`") && part.length > 1) return `<code>${breakable(part.slice(1, -1))}</code>`;
+      return escape(part)
+        .replace(/\*\*([^*]+)\*\*/g, "<strong>$1</strong>")
+        .replace(/\*([^*]+)\*/g, "<em>$1</em>");
+    })
+    .join("");
 }
 
 function valueText(value) {

@@ -52,6 +52,15 @@ h2 {
   margin: 0 0 0.75rem;
   font-size: 1.15rem;
 }
+h3 {
+  margin: 1.25rem 0 0.25rem;
+  font-size: 0.9375rem;
+  font-weight: 600;
+}
+.method p {
+  margin: 0.25rem 0 0.5rem;
+  overflow-wrap: break-word;
+}
 .caution {
   margin-top: 1.5rem;
   padding-left: 1rem;

@@ -3,6 +3,7 @@ import { readFileSync } from "node:fs";
 import { dirname, join } from "node:path";
 import { fileURLToPath } from "node:url";
 import { helpPages } from "./helpPages.mjs";
+import { methodPages } from "./methodPages.mjs";
 import { hostMetadata } from "./hostMetadata.mjs";
 
 const tablePath = join(dirname(fileURLToPath(import.meta.url)), "../src/functions/functions.json");
@@ -10,5 +11,8 @@ const tablePath = join(dirname(fileURLToPath(import.meta.url)), "../src/function
 /** @returns {[path: string, text: string][]} paths are relative to where the add-in is served. */
 export function hostFiles(origin) {
   const table = JSON.parse(readFileSync(tablePath, "utf8"));
-  return [["functions.json", `${JSON.stringify(hostMetadata(table, origin), null, 1)}\n`], ...helpPages(table)];
+  return [
+    ["functions.json", `${JSON.stringify(hostMetadata(table, origin), null, 1)}\n`],
+    ...helpPages(table, methodPages()),
+  ];
 }
