@@ -36,6 +36,8 @@ const BOTTOM = 46;
 const LEFT = 34;
 const RIGHT = 12;
 const RUG = 8;
+/** Bold letters of 12 are as wide as plain ones of 14. */
+const BOLD_SIZE = 14;
 
 /** The scores as they lie: a pale histogram, a stroke for every score below it, the fitted curve, the cutoff and the band of its limits. */
 export function histogram(input: HistogramInput, { width, height }: Size): PictureModel {
@@ -137,7 +139,7 @@ function markParts({ cutoff, lower, upper, cutoffWords, limitsWords }: Histogram
   const [at] = inside([cutoff], x);
   const parts: Part[] = [
     path("mark", line(at!, TOP - 4, at!, floor + RUG + 3)),
-    text("mark-label", within(at!, cutoffWords, 0, to + RIGHT, 12), 12, cutoffWords),
+    text("mark-label", within(at!, cutoffWords, 0, to + RIGHT, BOLD_SIZE), 12, cutoffWords),
   ];
   if (limitsWords === undefined || lower === undefined || upper === undefined) return parts;
   const [left, right] = inside([lower, upper], x);

@@ -9,7 +9,7 @@ export function problemWords(typed: Typed, text: string, texts: Texts, numbers: 
     case "empty":
       return texts.problemEmpty;
     case "no-number":
-      return texts.problemNoNumber;
+      return texts.problemNoNumber(text.trim());
     case "percent-sign-missing":
       return texts.problemPercent(text.trim(), `${text.trim()}${numbers.percentGap}%`);
     case "not-between":
@@ -17,6 +17,8 @@ export function problemWords(typed: Typed, text: string, texts: Texts, numbers: 
     case "not-whole":
       return texts.problemNotWhole;
     case "too-small":
-      return texts.problemTooSmall;
+      return texts.problemTooSmall(numbers.full(typed.least));
+    case "not-positive":
+      return texts.problemNotPositive;
   }
 }

@@ -3,7 +3,8 @@ import type { Decimal } from "../plot/numberStyle";
 /** What was typed, read: a value, or why it can't be one. */
 export type Typed =
   | { readonly value: number }
-  | { readonly problem: "empty" | "no-number" | "not-between" | "percent-sign-missing" | "not-whole" | "too-small" };
+  | { readonly problem: "empty" | "no-number" | "not-between" | "percent-sign-missing" | "not-whole" | "not-positive" }
+  | { readonly problem: "too-small"; readonly least: number };
 
 /**
  * Reads a number as people type it. The user's own decimal mark counts; the other one is taken for a decimal mark too, except where it can
@@ -18,7 +19,8 @@ export function typedNumber(typed: string, decimal: Decimal): number | undefined
   if (marks.length > 1) return undefined;
   const pointed = plain.replace(/,/g, ".");
   if (!/^[-+]?(\d+\.?\d*|\.\d+)(e[-+]?\d+)?$/i.test(pointed)) return undefined;
-  return Number(pointed);
+  // Written out, 1e999 is a number; here it would be taken for an endless one.
+  return Number.isFinite(Number(pointed)) ? Number(pointed) : undefined;
 }
 
 /** Reads a fraction: `5%`, `5 %`, `0.05`, `0,05`. A bare 5 is asked back, never taken for 5 %. With `whole` 100 % may be typed too. */
@@ -39,7 +41,7 @@ export function typedCount(typed: string, decimal: Decimal, least = 1): Typed {
   const value = typedNumber(typed, decimal);
   if (value === undefined) return { problem: "no-number" };
   if (!Number.isInteger(value)) return { problem: "not-whole" };
-  return value >= least ? { value } : { problem: "too-small" };
+  return value >= least ? { value } : { problem: "too-small", least };
 }
 
 /** Reads an amount of at least 0. */
@@ -47,5 +49,5 @@ export function typedAmount(typed: string, decimal: Decimal): Typed {
   if (typed.trim() === "") return { problem: "empty" };
   const value = typedNumber(typed, decimal);
   if (value === undefined) return { problem: "no-number" };
-  return value >= 0 ? { value } : { problem: "too-small" };
+  return value >= 0 ? { value } : { problem: "too-small", least: 0 };
 }

@@ -136,6 +136,9 @@ describe.skipIf(withoutBrowser)("files of the user's own in the trial page", () 
     await loaded;
     await computed(sheet);
     expect((await sheet.read("dropped!B2")).values).toEqual([[50.5]]);
+    // Its first cell is selected, which holds no score: the pane has something else to try.
+    await sheet.page.getByRole("button", { name: "Try it with invented scores" }).click();
+    await sheet.page.getByText("48 scores").first().waitFor();
   });
 
   test("where the browser keeps nothing, it says so and leaves the workbook as it was", async () => {

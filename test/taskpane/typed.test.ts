@@ -28,6 +28,7 @@ describe("a typed fraction", () => {
     ["250", "not-between"],
     ["-5%", "not-between"],
     ["five", "no-number"],
+    ["1e999", "no-number"],
     ["1.2.3", "no-number"],
     ["", "empty"],
     ["  ", "empty"],
@@ -45,7 +46,7 @@ describe("a typed fraction", () => {
 
   test("a count is whole", () => {
     expect(typedCount("12.5", ".")).toEqual({ problem: "not-whole" });
-    expect(typedCount("0", ".")).toEqual({ problem: "too-small" });
+    expect(typedCount("0", ".")).toEqual({ problem: "too-small", least: 1 });
     expect(typedCount("12", ".")).toEqual({ value: 12 });
   });
 });

@@ -6,7 +6,7 @@ import { answerCutoff } from "../../src/taskpane/cutoff/answerCutoff";
 import { FIRST_QUESTION } from "../../src/taskpane/cutoff/question";
 import { checkTarget } from "../../src/taskpane/target/targetCells";
 import { freeColumn } from "../../src/taskpane/target/freeColumn";
-import { driftOf, marksOf, markToday, writeMark } from "../../src/taskpane/use/fixedMarks";
+import { driftOf, marksOf, markToday, tiesAt, writeMark } from "../../src/taskpane/use/fixedMarks";
 import { askPassRates, groupRates, groupsAddress, passRatesFormula } from "../../src/taskpane/use/passRatesOf";
 import { verdictCounts } from "../../src/taskpane/use/verdictView";
 import { verdictFormula } from "../../src/taskpane/use/verdictFormula";
@@ -72,6 +72,18 @@ describe("a fixed mark", () => {
     expect(mark).toMatchObject({ mark: 84.8, kind: "safe", count: 57, scores: "Ropes!A2:A61", confidence: 0.95 });
   });
 
+  test("off the grid is the cutoff with all its digits, then and today", () => {
+    const exact = markToday(answer, "safe", "Agreed by the panel", "2025-03-14", 1, false)!;
+    expect(exact.mark).toBeCloseTo(84.78644216025558, 9);
+    expect(exact.mark).toBe(exact.cutoff);
+    expect(driftOf(call, column, exact)).toEqual({ today: exact.mark, count: 57 });
+  });
+
+  test("knows how many entries score just that", () => {
+    expect(tiesAt({ values: Float64Array.of(70, 71.5, 71.5, 72) }, 71.5)).toBe(2);
+    expect(tiesAt({ values: Float64Array.of(70, 71.5) }, 71)).toBe(0);
+  });
+
   test("goes on a sheet of its own, below its forerunners, and is found again", async () => {
     const port = book();
     expect(await writeMark(port, mark)).toBe("'Fixed marks'!A2");
@@ -121,6 +133,9 @@ describe("the cell that a formula goes into", () => {
     ["somewhere", { kind: "bad" }],
     ["B2:B3", { kind: "bad" }],
     ["A7", { kind: "inside" }],
+    ["Round2!B2", { kind: "no-sheet", sheet: "Round2" }],
+    ["B1048570", { kind: "edge" }],
+    ["XFD1", { kind: "edge" }],
     ["C2", { kind: "free", address: "Ropes!C2" }],
     ["E9", { kind: "taken", address: "Ropes!E9", holds: "mine" }],
     ["D3", { kind: "no-room", area: "D3:E16", first: "E9", holds: "mine" }],

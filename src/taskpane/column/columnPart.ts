@@ -7,6 +7,7 @@ import { part, type PanePart } from "../dom/part";
 import { typedNumber } from "../typed";
 import type { Follower, Selection } from "./followSelection";
 import type { Column, Offender } from "./readColumn";
+import { putInventedScores } from "./inventedScores";
 import { listed } from "./listed";
 
 const MOST_LISTED = 8;
@@ -91,13 +92,14 @@ function selectionWords(context: PaneContext, follower: Follower, selection: Sel
   const current = column.get();
   if (selection.kind === "failed") return [element("p", { class: "notice" }, texts.readFailed(selection.message))];
   if (selection.kind === "reading") return [element("p", {}, texts.reading)];
-  if (selection.kind === "nothing") return current ? [] : [element("p", {}, texts.noColumn)];
+  if (selection.kind === "nothing") return current ? [] : [element("p", {}, texts.noColumn), tryOut(context)];
   if (selection.kind === "no-numbers") {
     const { address, letters } = selection;
     const words = current ? texts.stillShowing(address, current.address) : texts.noNumbers(address);
     return [
       element("p", { class: "quiet" }, words),
       ...(letters === "" ? [] : [button(texts.takeColumn(letters), () => void follower.takeColumn(letters), "plain")]),
+      ...(current ? [] : [tryOut(context)]),
     ];
   }
   if (selection.kind === "columns") {
@@ -116,4 +118,19 @@ function selectionWords(context: PaneContext, follower: Follower, selection: Sel
     ];
   }
   return [];
+}
+
+/** A way to see the pane at work where no scores are at hand yet. */
+function tryOut({ texts, port }: PaneContext): HTMLElement {
+  const message = element("span", { "aria-live": "polite" });
+  const act = button(
+    texts.inventedTry,
+    () => {
+      putInventedScores(port, texts.inventedSheet, texts.inventedHeading).catch((failure: unknown) => {
+        message.textContent = texts.writeFailed(failure instanceof Error ? failure.message : String(failure));
+      });
+    },
+    "plain",
+  );
+  return element("p", { class: "actions" }, act, message);
 }

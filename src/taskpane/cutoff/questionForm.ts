@@ -54,7 +54,7 @@ function shapeFields(
   const bound = (label: string, key: "low" | "high", value: string) => {
     const made = field(label, local(value), (text) => {
       const typed = typedNumber(text, numbers.decimal);
-      made.problem(typed === undefined ? texts.problemNoNumber : "");
+      made.problem(typed === undefined ? texts.problemNoNumber(text.trim()) : "");
       if (typed === undefined) return;
       bounds[key] = typed;
       changed(logit());

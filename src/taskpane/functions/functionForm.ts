@@ -6,7 +6,7 @@ import { choice } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { field } from "../dom/field";
 import { rangeField } from "../dom/rangeField";
-import { formulaText, type FormulaArgument } from "../formula";
+import { formulaText, localFormula, type FormulaArgument } from "../formula";
 import { formulaTarget } from "../target/formulaTarget";
 import { outcomeView } from "./outcomeView";
 import { referredValue, typedArgument } from "./typedArgument";
@@ -82,9 +82,28 @@ export function functionForm(context: PaneContext, entry: FunctionEntry): HTMLEl
     "div",
     { class: "form" },
     element("p", { lang: "en" }, entry.description),
+    ...examples(context, entry),
+    helpLink(context, entry),
     ...entry.cautions.map((caution) => element("p", { class: "caution", lang: "en" }, caution)),
     element("div", { class: "fields" }, ...lines),
     value,
     target.root,
   );
+}
+
+/** The examples of the table, each with its value: the tests hold them. */
+function examples({ texts, numbers }: PaneContext, { examples: list }: FunctionEntry): HTMLElement[] {
+  if (list.length === 0) return [];
+  const line = ({ formula, value }: FunctionEntry["examples"][number]) =>
+    element("li", {}, element("code", {}, localFormula(formula, numbers.separators)), ` → ${value}`);
+  return [
+    element("p", { class: "formula-label" }, texts.examples),
+    element("ul", { class: "examples" }, ...list.map(line)),
+  ];
+}
+
+/** The page of the function: what it assumes, how it was checked, where it hurts. */
+function helpLink({ texts }: PaneContext, { helpPath, name }: FunctionEntry): HTMLElement {
+  const link = element("a", { href: helpPath, target: "_blank", rel: "noopener" }, texts.helpPage(`WEIR.${name}`));
+  return element("p", {}, link);
 }

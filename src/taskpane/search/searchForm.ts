@@ -68,5 +68,5 @@ export function reserveForm(context: Part, search: Observable<SearchQuestion>): 
 function typedPositive(text: string, decimal: "." | ","): Typed {
   const value = typedNumber(text, decimal);
   if (value === undefined) return { problem: text.trim() === "" ? "empty" : "no-number" };
-  return value > 0 ? { value } : { problem: "too-small" };
+  return value > 0 ? { value } : { problem: "not-positive" };
 }

@@ -48,14 +48,20 @@ export function formulaTarget(context: PaneContext): FormulaTarget {
     if (check.kind === "free") return void write(check.address);
     if (check.kind === "missing") return say(texts.targetMissing);
     if (check.kind === "bad") return say(texts.targetBad(cell.input.value.trim()));
+    if (check.kind === "no-sheet") return say(texts.targetNoSheet(check.sheet));
+    if (check.kind === "edge") return say(texts.targetEdge);
     if (check.kind === "inside") return say(texts.targetInside);
-    if (check.kind === "no-room") return say(texts.targetNoRoom(check.area, check.first, cellShown(check.holds)));
+    if (check.kind === "no-room")
+      return say(texts.targetNoRoom(check.area, check.first, cellShown(check.holds, texts.quoted)));
     const replace = button(texts.replace, () => void write(check.address));
     const keep = button(texts.keep, () => {
       fill(answer);
       cell.input.focus();
     });
-    say(texts.targetTaken(check.address, cellShown(check.holds)), element("p", { class: "actions" }, replace, keep));
+    say(
+      texts.targetTaken(check.address, cellShown(check.holds, texts.quoted)),
+      element("p", { class: "actions" }, replace, keep),
+    );
   }
 
   selected.watch((address) => {

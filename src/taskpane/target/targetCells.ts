@@ -8,6 +8,9 @@ import { isBlank, isCellError, type Cell } from "../../sheet/cell";
 export type TargetCheck =
   | { readonly kind: "missing" }
   | { readonly kind: "bad" }
+  | { readonly kind: "no-sheet"; readonly sheet: string }
+  /** The result would reach over the edge of the sheet. */
+  | { readonly kind: "edge" }
   /** The cell lies inside the range that the formula reads. */
   | { readonly kind: "inside" }
   | { readonly kind: "free"; readonly address: string }
@@ -15,6 +18,13 @@ export type TargetCheck =
   | { readonly kind: "taken"; readonly address: string; readonly holds: Cell }
   /** A cell that the result would spill into holds something. */
   | { readonly kind: "no-room"; readonly area: string; readonly first: string; readonly holds: Cell };
+
+const LAST_ROW = 1_048_575;
+const LAST_COLUMN = 16_383;
+
+async function hasSheet(port: Port, wanted: string): Promise<boolean> {
+  return (await port.sheetNames()).some((name) => name.toLowerCase() === wanted.toLowerCase());
+}
 
 /** Looks at the cells that a formula would fill, before anything is written. */
 export async function checkTarget(
@@ -34,6 +44,8 @@ export async function checkTarget(
     bottom: cell.top + rows - 1,
     right: cell.left + columns - 1,
   };
+  if (area.bottom > LAST_ROW || area.right > LAST_COLUMN) return { kind: "edge" };
+  if (cell.sheet !== undefined && !(await hasSheet(port, cell.sheet))) return { kind: "no-sheet", sheet: cell.sheet };
   if (source && overlap(area, source)) return { kind: "inside" };
   const address = formatAddress({ ...area, bottom: area.top, right: area.left });
   const { values } = await port.read(formatAddress(area));
@@ -53,10 +65,10 @@ export async function checkTarget(
   return isBlank(holds) ? { kind: "free", address } : { kind: "taken", address, holds };
 }
 
-/** A cell's content in a sentence. */
-export function cellShown(cell: Cell): string {
+/** A cell's content in a sentence; `quoted` puts a text between the marks of the language. */
+export function cellShown(cell: Cell, quoted: (text: string) => string): string {
   if (isCellError(cell)) return cell.code;
   if (typeof cell === "boolean") return cell ? "TRUE" : "FALSE";
   const words = String(cell).trim();
-  return typeof cell === "string" ? `“${words.length > 30 ? `${words.slice(0, 30)}…` : words}”` : words;
+  return typeof cell === "string" ? quoted(words.length > 30 ? `${words.slice(0, 30)}…` : words) : words;
 }

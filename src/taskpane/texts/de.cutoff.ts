@@ -102,6 +102,8 @@ export const deCutoff: Translated<typeof enCutoff> = {
   putDone: (address) => `Die Formel steht in ${address}.`,
   targetMissing: "Nennen Sie die Zelle, etwa H2.",
   targetBad: (typed) => `„${typed}“ ist keine Adresse einer einzelnen Zelle wie H2.`,
+  targetNoSheet: (sheet) => `Es gibt kein Blatt „${sheet}“.`,
+  targetEdge: "Das Ergebnis reichte über den Rand des Blatts. Wählen Sie eine Zelle weiter oben oder weiter links.",
   targetInside: "Diese Zelle gehört zu den Werten: die Formel läse sich selbst.",
   targetTaken: (address, shown) => `${address} enthält ${shown}. Soll das ersetzt werden?`,
   targetNoRoom: (area, first, shown) =>

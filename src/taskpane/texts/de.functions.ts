@@ -21,6 +21,8 @@ export const deFunctions: Translated<typeof enFunctions> = {
   noneFound: "Keine Funktion passt. Versuchen Sie es mit einem Wort weniger oder einem anderen Thema.",
   showAll: (count) => `Alle ${count} zeigen`,
   backToList: "Zurück zur Liste",
+  examples: "Beispiele",
+  helpPage: (name) => `Hilfe zu ${name} (englisch)`,
   useSelection: "Die Auswahl nehmen",
   argumentOptional: (name) => `${name} (darf leer bleiben)`,
   argumentLeftOut: "weggelassen",

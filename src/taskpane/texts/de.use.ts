@@ -10,6 +10,8 @@ export const deUse: Translated<typeof enUse> = {
     `Erreicht (clears): ${clears}. Zu knapp (too close to call): ${close}. Verfehlt (falls short): ${short}.`,
   verdictWhere:
     "Ein Eintrag erreicht die Schwelle jenseits der ferneren Grenze und verfehlt sie vor der näheren; dazwischen können diese Werte es nicht sagen.",
+  verdictCaution:
+    "Ein Urteil sortiert, was genau anzusehen ist: Es nimmt niemanden an und lehnt niemanden ab. „Zu knapp“ entscheiden Menschen.",
   verdictColumn: "Urteil",
   verdictWrite: "Die Urteile in die nächste freie Spalte schreiben",
   verdictDone: (area) => `Die Urteile stehen in ${area}.`,
@@ -26,6 +28,11 @@ export const deUse: Translated<typeof enUse> = {
   markLow: (mark) => `bis ${mark}`,
   markProposal: (mark, count) =>
     `Es wäre: ${mark}, auf dem Raster der Werte, aus ${count} davon. Das kommt auf das Blatt „Fixed marks“.`,
+  markProposalExact: (mark, count) =>
+    `Es wäre: ${mark}, wie aus ${count} Werten berechnet. Das kommt auf das Blatt „Fixed marks“.`,
+  markOnGrid: "Auf dem Raster der Werte: eine Schwelle, die ein Wert treffen kann",
+  markTies: (count, mark) =>
+    `${count} Einträge haben genau ${mark}: Sie passieren gemeinsam, um so viele kann der Anteil verfehlt werden.`,
   markWrite: "Festschreiben",
   markDone: (where) => `Sie steht in ${where}.`,
   markFixed: (mark, date, count) => `Festgeschrieben am ${date} aus ${count} Werten: ${mark}.`,

@@ -101,6 +101,8 @@ export const enCutoff = {
   putDone: (address: string) => `The formula stands in ${address}.`,
   targetMissing: "Say which cell, such as H2.",
   targetBad: (typed: string) => `“${typed}” is no address of one cell, such as H2.`,
+  targetNoSheet: (sheet: string) => `There is no sheet “${sheet}”.`,
+  targetEdge: "The result would reach over the edge of the sheet. Choose a cell further up or to the left.",
   targetInside: "That cell belongs to the scores: the formula would read itself.",
   targetTaken: (address: string, shown: string) => `${address} holds ${shown}. Shall it be replaced?`,
   targetNoRoom: (area: string, first: string, shown: string) =>

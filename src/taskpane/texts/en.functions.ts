@@ -19,6 +19,8 @@ export const enFunctions = {
   noneFound: "No function fits. Try one word less, or another topic.",
   showAll: (count: string) => `Show all ${count}`,
   backToList: "Back to the list",
+  examples: "Examples",
+  helpPage: (name: string) => `Help on ${name}`,
   useSelection: "Use the selection",
   argumentOptional: (name: string) => `${name} (may stay empty)`,
   argumentLeftOut: "left out",

@@ -5,6 +5,7 @@ export const enPane = {
   // The pane as a whole
   jumpTo: "Go to",
   language: "Language",
+  quoted: (text: string) => `“${text}”`,
   listAnd: (before: string, last: string) => `${before} and ${last}`,
   listMore: (shown: string, more: string) => `${shown} and ${more} more`,
 
@@ -33,15 +34,19 @@ export const enPane = {
   holdsFlag: (shown: string) => `holds ${shown}`,
   holdsError: (code: string) => `holds the error ${code}`,
   moreOffenders: (count: string) => `and ${count} more`,
+  inventedTry: "Try it with invented scores, on a sheet of their own",
+  inventedSheet: "Invented scores",
+  inventedHeading: "score (invented)",
   holdColumn: "Hold on to this column",
   reading: "Reading…",
   readFailed: (message: string) => `The sheet could not be read: ${message}`,
 
   // What was typed
   problemEmpty: "Type a value.",
-  problemNoNumber: "That can't be read as a number.",
-  problemPercent: (typed: string, meant: string) => `${typed} is more than all of them. Did you mean ${meant}?`,
+  problemNoNumber: (typed: string) => `“${typed}” is no number. Type it in digits.`,
+  problemPercent: (typed: string, meant: string) => `${typed} would be more than 100%. Did you mean ${meant}?`,
   problemNotBetween: "It must lie between 0% and 100%, neither included.",
   problemNotWhole: "A whole number is needed here.",
-  problemTooSmall: "That is too small.",
+  problemTooSmall: (least: string) => `It must be at least ${least}.`,
+  problemNotPositive: "It must be more than 0.",
 } as const;

@@ -8,6 +8,8 @@ export const enUse = {
     `Clears: ${clears}. Too close to call: ${close}. Falls short: ${short}.`,
   verdictWhere:
     "An entry clears where it lies beyond the far limit and falls short before the near one; between the two these scores can't tell.",
+  verdictCaution:
+    "A verdict sorts out what to look at closely: it takes and refuses nobody. “Too close to call” is for people to settle.",
   verdictColumn: "verdict",
   verdictWrite: "Write the verdicts into the next free column",
   verdictDone: (area: string) => `The verdicts stand in ${area}.`,
@@ -24,6 +26,11 @@ export const enUse = {
   markLow: (mark: string) => `${mark} or less`,
   markProposal: (mark: string, count: string) =>
     `It would be: ${mark}, on the grid of the scores, from ${count} of them. It goes on the sheet “Fixed marks”.`,
+  markProposalExact: (mark: string, count: string) =>
+    `It would be: ${mark}, as computed from ${count} scores. It goes on the sheet “Fixed marks”.`,
+  markOnGrid: "On the grid of the scores: a mark that a score can have",
+  markTies: (count: string, mark: string) =>
+    `${count} entries score exactly ${mark}: they pass together, so the share may be missed by that many.`,
   markWrite: "Write it down",
   markDone: (where: string) => `It stands in ${where}.`,
   markFixed: (mark: string, date: string, count: string) => `Fixed on ${date} from ${count} scores: ${mark}.`,

@@ -1,20 +1,21 @@
 import type { FixedMark, FixedMarkKind } from "../../sheet/fixedMark";
 import type { PaneContext } from "../context";
 import { afterPaint } from "../afterPaint";
-import { button, choice } from "../dom/choice";
+import { button, choice, tickBox } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { field } from "../dom/field";
 import { fold } from "../dom/part";
 import { figure, table } from "../dom/table";
-import { driftOf, marksOf, markToday, writeMark } from "./fixedMarks";
+import { driftOf, marksOf, markToday, tiesAt, writeMark } from "./fixedMarks";
 
 /** Writing the mark down, its history, and whether newer scores would move it. */
 export function fixedMarkView(context: PaneContext): HTMLElement {
   const { texts, call, port, answer } = context;
   let kind: FixedMarkKind = "plain";
+  let onGrid = true;
   const drift = element("div");
   const history = element("div");
-  const proposal = element("p");
+  const proposal = element("div", { "aria-live": "polite" });
   const message = element("p", { "aria-live": "polite" });
   const reason = field(texts.markReason, "", () => reason.problem(""), texts.markReasonHint, true);
 
@@ -22,12 +23,16 @@ export function fixedMarkView(context: PaneContext): HTMLElement {
     const current = answer.get();
     const revision = call("RELEASE", ["revision"]);
     const number = revision && "value" in revision && typeof revision.value === "number" ? revision.value : 0;
-    return current && markToday(current, kind, reason.input.value.trim(), today(), number);
+    return current && markToday(current, kind, reason.input.value.trim(), today(), number, onGrid);
   };
   const propose = () => {
     const mark = draft();
-    proposal.textContent = mark ? texts.markProposal(shownMark(context, mark), context.numbers.count(mark.count)) : "";
+    fill(proposal, ...(mark ? proposalWords(context, mark, onGrid) : []));
   };
+  const grid = tickBox(texts.markOnGrid, onGrid, (ticked) => {
+    onGrid = ticked;
+    propose();
+  });
   const kinds = choice(
     texts.markKind,
     [
@@ -70,6 +75,7 @@ export function fixedMarkView(context: PaneContext): HTMLElement {
     element("p", { class: "quiet" }, texts.markWhy),
     drift,
     element("div", { class: "fields" }, kinds.root, reason.root),
+    grid,
     proposal,
     element(
       "p",
@@ -88,6 +94,20 @@ export function fixedMarkView(context: PaneContext): HTMLElement {
     later();
   });
   return root;
+}
+
+/** What would be written down, and a warning where entries score just that: with two or more the mark can't part them. */
+function proposalWords(context: PaneContext, mark: FixedMark, onGrid: boolean): HTMLElement[] {
+  const { texts, numbers, answer } = context;
+  const shown = shownMark(context, mark);
+  const count = numbers.count(mark.count);
+  const ties = tiesAt(answer.get()!.column, mark.mark);
+  return [
+    element("p", {}, onGrid ? texts.markProposal(shown, count) : texts.markProposalExact(shown, count)),
+    ...(ties > 1
+      ? [element("p", { class: "notice" }, texts.markTies(numbers.count(ties), numbers.full(mark.mark)))]
+      : []),
+  ];
 }
 
 function today(): string {

@@ -57,20 +57,21 @@ export function cutoffOfKind({ report }: CutoffAnswer, kind: FixedMarkKind): num
   return kind === "plain" ? report?.cutoff : kind === "safe" ? report?.safe : report?.next;
 }
 
-/** The mark as it would be written down today. */
+/** The mark as it would be written down today: on the grid of the scores, or the cutoff with all its digits. */
 export function markToday(
   answer: CutoffAnswer,
   kind: FixedMarkKind,
   reason: string,
   date: string,
   revision: number,
+  onGrid = true,
 ): FixedMark | undefined {
   const { column, question, report } = answer;
   const cutoff = cutoffOfKind(answer, kind);
   if (!report || cutoff === undefined) return undefined;
   const { fraction, confidence, better, shape } = question;
   return {
-    mark: gridMark(cutoff, better, report.decimals, report.spread).mark,
+    mark: onGrid ? gridMark(cutoff, better, report.decimals, report.spread).mark : cutoff,
     better,
     date,
     reason,
@@ -97,5 +98,11 @@ export interface MarkDrift {
 export function driftOf(call: Call, column: Column, mark: FixedMark): MarkDrift {
   const { fraction, confidence, better, shape } = mark;
   const answer = answerCutoff(call, column, { fraction, confidence, better, shape });
-  return { today: markToday(answer, mark.kind, "", "", mark.revision)?.mark, count: column.count };
+  const onGrid = mark.mark !== mark.cutoff;
+  return { today: markToday(answer, mark.kind, "", "", mark.revision, onGrid)?.mark, count: column.count };
+}
+
+/** How many entries score the mark to the bit: they pass together or not at all, whatever fraction was meant. */
+export function tiesAt({ values }: Pick<Column, "values">, mark: number): number {
+  return values.reduce((ties, score) => (score === mark ? ties + 1 : ties), 0);
 }

@@ -54,6 +54,7 @@ export function verdictView(context: PaneContext): HTMLElement {
   const root = fold(
     texts.verdictHeading,
     true,
+    element("p", { class: "caution" }, texts.verdictCaution),
     counts,
     element("p", { class: "quiet" }, texts.verdictWhere),
     formula,
