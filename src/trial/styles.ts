@@ -10,6 +10,8 @@ export interface Styled {
 // The engine's numbers, written out since its own lists would bring the whole engine into the background.
 const WRAP = 3;
 const ALIGN: readonly (RoleLook["align"] | undefined)[] = [undefined, "left", "center", "right"];
+/** One step of indent, in pixels. */
+const INDENT = 9;
 const THIN = 1;
 const MEDIUM = 8;
 const USUAL_SIZE = 10;
@@ -17,7 +19,7 @@ const ORDINARY_LINE = "9AA5AE";
 
 /** The engine's style for a look. */
 export function styleOfLook({ format, look = {} }: Styled): IStyleData {
-  const { size, bold, italic, ink, fill, rule, wrap, align } = look;
+  const { size, bold, italic, ink, fill, rule, wrap, align, indent } = look;
   const style = {
     ...(format !== undefined && { n: { pattern: format } }),
     ...(size !== undefined && { fs: size }),
@@ -28,6 +30,7 @@ export function styleOfLook({ format, look = {} }: Styled): IStyleData {
     ...(rule && { bd: borderOf(rule) }),
     ...(wrap && { tb: WRAP }),
     ...(align && { ht: ALIGN.indexOf(align) }),
+    ...(indent && { pd: { [align === "right" ? "r" : "l"]: indent * INDENT } }),
   };
   return style as IStyleData;
 }
@@ -45,6 +48,7 @@ export function lookOfStyle(style: Nullable<IStyleData>): Styled | undefined {
   const ink = hexadecimal(style.cl?.rgb);
   const fill = hexadecimal(style.bg?.rgb);
   const rule = ruleOf(style.bd);
+  const indent = Math.round(((align === "right" ? style.pd?.r : style.pd?.l) ?? 0) / INDENT);
   const look: RoleLook = {
     ...(style.fs && style.fs !== USUAL_SIZE && { size: style.fs }),
     ...(style.bl && { bold: true }),
@@ -54,6 +58,7 @@ export function lookOfStyle(style: Nullable<IStyleData>): Styled | undefined {
     ...(rule && { rule }),
     ...(style.tb === WRAP && { wrap: true }),
     ...(align && { align }),
+    ...(indent > 0 && { indent }),
   };
   const format = style.n?.pattern;
   const own = Object.keys(look).length > 0;

@@ -30,6 +30,7 @@ test("law: any look comes back as it was", () => {
       ink: colour,
       fill: colour,
       wrap: yes,
+      indent: fc.integer({ min: 1, max: 15 }),
       align: fc.constantFrom("left", "center", "right" as const),
       rule: fc.record({ side: fc.constantFrom("bottom", "box", "left" as const), colour }),
     },

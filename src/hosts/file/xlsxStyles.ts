@@ -5,6 +5,7 @@ import type { CellStyle } from "./sheetLook";
 import type { ZipArchive } from "./zipArchive";
 
 const LONGEST_FORMAT = 255;
+const MOST_INDENT = 15;
 
 export interface BookStyles {
   /** By the number that a cell gives; the first is the plain one. */
@@ -126,9 +127,14 @@ function settled(border: Border | undefined): Piece | undefined {
   return { look: { rule: { side, colour, ...(thick && { thick }) } }, more: false };
 }
 
-function alignment({ horizontal, wrapText }: Attributes): RoleLook {
+function alignment({ horizontal, wrapText, indent }: Attributes): RoleLook {
   const align = horizontal === "left" || horizontal === "right" || horizontal === "center" ? horizontal : undefined;
-  return { ...(align && { align }), ...(wrapText !== undefined && isOn(wrapText) && { wrap: true }) };
+  const steps = Number(indent ?? 0);
+  return {
+    ...(align && { align }),
+    ...(wrapText !== undefined && isOn(wrapText) && { wrap: true }),
+    ...(Number.isInteger(steps) && steps > 0 && steps <= MOST_INDENT && { indent: steps }),
+  };
 }
 
 function withoutSize(look: RoleLook): RoleLook {
