@@ -1,10 +1,11 @@
 import type { Workbook } from "../sheet/workbook";
 import { callCells } from "./callCells";
+import { newSharedWork } from "./evaluation";
 import { fileRevision } from "./fileRevision";
 import { judgeCall } from "./judgeCall";
 import type { Judgement, Notice, Verdict } from "./judgement";
 import { askedInTwoWays } from "./notices/askedInTwoWays";
-import { callRanges } from "./notices/callRanges";
+import { callRanges, type CallRange } from "./notices/callRanges";
 import { allDataLeftOut, rangesOutOfLine } from "./notices/dataLeftOut";
 import { fixedMarks } from "./notices/fixedMarks";
 import { hiddenRowsInside, totalTakenIn } from "./notices/totalTakenIn";
@@ -29,19 +30,19 @@ export async function auditWorkbook(workbook: Workbook, { tolerance }: AuditOpti
   const calls = callCells(workbook);
   const revision = fileRevision(calls);
   const opinion = calls.length > 0 ? await loadSecondOpinion() : undefined;
-  const setting = { workbook, tolerance, fileRevision: revision };
+  const setting = { workbook, tolerance, fileRevision: revision, work: newSharedWork() };
   const judgements: Judgement[] = [];
   const doubts: Notice[] = [];
   for (const call of calls) {
     const judged = judgeCall(call, setting);
     // Beside a value that nobody could judge it would pass for a verdict.
     const heard = opinion && judged.verdict !== "not checkable" ? withOpinion(judged, opinion) : undefined;
-    judgements.push(heard?.judgement ?? judged);
+    judgements.push(withoutRanges(heard?.judgement ?? judged));
     doubts.push(...(heard?.doubts ?? []));
   }
-  const ranges = callRanges(judgements);
+  const ranges = withinReach(callRanges(judgements));
   const notices = [
-    ...typedOver(judgements, workbook, tolerance),
+    ...typedOver(judgements, setting),
     ...allDataLeftOut(ranges),
     ...ranges.flatMap((range) => [...totalTakenIn(range), ...hiddenRowsInside(range)]),
     ...judgements.flatMap(rangesOutOfLine),
@@ -52,6 +53,27 @@ export async function auditWorkbook(workbook: Workbook, { tolerance }: AuditOpti
   const counts = { agrees: 0, differs: 0, "not checkable": 0 };
   for (const { verdict } of judgements) counts[verdict]++;
   return { judgements, notices, counts, fileRevision: revision };
+}
+
+/** What was judged, without the cells that its calls were given: of many calls on many ranges nobody could keep them all. */
+function withoutRanges(judgement: Judgement): Judgement {
+  const calls = judgement.calls.map((call) => ({
+    ...call,
+    given: call.given.map((argument) => (Array.isArray(argument) ? undefined : argument)),
+  }));
+  return { ...judgement, calls };
+}
+
+/** Cells that are looked through for what is wrong beside the calls, in all ranges together. */
+const MOST_CELLS_LOOKED_AT = 500_000_000;
+
+function withinReach(ranges: readonly CallRange[]): CallRange[] {
+  let cells = 0;
+  return ranges.filter(({ sheet, area }) => {
+    const rows = Math.min(area.bottom, sheet.lastRow) - area.top + 1 + sheet.hiddenRows.size;
+    cells += Math.max(0, rows) * (Math.min(area.right, sheet.lastColumn) - area.left + 1);
+    return cells <= MOST_CELLS_LOOKED_AT;
+  });
 }
 
 /** Adds what the other library says of the first call that it can speak on. */

@@ -1,6 +1,6 @@
 import type { FormulaCell, Sheet, Workbook } from "../sheet/workbook";
 import { mayCallOurs, readFunctionName } from "./functionName";
-import { readFormula } from "./readFormula";
+import { MOST_CHARACTERS, readFormula } from "./readFormula";
 import type { AstExpression } from "@borgar/fx/xlsx";
 
 export interface CallCell {
@@ -29,8 +29,10 @@ function calledNames(formula: string): string[] | undefined {
   try {
     ast = readFormula(`=${formula}`);
   } catch {
-    // It can't be read, so it can't be judged; but it does name a function of ours.
-    return /weir[._][a-z_.]+\s*\(/i.test(formula.replace(/"[^"]*"/g, "")) ? [""] : undefined;
+    // It can't be read, so it can't be judged; but it does name a function of ours. No cell takes a longer one: the rest is not looked at.
+    return /weir[._][a-z_.]+\s*\(/i.test(formula.slice(0, 2 * MOST_CHARACTERS).replace(/"[^"]*"/g, ""))
+      ? [""]
+      : undefined;
   }
   const names: string[] = [];
   visit(ast, (name) => {

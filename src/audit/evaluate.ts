@@ -2,7 +2,7 @@ import { isCellError, type Cell } from "../sheet/cell";
 import type { BlankPolicy } from "../sheet/invoke";
 import type { Sheet, Workbook } from "../sheet/workbook";
 import { UnknownFunction } from "./evaluateNode";
-import { Evaluation, newBudget, type OwnCall } from "./evaluation";
+import { Evaluation, newBudget, type OwnCall, type SharedWork } from "./evaluation";
 import { readFormula } from "./readFormula";
 import { intersect } from "./reference";
 import { errorCell, isArray, NotKnown, Reference, UnreadableFormula } from "./value";
@@ -21,6 +21,8 @@ export interface FormulaPlace {
   readonly inFull?: boolean;
   /** Takes down the calls of our functions. */
   readonly calls?: OwnCall[];
+  /** What all formulas have left together; each formula has its own bound beside it. */
+  readonly work?: SharedWork;
 }
 
 /** A value as a cell would show it (errors are values), or the reason why it can't be known or read. */
@@ -33,11 +35,14 @@ export type Answer =
 export function evaluate(formula: string, place: FormulaPlace): Answer {
   const source = formula.startsWith("=") ? formula : `=${formula}`;
   const { workbook, sheet, row, column, shift = { rows: 0, columns: 0 } } = place;
-  const { single = false, blanks = "null", inFull = false, calls } = place;
+  const { single = false, blanks = "null", inFull = false, calls, work } = place;
+  if (work && work.steps < 0) return { notKnown: "the calls before it took all the work that one audit does" };
+  const budget = newBudget(calls);
+  const allowed = budget.steps;
   try {
     const ast = readFormula(source);
     const where = { workbook, sheet, row, column, shift, single, blanks, inFull, source };
-    const at = new Evaluation({ ...where, names: [], budget: newBudget(calls) });
+    const at = new Evaluation({ ...where, names: [], budget });
     const value = at.value(ast);
     const shown = single && value instanceof Reference ? intersect(value, at) : value;
     return { value: asShown(at.cells(shown)) };
@@ -48,6 +53,8 @@ export function evaluate(formula: string, place: FormulaPlace): Answer {
     // The stack is the last limit: nothing that a file holds may end the program.
     if (failure instanceof RangeError) return { notKnown: "it is nested too deep" };
     throw failure;
+  } finally {
+    if (work) work.steps -= allowed - budget.steps;
   }
 }
 

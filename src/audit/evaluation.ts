@@ -38,6 +38,11 @@ export interface Setting {
   readonly budget: Budget;
 }
 
+/** What all formulas of one audit have left to spend together. */
+export interface SharedWork {
+  steps: number;
+}
+
 export interface Budget {
   steps: number;
   readonly names: Map<string, Value>;
@@ -58,9 +63,16 @@ export interface OwnCall {
   readonly node: CallExpression;
 }
 
+/** Fifty formulas that each take all they may: far more than any sheet in use. */
+export function newSharedWork(): SharedWork {
+  return { steps: 50 * MOST_STEPS };
+}
+
 /** About two seconds' worth of steps. */
+const MOST_STEPS = 4_000_000;
+
 export function newBudget(calls?: OwnCall[]): Budget {
-  return { steps: 4_000_000, names: new Map(), calls };
+  return { steps: MOST_STEPS, names: new Map(), calls };
 }
 
 /** One formula being evaluated on stored values. */

@@ -2,14 +2,18 @@ import { stringifyTokens, tokenize, translateFormulaToA1, translateFormulaToR1C1
 import { formatAddress } from "../sheet/address";
 import type { FormulaCell } from "../sheet/workbook";
 import { readFunctionName } from "./functionName";
+import { MOST_CHARACTERS } from "./readFormula";
 
 function cellAddress(row: number, column: number): string {
   return formatAddress({ top: row, left: column, bottom: row, right: column });
 }
 
+/** Of a formula longer than any cell takes only the beginning is shown. */
+const LONGEST_SHOWN = 200;
+
 /** The formula of a cell as the file spells it, a shared one brought to its own cell. */
 export function storedFormula({ formula, shift, row, column }: FormulaCell): string {
-  if (!shift) return `=${formula}`;
+  if (!shift || formula.length > MOST_CHARACTERS) return `=${formula}`;
   const origin = cellAddress(row - shift.rows, column - shift.columns);
   return translateFormulaToA1(translateFormulaToR1C1(`=${formula}`, origin), cellAddress(row, column));
 }
@@ -21,6 +25,7 @@ export function relativeFormula({ formula, shift, row, column }: FormulaCell): s
 
 /** A formula as it is typed: our functions by their names, without the prefixes that files put before newer functions and names. */
 export function typedFormula(stored: string): string {
+  if (stored.length > MOST_CHARACTERS) return `${stored.slice(0, LONGEST_SHOWN)}…`;
   let tokens;
   try {
     tokens = tokenize(stored);

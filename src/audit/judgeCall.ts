@@ -5,7 +5,7 @@ import type { Workbook } from "../sheet/workbook";
 import type { CallCell } from "./callCells";
 import { compareStored, type Comparison } from "./compareStored";
 import { evaluate, type Answer, type FormulaPlace } from "./evaluate";
-import type { OwnCall } from "./evaluation";
+import type { OwnCall, SharedWork } from "./evaluation";
 import { isReleaseCell } from "./fileRevision";
 import { explainAgreement, explainDifference } from "./explain";
 import { storedFormula, typedFormula } from "./formulaText";
@@ -18,6 +18,7 @@ export interface JudgeSetting {
   readonly tolerance: number;
   /** The revision of the numbers that the file says it was computed by. */
   readonly fileRevision: number | undefined;
+  readonly work: SharedWork;
 }
 
 const SAVE_ANEW = "Open the file where the add-in is loaded, let it calculate, and save it.";
@@ -48,6 +49,7 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
     shift: cell.shift,
     single: !array,
     calls,
+    work: setting.work,
   };
   const answer = evaluate(cell.formula, place);
   const judged = {
@@ -56,7 +58,7 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
     address: formatAddress({ top: row, left: column, bottom: row, right: column }),
     formula: typedFormula(storedFormula(cell)),
     stored: oneOrRows(stored),
-    recomputed: "value" in answer && unknown.length === 0 ? answer.value : undefined,
+    recomputed: "value" in answer && unknown.length === 0 ? shownOf(answer.value, !array) : undefined,
     calls,
   };
   const hindrance = cell.calculated
@@ -80,7 +82,7 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
   const full = calls.some(takesWholeColumn) ? again({ inFull: true }) : undefined;
   if (full && "value" in full && comparedWith(stored, full.value, !array, setting).same) {
     const why = "Worked out again from the stored inputs, the whole column with its blank cells: the same.";
-    return { ...judged, recomputed: full.value, verdict: "agrees", why };
+    return { ...judged, recomputed: shownOf(full.value, !array), verdict: "agrees", why };
   }
   const zero = calls.some(getsBlanks) ? again({ blanks: "zero" }) : undefined;
   const blanksAsZero = zero !== undefined && "value" in zero && comparedWith(stored, zero.value, !array, setting).same;
@@ -116,14 +118,18 @@ function whatHinders(
 }
 
 /** In an old-style cell only the first cell of a table is shown. */
+function shownOf(value: Cell | Cell[][], single: boolean): Cell | Cell[][] {
+  return single && Array.isArray(value) ? (value[0]?.[0] ?? null) : value;
+}
+
 function comparedWith(
   stored: readonly (readonly Cell[])[],
   value: Cell | Cell[][],
   single: boolean,
   { tolerance }: JudgeSetting,
 ): Comparison {
-  const rows = Array.isArray(value) ? value : [[value]];
-  return compareStored(stored, single ? [[rows[0]?.[0]]] : rows, tolerance);
+  const shown = shownOf(value, single);
+  return compareStored(stored, Array.isArray(shown) ? shown : [[shown]], tolerance);
 }
 
 function oneOrRows(rows: readonly (readonly Cell[])[]): Cell | Cell[][] {

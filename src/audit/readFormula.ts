@@ -1,7 +1,7 @@
 import { parse, tokenize, type AstExpression, type Token } from "@borgar/fx/xlsx";
 import { UnreadableFormula } from "./value";
 
-const MOST_CHARACTERS = 8_192;
+export const MOST_CHARACTERS = 8_192;
 const DEEPEST = 128;
 const MOST_REMEMBERED = 20_000;
 const remembered = new Map<string, AstExpression | UnreadableFormula>();

@@ -7,6 +7,7 @@ import { errorCell, isArray, NotKnown, Reference, type Place, type Value } from 
 export const LAST_ROW = 1_048_575;
 export const LAST_COLUMN = 16_383;
 const MOST_CELLS = 10_000_000;
+const read = new WeakSet<Range>();
 
 /** The stored cells of a reference. Whole columns and rows end with the used part of the sheet. */
 export function cellsOf(reference: Reference, at: Evaluation): Range {
@@ -24,6 +25,9 @@ export function placeCells(place: Place, at: Evaluation): Range {
   refuseUncalculated(place.sheet, area);
   at.spend(1 + count / 100);
   const cells = place.sheet.range(area);
+  // A range that was never read takes memory: a formula that reads many and large ones must not take all of it.
+  if (!read.has(cells)) at.spend(count / 4);
+  read.add(cells);
   return at.setting.inFull && place.area.bottom === LAST_ROW
     ? filledDown(cells, place.area.bottom - place.area.top + 1)
     : cells;

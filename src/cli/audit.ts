@@ -1,5 +1,5 @@
 import { auditWorkbook, type Audit } from "../audit/auditWorkbook";
-import type { Judgement } from "../audit/judgement";
+import type { Judgement, Notice } from "../audit/judgement";
 import { formatSheetName } from "../sheet/address";
 import { isCellError, type Cell } from "../sheet/cell";
 import { Stop, type Command, type Io } from "./io";
@@ -77,8 +77,13 @@ function jsonLines({ judgements, notices }: Audit): string {
           ? value.code
           : value;
   const used = new Set<unknown>();
+  const byCell = new Map<string, Notice[]>();
+  for (const one of notices) {
+    const key = `${one.sheet}!${one.address}`;
+    byCell.set(key, [...(byCell.get(key) ?? []), one]);
+  }
   const lines = judgements.map(({ sheet, address, formula, stored, recomputed, verdict, why }) => {
-    const here = notices.filter((one) => one.sheet === sheet.name && one.address === address);
+    const here = byCell.get(`${sheet.name}!${address}`) ?? [];
     here.forEach((one) => used.add(one));
     const line = {
       sheet: sheet.name,

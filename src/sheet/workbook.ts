@@ -115,10 +115,16 @@ export class Sheet {
     const known = this.#ranges.get(name);
     if (known) return known;
     const cells: Cell[][] = [];
+    // One and the same blank row throughout: a range may claim millions of them.
+    const blank = Array<Cell>(right - left + 1).fill(null);
     for (let row = top; row <= bottom; row++) {
       const stored = this.#rows[row];
+      if (stored === undefined) {
+        cells.push(blank);
+        continue;
+      }
       const line: Cell[] = [];
-      for (let column = left; column <= right; column++) line.push(stored?.[column] ?? null);
+      for (let column = left; column <= right; column++) line.push(stored[column] ?? null);
       cells.push(line);
     }
     const size = (bottom - top + 1) * (right - left + 1);

@@ -5,7 +5,7 @@ import { endSpills, type EndedSpill } from "../../sheet/endSpills";
 import type { Workbook } from "../../sheet/workbook";
 import { compareStored } from "../compareStored";
 import { evaluate } from "../evaluate";
-import type { OwnCall } from "../evaluation";
+import { newSharedWork, type OwnCall, type SharedWork } from "../evaluation";
 import { storedFormula, typedFormula } from "../formulaText";
 import { mayCallOurs } from "../functionName";
 import type { Judgement } from "../judgement";
@@ -29,7 +29,8 @@ const LONGEST_FORMULA = 8_192;
 
 /** Decides for every judged cell: the host's own functions where they give the same value, else its value, else nothing. */
 export function planHandover(judgements: readonly Judgement[], workbook: Workbook): Replacement[] {
-  const replacements = judgements.map((judgement) => replacementOf(judgement, workbook));
+  const work = newSharedWork();
+  const replacements = judgements.map((judgement) => replacementOf(judgement, workbook, work));
   const ended = endedSpills(replacements);
   return replacements.map((one) => {
     if (one.stored === undefined) return one;
@@ -51,8 +52,8 @@ function spillKey(sheet: string, row: number, column: number): string {
   return `${row},${column},${sheet.toLowerCase()}`;
 }
 
-function replacementOf(judgement: Judgement, workbook: Workbook): Replacement {
-  const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook);
+function replacementOf(judgement: Judgement, workbook: Workbook, work: SharedWork): Replacement {
+  const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook, work);
   const differs = judgement.verdict === "differs" ? ` Mind: ${judgement.why}` : "";
   if (formula !== undefined) {
     const asks = needsNewHost(formula) ? ", of 2021 or later," : "";
@@ -75,10 +76,14 @@ function replacementOf(judgement: Judgement, workbook: Workbook): Replacement {
 }
 
 /** The cell's formula with every call of ours put in the host's words, innermost first; undefined where one can't be, or where the value would change. */
-function nativeFormula({ sheet, cell, recomputed }: Judgement, workbook: Workbook): string | undefined {
+function nativeFormula(
+  { sheet, cell, recomputed }: Judgement,
+  workbook: Workbook,
+  work: SharedWork,
+): string | undefined {
   if (recomputed === undefined || Array.isArray(recomputed)) return undefined;
   const { row, column } = cell;
-  const place = { workbook, sheet, row, column };
+  const place = { workbook, sheet, row, column, work };
   let text = storedFormula(cell);
   for (let i = 0; i < MOST_CALLS_IN_A_CELL && mayCallOurs(text); i++) {
     const calls: OwnCall[] = [];

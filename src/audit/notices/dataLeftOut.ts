@@ -70,7 +70,7 @@ function holdsNumber(sheet: Sheet, row: number, left: number, right: number): bo
   for (let column = left; column <= right; column++) {
     if (typeof sheet.cell(row, column) !== "number") continue;
     const formula = sheet.formulaAt(row, column);
-    if (formula && (mayCallOurs(formula.formula) || summaryCells(sheet).includes(formula))) continue;
+    if (formula && (mayCallOurs(formula.formula) || summaryCells(sheet).has(formula))) continue;
     if (!namesTotal(sheet, row, column)) return true;
   }
   return false;

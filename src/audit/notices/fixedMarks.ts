@@ -11,6 +11,8 @@ import { counted, showCell } from "../showCell";
 
 const COLUMNS = 14;
 const ROWS_LOOKED_AT = 50;
+const MOST_MARKS = 1_000;
+const MOST_CELLS = 2_000_000;
 /** The functions that make the three promises. */
 const FUNCTION_OF = { plain: "TOP_FRACTION_CUTOFF", safe: "SAFE_CUTOFF", "next-score": "NEXT_SCORE_CUTOFF" } as const;
 
@@ -20,7 +22,7 @@ export function fixedMarks(workbook: Workbook, tolerance: number): Notice[] {
     const heading = headingRow(sheet);
     if (heading === undefined) return [];
     const notices: Notice[] = [];
-    for (let row = heading + 1; row <= sheet.lastRow; row++) {
+    for (let row = heading + 1; row <= Math.min(sheet.lastRow, heading + MOST_MARKS); row++) {
       const cells = sheet.range({ top: row, left: 0, bottom: row, right: COLUMNS - 1 })[0]!;
       const mark = readFixedMark(cells);
       const fault = mark && faultOf(mark, workbook, tolerance);
@@ -57,8 +59,11 @@ function faultOf(mark: FixedMark, workbook: Workbook, tolerance: number): Fault 
   const area = parseAddress(mark.scores);
   const sheet = area?.sheet === undefined ? undefined : sheetNamed(workbook, area.sheet);
   if (!area || !sheet) return { why: `its scores (${mark.scores}) are not in this file` };
+  const used = usedPart({ sheet, area });
+  if ((used.bottom - used.top + 1) * (used.right - used.left + 1) > MOST_CELLS)
+    return { why: `its scores (${mark.scores}) are more cells than are read` };
   const scores = sheet
-    .range(usedPart({ sheet, area }))
+    .range(used)
     .flat()
     .filter((cell) => typeof cell === "number");
   if (scores.length < mark.count)

@@ -10,9 +10,14 @@ import { namesTotal, summaryCells, sumsUp } from "./totals";
 /** A range whose cells hold, among the scores, a sum or mean of them: by its formula, by its label, or by its value in the last cell. */
 export function totalTakenIn(range: CallRange): Notice[] {
   const { sheet, judgement } = range;
-  const area = usedPart(range);
+  const used = usedPart(range);
+  const area = {
+    ...used,
+    bottom: Math.min(used.bottom, sheet.lastRow),
+    right: Math.min(used.right, sheet.lastColumn),
+  };
   for (let column = area.left; column <= area.right; column++) {
-    const summary = summaryCells(sheet).find(
+    const summary = [...summaryCells(sheet)].find(
       (cell) =>
         cell.column === column &&
         cell.row >= area.top &&

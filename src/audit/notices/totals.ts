@@ -9,13 +9,17 @@ const SUMMARY = /^[+(]*(SUM|SUBTOTAL|AGGREGATE|AVERAGE|MEDIAN|MIN|MAX|COUNT|COUN
 const TOTAL_WORD =
   /^\s*(grand |sub-?)?(total|sum|average|mean|median|gesamt|summe|zwischensumme|mittelwert|durchschnitt|schnitt|moyenne|promedio)\s*(:|=|(of|all|score|scores|points|von|aller)\b.*)?\s*$/i;
 
-const remembered = new WeakMap<Sheet, readonly FormulaCell[]>();
+/** A longer text is no such word; and what looks for one in it would walk its spaces again and again. */
+const LONGEST_WORD = 80;
+
+const remembered = new WeakMap<Sheet, ReadonlySet<FormulaCell>>();
 
 /** The cells of a sheet that sum up others by a formula of the host. */
-export function summaryCells(sheet: Sheet): readonly FormulaCell[] {
+export function summaryCells(sheet: Sheet): ReadonlySet<FormulaCell> {
   let cells = remembered.get(sheet);
   if (!cells) {
-    cells = [...sheet.formulas.values()].filter(({ formula }) => SUMMARY.test(formula) && !mayCallOurs(formula));
+    const found = [...sheet.formulas.values()].filter(({ formula }) => SUMMARY.test(formula) && !mayCallOurs(formula));
+    cells = new Set(found);
     remembered.set(sheet, cells);
   }
   return cells;
@@ -41,7 +45,7 @@ export function sumsUp(cell: FormulaCell, area: Area): boolean {
 export function namesTotal(sheet: Sheet, row: number, column: number): boolean {
   for (let left = column - 1; left >= Math.max(0, column - 6); left--) {
     const cell = sheet.cell(row, left);
-    if (typeof cell === "string" && TOTAL_WORD.test(cell)) return true;
+    if (typeof cell === "string" && cell.length <= LONGEST_WORD && TOTAL_WORD.test(cell)) return true;
   }
   return false;
 }

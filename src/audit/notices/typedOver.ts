@@ -1,9 +1,10 @@
 import { formatAddress } from "../../sheet/address";
 import { isCellError, type Cell } from "../../sheet/cell";
-import type { FormulaCell, Sheet, Workbook } from "../../sheet/workbook";
+import type { FormulaCell, Sheet } from "../../sheet/workbook";
 import { compareStored } from "../compareStored";
 import { evaluate } from "../evaluate";
 import { relativeFormula } from "../formulaText";
+import type { JudgeSetting } from "../judgeCall";
 import type { Judgement, Notice } from "../judgement";
 import { showCell } from "../showCell";
 
@@ -12,7 +13,10 @@ const PATTERN = 3;
 const WIDEST_GAP = 50;
 
 /** A number that stands where the cells beside it, down or across, call a function of ours by one and the same formula. */
-export function typedOver(judgements: readonly Judgement[], workbook: Workbook, tolerance: number): Notice[] {
+export function typedOver(
+  judgements: readonly Judgement[],
+  { workbook, tolerance, work }: Pick<JudgeSetting, "workbook" | "tolerance" | "work">,
+): Notice[] {
   const notices: Notice[] = [];
   const seen = new Set<string>();
   for (const sheet of workbook.sheets) {
@@ -23,7 +27,7 @@ export function typedOver(judgements: readonly Judgement[], workbook: Workbook, 
           const address = formatAddress({ top: row, left: column, bottom: row, right: column });
           if (seen.has(`${sheet.name}!${address}`)) continue;
           seen.add(`${sheet.name}!${address}`);
-          const notice = noticeOf(workbook, sheet, row, column, like, tolerance);
+          const notice = noticeOf({ workbook, tolerance, work }, sheet, row, column, like);
           if (notice) notices.push({ ...notice, address });
         }
   }
@@ -39,7 +43,9 @@ function lines(cells: readonly FormulaCell[], down: boolean): FormulaCell[][] {
   const byLine = new Map<number, FormulaCell[]>();
   for (const cell of cells) {
     const key = down ? cell.column : cell.row;
-    byLine.set(key, [...(byLine.get(key) ?? []), cell]);
+    const known = byLine.get(key);
+    if (known) known.push(cell);
+    else byLine.set(key, [cell]);
   }
   const place = (cell: FormulaCell) => (down ? cell.row : cell.column);
   return [...byLine.values()].map((line) => line.sort((a, b) => place(a) - place(b)));
@@ -81,18 +87,17 @@ function suspects(sheet: Sheet, line: readonly FormulaCell[], down: boolean): Su
 }
 
 function noticeOf(
-  workbook: Workbook,
+  { workbook, tolerance, work }: Pick<JudgeSetting, "workbook" | "tolerance" | "work">,
   sheet: Sheet,
   row: number,
   column: number,
   like: FormulaCell,
-  tolerance: number,
 ): Omit<Notice, "address"> | undefined {
   const shift = {
     rows: row - like.row + (like.shift?.rows ?? 0),
     columns: column - like.column + (like.shift?.columns ?? 0),
   };
-  const answer = evaluate(like.formula, { workbook, sheet, row, column, shift, single: !like.array });
+  const answer = evaluate(like.formula, { workbook, sheet, row, column, shift, single: !like.array, work });
   const recomputed: Cell = "value" in answer && !Array.isArray(answer.value) ? answer.value : undefined;
   // Where the formula has nothing to work on, the number belongs to something else: a total below the column.
   if (recomputed === undefined || isCellError(recomputed)) return undefined;

@@ -71,6 +71,7 @@ function readArchive(archive: ZipArchive, looks?: Map<string, SheetLook>, extras
     date1904,
     dynamicMarks: readDynamicMarks(archive, partOf("sheetMetadata")),
     cells: 0,
+    arrayCells: 0,
     extras,
   };
   const sheets: Sheet[] = [];

@@ -11,16 +11,23 @@ import { storedValue } from "./xlsxValue";
 import type { ZipArchive } from "./zipArchive";
 
 const MOST_CELLS = 10_000_000;
+/** All cells that the array formulas of a file fill; each of them is in the file, if it is in order. */
+const MOST_ARRAY_CELLS = 5_000_000;
 
 export interface SheetContext {
   readonly archive: ZipArchive;
   readonly strings: readonly string[];
   readonly date1904: boolean;
   readonly dynamicMarks: ReadonlySet<number>;
-  /** Cells read so far, in all sheets. */
+  /** Cells read so far, in all sheets, and those that array formulas claim to fill. */
   cells: number;
+  arrayCells: number;
   /** Counts what is not read; left out where nobody wants to know. */
   readonly extras?: Extras;
+}
+
+function cellCount({ top, left, bottom, right }: Area): number {
+  return (bottom - top + 1) * (right - left + 1);
 }
 
 interface SharedFormula {
@@ -59,13 +66,19 @@ export function readSheet(context: SheetContext, part: string, sheet: Sheet, loo
       const group = attributes["si"] ?? "";
       const origin = shared.get(group);
       if (text !== "") shared.set(group, { formula: text, row, column });
-      else if (origin) {
+      else if (!origin)
+        throw new UnusableFile("The file is damaged: a shared formula stands before its text, or without one.");
+      else {
         text = origin.formula;
         shift = { rows: row - origin.row, columns: column - origin.column };
       }
     }
     if (text === "") return;
     const array: Area | undefined = kind === "array" ? areaReference(attributes["ref"] ?? "") : undefined;
+    if (array && (context.arrayCells += cellCount(array)) > MOST_ARRAY_CELLS)
+      throw new UnusableFile(
+        `The file is refused: its array formulas claim to fill more than ${MOST_ARRAY_CELLS} cells.`,
+      );
     const dynamic = array !== undefined && context.dynamicMarks.has(Number(cell["cm"]));
     sheet.addFormula({ row, column, formula: text, shift, array, dynamic, calculated: stored !== null });
   };

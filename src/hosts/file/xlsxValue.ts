@@ -2,6 +2,8 @@ import type { Cell } from "../../sheet/cell";
 import { UnusableFile } from "./unusableFile";
 import { unescapeText } from "./xlsxStrings";
 
+const PLAIN_NUMBER = /^[+-]?(\d+\.?\d*|\.\d+)(e[+-]?\d+)?$/i;
+
 export interface ValueContext {
   /** The texts that the cells of all sheets share. */
   readonly strings: readonly string[];
@@ -21,7 +23,7 @@ export function storedValue(text: string, kind: string | undefined, { strings, d
     case "inlineStr":
       return unescapeText(text);
     case "b":
-      return text.trim() === "1" || text.trim() === "true";
+      return booleanValue(text.trim());
     case "e":
       return { code: text.trim() };
     case "d":
@@ -30,13 +32,20 @@ export function storedValue(text: string, kind: string | undefined, { strings, d
     case "n": {
       if (text.trim() === "") return null;
       const number = Number(text);
-      if (!Number.isFinite(number))
+      // `0x10` is a number to the language of this program, not to that of the file.
+      if (!Number.isFinite(number) || (text.charCodeAt(1) > 57 && !PLAIN_NUMBER.test(text.trim())))
         throw new UnusableFile(`The file is damaged: a number cell holds “${text.slice(0, 40)}”.`);
       return number;
     }
     default:
       throw new UnusableFile(`The file is damaged: it has a cell of the unknown kind “${kind.slice(0, 20)}”.`);
   }
+}
+
+function booleanValue(text: string): boolean {
+  if (text === "1" || text === "true") return true;
+  if (text === "0" || text === "false") return false;
+  throw new UnusableFile(`The file is damaged: a cell of TRUE or FALSE holds “${text.slice(0, 40)}”.`);
 }
 
 /** The same day counts so many fewer in the 1904 system. */
