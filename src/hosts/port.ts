@@ -1,4 +1,6 @@
+import type { Area } from "../sheet/address";
 import type { Cell } from "../sheet/cell";
+import type { CellRole } from "../sheet/cellLook";
 
 /**
  * What the pane may ask of the world it stands in, and nothing more: the same pane runs in Excel and in the trial page, each behind one
@@ -26,6 +28,41 @@ export interface Picture {
   readonly height: number;
 }
 
+/** A defined name of the workbook and the cells that it leads to. */
+export interface NamedCells {
+  readonly name: string;
+  readonly address: string;
+}
+
+/** How the cells of a sheet look, from A1 on. Dressed before formulas are written: the trial's engine loses sight of those that are there. */
+export interface SheetLook {
+  readonly cells: readonly (readonly ({ readonly role: CellRole; readonly format?: string } | undefined)[])[];
+  /** In characters, from column A on. */
+  readonly widths: readonly number[];
+  /** In points, by row from 0. */
+  readonly heights: ReadonlyMap<number, number>;
+  readonly merged: readonly Area[];
+}
+
+/** A chart of lines through points, which the host draws from cells. */
+export interface HostChart {
+  readonly title: string;
+  readonly xTitle: string;
+  readonly yTitle: string;
+  readonly from: number;
+  readonly to: number;
+  readonly series: readonly {
+    readonly name: string;
+    readonly x: string;
+    readonly y: string;
+    /** Six hexadecimal digits. */
+    readonly colour: string;
+    /** Points. */
+    readonly width: number;
+    readonly dash: "solid" | "dash" | "sysDot";
+  }[];
+}
+
 /** How this user types and sees numbers and arguments. */
 export interface Separators {
   readonly decimal: "." | ",";
@@ -46,7 +83,15 @@ export interface Port {
   sheetNames(): Promise<string[]>;
   /** Adds a sheet, under the name given or the next free one like it, and returns that name. */
   addSheet(name: string): Promise<string>;
+  /** Puts a picture over the sheet, its upper left corner on a cell; in the place of one with the same name that stands there. */
   insertPicture(address: string, picture: Picture): Promise<void>;
+  /** Draws a chart over a range of cells; missing where the host has no charts of its own. */
+  insertChart?(address: string, chart: HostChart): Promise<void>;
+  /** Names that lead to cells and are known in the whole workbook. */
+  readNames(): Promise<NamedCells[]>;
+  /** Gives names to cells; a name that is there already is led to them. */
+  defineNames(names: readonly NamedCells[]): Promise<void>;
+  dress(sheet: string, look: SheetLook): Promise<void>;
   /** All cells of the workbook that call one of our functions. */
   calls(): Promise<CallCell[]>;
   theme(): "light" | "dark";

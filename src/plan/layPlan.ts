@@ -119,7 +119,9 @@ class Layout {
     if (role === "section") this.#heights.set(row, 18);
     if (role === "title" || role === "section") return;
     this.#merged.push({ top: row, left: 0, bottom: row, right: WIDTHS.length - 1 });
-    this.#tall(row, text.length / WIDTHS.reduce((sum, width) => sum + width, 0) / LETTERS);
+    // Bold letters are wider.
+    const letters = role === "caution" ? text.length * 1.12 : text.length;
+    this.#tall(row, letters / WIDTHS.reduce((sum, width) => sum + width, 0) / LETTERS);
   }
 
   #tall(row: number, lines: number): void {

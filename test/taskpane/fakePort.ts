@@ -1,4 +1,4 @@
-import type { Block, Port, Separators } from "../../src/hosts/port";
+import type { Block, NamedCells, Port, Separators, SheetLook } from "../../src/hosts/port";
 import { formatAddress, parseAddress } from "../../src/sheet/address";
 import type { Cell } from "../../src/sheet/cell";
 
@@ -8,6 +8,9 @@ export interface FakePort extends Port {
   /** Tells of a change of cells. */
   changed(): void;
   readonly reads: string[];
+  readonly names: Map<string, string>;
+  readonly dressed: { sheet: string; look: SheetLook }[];
+  readonly pictures: { address: string; name: string }[];
   readonly writes: { address: string; cells: readonly (readonly Cell[])[] }[];
 }
 
@@ -17,6 +20,9 @@ export function fakePort(sheets: Record<string, Cell[][]>, selected: string, sep
   const settings = new Map<string, unknown>();
   const reads: string[] = [];
   const writes: FakePort["writes"] = [];
+  const names = new Map<string, string>();
+  const dressed: FakePort["dressed"] = [];
+  const pictures: FakePort["pictures"] = [];
   let selection = selected;
 
   const read = (address: string): Block => {
@@ -42,6 +48,9 @@ export function fakePort(sheets: Record<string, Cell[][]>, selected: string, sep
     kind: "trial",
     reads,
     writes,
+    names,
+    dressed,
+    pictures,
     pick(address) {
       selection = address;
       for (const listener of listeners) listener("selection");
@@ -76,7 +85,10 @@ export function fakePort(sheets: Record<string, Cell[][]>, selected: string, sep
       sheets[free] = [];
       return free;
     },
-    insertPicture: async () => undefined,
+    insertPicture: async (address, { name }) => void pictures.push({ address, name }),
+    readNames: async () => [...names].map(([name, address]): NamedCells => ({ name, address })),
+    defineNames: async (list) => list.forEach(({ name, address }) => names.set(name, address)),
+    dress: async (sheet, look) => void dressed.push({ sheet, look }),
     calls: async () => [],
     theme: () => "light",
     separators: () => separators ?? { decimal: ".", argument: "," },

@@ -1,8 +1,11 @@
 import { formatAddress, formatSheetName, parseAddress } from "../../sheet/address";
 import { isCellError, type Cell } from "../../sheet/cell";
+import { dress } from "./dress";
+import { defineNames, readNames } from "./names";
 import { pngOfSvg } from "../pngOfSvg";
 import type { Block, CallCell, Picture, Port, Separators } from "../port";
 import { followChanges } from "./followChanges";
+import { insertChart } from "./charts";
 import { cellsForHost, cellsFromHost } from "./cells";
 
 /** Office.js reads at most 5 million cells at once; a score column is never that long. */
@@ -42,6 +45,12 @@ export async function excelPort(): Promise<Port> {
       }),
     addSheet: (name) => Excel.run((context) => addSheet(context, name)),
     insertPicture: (address, picture) => Excel.run((context) => insertPicture(context, address, picture)),
+    ...(Office.context.requirements.isSetSupported("ExcelApi", "1.7") && {
+      insertChart: (address, chart) => Excel.run((context) => insertChart(context, rangeAt, address, chart)),
+    }),
+    readNames: () => Excel.run(readNames),
+    defineNames: (names) => Excel.run((context) => defineNames(context, rangeAt, names)),
+    dress: (sheet, look) => Excel.run((context) => dress(context, sheet, look)),
     calls: () => Excel.run(readCalls),
     theme,
     separators: () => separators,

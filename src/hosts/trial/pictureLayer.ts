@@ -68,7 +68,16 @@ export function pictureLayer(api: FUniver, grid: HTMLElement, changed: () => voi
   api.addEvent(api.Event.ActiveSheetChanged, draw);
   new ResizeObserver(move).observe(grid);
   draw();
-  return { add: (placed) => keep([...kept(), placed]) };
+  return {
+    add(placed) {
+      const same = (one: PlacedPicture) =>
+        one.sheetId === placed.sheetId &&
+        one.row === placed.row &&
+        one.column === placed.column &&
+        one.picture.name === placed.picture.name;
+      keep([...kept().filter((one) => !same(one)), placed]);
+    },
+  };
 }
 
 function figureOf({ row, column, picture }: PlacedPicture, remove: () => void): HTMLElement {

@@ -10,6 +10,7 @@ import english from "@univerjs/preset-sheets-core/locales/en-US";
 import "@univerjs/preset-sheets-core/lib/index.css";
 import { cellFunctions } from "./cellFunctions";
 import { descriptions } from "./descriptions";
+import { followNames } from "./followNames";
 import type { FunctionSet } from "./functionSet";
 import type { MessageBook } from "./messageBook";
 
@@ -69,6 +70,7 @@ export function startSheet(
   const api = FUniver.newAPI(univer);
   api.createWorkbook(snapshot);
   followCalculations(api, messages);
+  followNames(api, univer);
   return { api, univer };
 }
 

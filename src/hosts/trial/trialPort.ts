@@ -6,12 +6,14 @@ import {
   SetWorksheetActiveOperation,
   type FWorksheet,
 } from "@univerjs/preset-sheets-core";
-import { parseAddress, type Area } from "../../sheet/address";
+import { formatSheetName, parseAddress, type Area } from "../../sheet/address";
 import type { Picture, Port } from "../port";
 import { callCells } from "./callCells";
 import { cellData } from "./cellData";
+import { dressSheet } from "./dressSheet";
 import { keepSettings, readSettings } from "./keptSettings";
 import type { MessageBook } from "./messageBook";
+import { defineNames, readNames } from "./names";
 import type { PictureLayer } from "./pictureLayer";
 import { readArea, type ReadFrom } from "./readArea";
 import { settledAfterChanges } from "./settled";
@@ -100,6 +102,16 @@ export function trialPort({ api, univer, messages, pictures, dark }: TrialHost):
     async insertPicture(address: string, picture: Picture) {
       const { sheet, area } = place(address);
       pictures.add({ sheetId: sheet.getSheetId(), row: area.top, column: area.left, picture });
+    },
+    async readNames() {
+      return readNames(book);
+    },
+    async defineNames(names) {
+      defineNames(book, names);
+      await settled();
+    },
+    async dress(sheet, look) {
+      dressSheet(place(`${formatSheetName(sheet)}!A1`).sheet, look);
     },
     async calls() {
       await settled();

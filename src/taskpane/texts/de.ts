@@ -2,6 +2,7 @@ import { deCutoff } from "./de.cutoff";
 import { deFunctions } from "./de.functions";
 import { dePane } from "./de.pane";
 import { dePictures } from "./de.pictures";
+import { dePlan } from "./de.plan";
 import { deSearch } from "./de.search";
 import { deUse } from "./de.use";
 import { deWatch } from "./de.watch";
@@ -15,4 +16,5 @@ export const de: Texts = {
   ...deFunctions,
   ...deUse,
   ...deWatch,
+  ...dePlan,
 };

@@ -6,6 +6,7 @@ import { element, fill } from "../dom/element";
 import { field } from "../dom/field";
 import { fold } from "../dom/part";
 import { figure, table } from "../dom/table";
+import { today } from "../today";
 import { driftOf, marksOf, markToday, tiesAt, writeMark } from "./fixedMarks";
 
 /** Writing the mark down, its history, and whether newer scores would move it. */
@@ -108,12 +109,6 @@ function proposalWords(context: PaneContext, mark: FixedMark, onGrid: boolean): 
       ? [element("p", { class: "notice" }, texts.markTies(numbers.count(ties), numbers.full(mark.mark)))]
       : []),
   ];
-}
-
-function today(): string {
-  const now = new Date();
-  const two = (number: number) => String(number).padStart(2, "0");
-  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
 }
 
 function shownMark({ texts, numbers }: PaneContext, { mark, better }: Pick<FixedMark, "mark" | "better">): string {
