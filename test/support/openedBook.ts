@@ -16,7 +16,7 @@ export const OPENED_BOOK = xlsxFile({
       name: "Bids",
       rows: `<row r="1"><c r="A1" s="3" t="s"><v>0</v></c><c r="B1" s="3" t="s"><v>1</v></c></row>
 <row r="2"><c r="A2" t="s"><v>2</v></c><c r="B2" s="1"><v>71.4</v></c><c r="D2"><f>[2]!_xldudf_WEIR_SAMPLES_FOR_SD_PRECISION(fraction)</f><v>193</v></c></row>
-<row r="3"><c r="A3" t="b"><v>1</v></c><c r="B3" s="1"><v>65.5</v></c><c r="D3"><f>_xlfn.STDEV.S(marks)</f><v>3.1</v></c></row>
+<row r="3" ht="30" customHeight="1"><c r="A3" t="b"><v>1</v></c><c r="B3" s="1"><v>65.5</v></c><c r="D3"><f>_xlfn.STDEV.S(marks)</f><v>3.1</v></c></row>
 <row r="4"><c r="A4" t="e"><v>#N/A</v></c><c r="B4" s="1"><v>68</v></c><c r="D4" s="2"><v>45000</v></c></row>
 <row r="5"><c r="D5"><f>SUM(Offers[score])</f><v>204.9</v></c><c r="E5"><f>NO.SUCH.FUNCTION(B2)</f><v>12</v></c></row>
 <row r="6"><c r="D6" cm="1"><f t="array" ref="D6:E7">_xlfn.SEQUENCE(2,2)</f><v>1</v></c><c r="E6"><v>2</v></c></row>

@@ -5,6 +5,7 @@ import { readFile } from "../../src/trial/open/readFile";
 import { summaryWords } from "../../src/trial/open/summaryWords";
 import { de } from "../../src/trial/texts/de";
 import { en } from "../../src/trial/texts/en";
+import { writeXlsx } from "../../src/hosts/file/writeXlsx";
 import { OPENED_BOOK } from "../support/openedBook";
 import { xlsxFile } from "../support/xlsxFile";
 
@@ -52,6 +53,19 @@ describe("a workbook, laid out for the trial sheet", async () => {
     expect(style(1, 1)).toEqual({ n: { pattern: '0.0" points"' } });
     expect(style(3, 3)).toEqual({ n: { pattern: "yyyy-mm-dd" } });
     expect(style(7, 4)).toEqual({ n: { pattern: "0.00%" }, tb: WrapStrategy.WRAP });
+  });
+
+  test("has the heights of the file, and makes room for large letters and wrapped texts where it names none", async () => {
+    expect(bids!.rowData).toEqual({ 2: { h: 40 } });
+    const wrapped = { value: "a long note ".repeat(10), role: "note" } as const;
+    const file = writeXlsx({
+      sheets: [{ name: "S", rows: [[{ value: "Title", role: "title" }], [wrapped], ["plain"]], widths: [20] }],
+    });
+    const { rowData } = (await readFile(file, "s.xlsx", [])).book.sheets["sheet-1"]!;
+    expect(Object.keys(rowData!)).toEqual(["0", "1"]);
+    expect(rowData![0]!.h).toBeGreaterThan(25);
+    // 120 letters on a width of 20: some six lines.
+    expect(rowData![1]!.h).toBeGreaterThan(5 * 13);
   });
 
   test("has its names, merged cells and hidden sheets", () => {

@@ -92,6 +92,7 @@ export function readSheet(context: SheetContext, part: string, sheet: Sheet, loo
           if (!(row >= 0 && row < 1_048_576))
             throw new UnusableFile(`The file is damaged: it has a row ${attributes["r"]}.`);
           if (attributes["hidden"] === "1" || attributes["hidden"] === "true") sheet.hiddenRows.add(row);
+          if (look && attributes["ht"] !== undefined) look.setHeight(row, Number(attributes["ht"]));
           break;
         case "c":
           cell = attributes;

@@ -30,7 +30,7 @@ export function bookOfFile(
   const sheets = workbook.sheets.map((sheet, index): Partial<IWorksheetData> & { id: string } => {
     const look = looks?.get(sheet.name);
     return {
-      ...frameOfSheet(sheet, look),
+      ...frameOfSheet(sheet, look, styles),
       id: `sheet-${index + 1}`,
       name: names[index]!,
       cellData: cellsOfSheet({ sheet, workbook, look, styles, knows }, differences),

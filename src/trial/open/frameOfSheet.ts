@@ -1,6 +1,7 @@
 import type { IWorksheetData } from "@univerjs/core";
-import type { SheetLook } from "../../hosts/file/sheetLook";
+import type { CellStyle, SheetLook } from "../../hosts/file/sheetLook";
 import type { Sheet } from "../../sheet/workbook";
+import { rowHeights } from "./rowHeights";
 
 const SPARE_ROWS = 40;
 const LEAST_ROWS = 200;
@@ -13,7 +14,11 @@ const NARROW = 9;
 const WIDE = 42;
 
 /** Everything of a sheet but its cells: its size, widths, what is hidden, merged and stays in view. */
-export function frameOfSheet(sheet: Sheet, look: SheetLook | undefined): Partial<IWorksheetData> {
+export function frameOfSheet(
+  sheet: Sheet,
+  look: SheetLook | undefined,
+  styles: readonly CellStyle[],
+): Partial<IWorksheetData> {
   const columnCount = Math.min(MOST_COLUMNS, Math.max(LEAST_COLUMNS, sheet.lastColumn + 5));
   const columnData: Record<number, { w?: number; hd?: 1 }> = {};
   (look?.columnWidths ?? measured(sheet)).forEach((wide, column) => {
@@ -22,6 +27,9 @@ export function frameOfSheet(sheet: Sheet, look: SheetLook | undefined): Partial
   look?.hiddenColumns.forEach((column) => {
     if (column < columnCount) columnData[column] = { ...columnData[column], hd: 1 };
   });
+  const rowData: Record<number, { h?: number; hd?: 1 }> = {};
+  for (const [row, h] of rowHeights(sheet, look, styles)) rowData[row] = { h };
+  for (const row of sheet.hiddenRows) rowData[row] = { ...rowData[row], hd: 1 };
   const [rows, columns] = [look?.frozenRows ?? 0, look?.frozenColumns ?? 0];
   const mergeData = (look?.merged ?? [])
     .filter(({ bottom, right }) => bottom <= sheet.lastRow + SPARE_ROWS && right < columnCount)
@@ -31,7 +39,7 @@ export function frameOfSheet(sheet: Sheet, look: SheetLook | undefined): Partial
     rowCount: Math.min(MOST_ROWS, Math.max(LEAST_ROWS, sheet.lastRow + 1 + SPARE_ROWS)),
     columnCount,
     columnData,
-    rowData: Object.fromEntries([...sheet.hiddenRows].map((row) => [row, { hd: 1 as const }])),
+    rowData,
     mergeData,
     defaultRowHeight: 22,
     freeze: { startRow: rows || -1, startColumn: columns || -1, ySplit: rows, xSplit: columns },
