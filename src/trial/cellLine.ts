@@ -1,5 +1,6 @@
 import type { Port } from "../hosts/port";
 import { frameTexts } from "./language";
+import { formatAddress, type Area } from "../sheet/address";
 import { isCellError, type Cell } from "../sheet/cell";
 
 /** What stands in a cell, in words: of an error its reason, of a number all its digits. */
@@ -10,16 +11,20 @@ function cellText(cell: Cell): string {
 }
 
 /** Keeps one line of text at what the selected cell holds: the grid is a picture that a screen reader can't read. */
-export function showSelectedCell(port: Port, line: HTMLElement): void {
+export function showSelectedCell(port: Port, selected: () => Area | undefined, line: HTMLElement): void {
   let waiting: ReturnType<typeof setTimeout> | undefined;
   const show = async (): Promise<void> => {
-    const block = await port.selection();
-    const rows = block?.values.length ?? 0;
-    const columns = block?.values[0]?.length ?? 0;
+    const area = selected();
+    const [place, words] = [line.firstElementChild!, line.lastElementChild!];
+    place.textContent = area ? formatAddress(area) : "";
+    if (!area) return void (words.textContent = "");
+    const rows = area.bottom - area.top + 1;
+    const columns = area.right - area.left + 1;
+    // More than one cell is not read: a whole column would be, a second time beside the pane.
     const alone = rows === 1 && columns === 1;
-    const text = !block ? "" : alone ? cellText(block.values[0]![0]) : frameTexts().selectedCells(rows, columns);
-    line.firstElementChild!.textContent = block?.address ?? "";
-    line.lastElementChild!.textContent = text;
+    words.textContent = alone
+      ? cellText((await port.read(formatAddress(area))).values[0]![0])
+      : frameTexts().selectedCells(rows, columns);
   };
   const soon = (): void => {
     clearTimeout(waiting);

@@ -5,6 +5,7 @@ import { letBookBeforeGo, readKeptBook } from "../hosts/trial/keptBook";
 import { messageBook } from "../hosts/trial/messageBook";
 import type { Port } from "../hosts/port";
 import { pictureLayer } from "../hosts/trial/pictureLayer";
+import { selectedArea } from "../hosts/trial/selectedArea";
 import { startSheet } from "../hosts/trial/startSheet";
 import { trialPort } from "../hosts/trial/trialPort";
 import type { FunctionSet } from "../hosts/trial/functionSet";
@@ -43,7 +44,7 @@ export async function openTrial(): Promise<void> {
   const port = followingLanguage(trialPort({ api, univer, messages, pictures, dark: () => scheme.matches }));
   // On the first visit the pane has something to answer at once.
   if (!kept) await port.select(firstColumn);
-  showSelectedCell(port, document.getElementById("cell")!);
+  showSelectedCell(port, () => selectedArea(api), document.getElementById("cell")!);
   // For the browser tests, and for whoever wants to look at the engine from the console.
   Object.assign(globalThis, { weirmarkTrial: { port, api, call: callFunction } });
   setUpFiles(sheet);

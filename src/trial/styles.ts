@@ -9,6 +9,7 @@ export interface Styled {
 
 // The engine's numbers, written out since its own lists would bring the whole engine into the background.
 const WRAP = 3;
+const MIDDLE = 2;
 const ALIGN: readonly (RoleLook["align"] | undefined)[] = [undefined, "left", "center", "right"];
 /** One step of indent, in pixels. */
 const INDENT = 9;
@@ -32,7 +33,8 @@ export function styleOfLook({ format, look = {} }: Styled): IStyleData {
     ...(align && { ht: ALIGN.indexOf(align) }),
     ...(indent && { pd: { [align === "right" ? "r" : "l"]: indent * INDENT } }),
   };
-  return style as IStyleData;
+  // A style that names no place would stand at the bottom, beside plain cells in the middle.
+  return (Object.keys(style).length === 0 ? {} : { vt: MIDDLE, ...style }) as IStyleData;
 }
 
 function borderOf({ side, colour, thick }: NonNullable<RoleLook["rule"]>) {

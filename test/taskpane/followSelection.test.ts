@@ -34,13 +34,13 @@ describe("following the selection", () => {
     expect(column.get()).toMatchObject({ address: "Bids!B2:B5", heading: "score", count: 3, blanks: ["B4"] });
   });
 
-  test("many changes in a row are one reading, after 150 ms of quiet", async () => {
+  test("many changes in a row are one reading, after 80 ms of quiet", async () => {
     const { port, column } = follow();
     await quiet();
     const spy = vi.spyOn(port, "selection");
     for (let i = 0; i < 20; i++) {
       port.pick("Bids!C1:C5");
-      await vi.advanceTimersByTimeAsync(100);
+      await vi.advanceTimersByTimeAsync(50);
     }
     expect(spy).not.toHaveBeenCalled();
     await quiet();

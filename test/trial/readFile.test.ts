@@ -48,11 +48,12 @@ describe("a workbook, laid out for the trial sheet", async () => {
   });
 
   test("has number formats, bold letters and wrapped texts", () => {
+    const middle = { vt: VerticalAlign.MIDDLE };
     const style = (row: number, column: number) => book.styles[cell(row, column)!.s as string];
-    expect(style(0, 0)).toEqual({ bl: 1 });
-    expect(style(1, 1)).toEqual({ n: { pattern: '0.0" points"' } });
-    expect(style(3, 3)).toEqual({ n: { pattern: "yyyy-mm-dd" } });
-    expect(style(7, 4)).toEqual({ n: { pattern: "0.00%" }, tb: WrapStrategy.WRAP });
+    expect(style(0, 0)).toEqual({ ...middle, bl: 1 });
+    expect(style(1, 1)).toEqual({ ...middle, n: { pattern: '0.0" points"' } });
+    expect(style(3, 3)).toEqual({ ...middle, n: { pattern: "yyyy-mm-dd" } });
+    expect(style(7, 4)).toEqual({ ...middle, n: { pattern: "0.00%" }, tb: WrapStrategy.WRAP });
   });
 
   test("has the heights of the file, and makes room for large letters and wrapped texts where it names none", async () => {

@@ -11,15 +11,24 @@ export interface ReadFrom {
   readonly messages: MessageBook;
 }
 
-/** One cell with all its digits: what the engine shows is cut, and a spilled cell is kept apart from the typed ones. */
+/** One cell with all its digits: what the engine shows is cut. */
 export function readCell(from: ReadFrom, sheet: FWorksheet, row: number, column: number): Cell {
+  return cellReader(from, sheet)(row, column);
+}
+
+/** Reads cells of one sheet; what is the same for all of them is looked up once, since a column has a hundred thousand. */
+function cellReader({ formulas, messages }: ReadFrom, sheet: FWorksheet): (row: number, column: number) => Cell {
   const model = sheet.getSheet();
-  const typed = cellOfData(model.getCellRaw(row, column));
-  const spilled = from.formulas.getArrayFormulaCellData()[model.getUnitId()]?.[model.getSheetId()]?.[row]?.[column];
-  const cell = typed ?? cellOfData(spilled);
-  if (typeof cell !== "object" || cell === null) return cell;
-  const message = from.messages.messageAt(model.getSheetId(), row, column, cell.code);
-  return message === undefined ? cell : { ...cell, message };
+  const id = model.getSheetId();
+  const matrix = model.getCellMatrix();
+  // The cells that a formula fills are kept apart from the typed ones.
+  const spilled = formulas.getArrayFormulaCellData()[model.getUnitId()]?.[id];
+  return (row, column) => {
+    const cell = cellOfData(matrix.getValue(row, column)) ?? cellOfData(spilled?.[row]?.[column]);
+    if (typeof cell !== "object" || cell === null) return cell;
+    const message = messages.messageAt(id, row, column, cell.code);
+    return message === undefined ? cell : { ...cell, message };
+  };
 }
 
 /** The cells of an area, cut to the rows and columns that the sheet has; with `used` also to the part that holds something. */
@@ -28,9 +37,13 @@ export function readArea(from: ReadFrom, sheet: FWorksheet, area: Area, used: bo
   const right = Math.min(area.right, sheet.getMaxColumns() - 1);
   const top = Math.min(area.top, bottom);
   const left = Math.min(area.left, right);
-  const values = Array.from({ length: bottom - top + 1 }, (_, down) =>
-    Array.from({ length: right - left + 1 }, (_, across) => readCell(from, sheet, top + down, left + across)),
-  );
+  const read = cellReader(from, sheet);
+  const values: Cell[][] = [];
+  for (let row = top; row <= bottom; row++) {
+    const line: Cell[] = [];
+    for (let column = left; column <= right; column++) line.push(read(row, column));
+    values.push(line);
+  }
   const name = sheet.getSheetName();
   if (!used) return { address: formatAddress({ sheet: name, top, left, bottom, right }), values };
   const part = usedPart(values);

@@ -16,6 +16,7 @@ import type { MessageBook } from "./messageBook";
 import { defineNames, readNames } from "./names";
 import type { PictureLayer } from "./pictureLayer";
 import { readArea, type ReadFrom } from "./readArea";
+import { selectedArea } from "./selectedArea";
 import { settledAfterChanges } from "./settled";
 
 export interface TrialHost {
@@ -45,17 +46,8 @@ export function trialPort({ api, univer, messages, pictures, dark }: TrialHost):
     kind: "trial",
     async selection() {
       await settled();
-      const sheet = book.getActiveSheet();
-      const ranges = sheet.getSelection()?.getActiveRangeList() ?? [];
-      if (ranges.length !== 1) return undefined;
-      const range = ranges[0]!;
-      const area = {
-        top: range.getRow(),
-        left: range.getColumn(),
-        bottom: range.getLastRow(),
-        right: range.getLastColumn(),
-      };
-      return readArea(from, sheet, area, true);
+      const area = selectedArea(api);
+      return area && readArea(from, book.getActiveSheet(), area, true);
     },
     onChange(listener) {
       // Not the engine's own SelectionChanged: set up while the grid is still being laid out, it stays silent at times.

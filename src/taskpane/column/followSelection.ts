@@ -14,7 +14,7 @@ export type Selection =
   | { readonly kind: "column" }
   | { readonly kind: "columns"; readonly block: Block; readonly places: readonly number[]; readonly place: number };
 
-const QUIET_MS = 150;
+const QUIET_MS = 80;
 const FEWEST_NUMBERS = 2;
 /** Scores that may be added below a column between two readings and still be taken for its own. */
 const MOST_ADDED = 500;
