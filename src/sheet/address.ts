@@ -59,6 +59,17 @@ export function formatAddress({ sheet, top, left, bottom, right }: Area): string
   return inFront + (first === last ? first : `${first}:${last}`);
 }
 
+/** The same with every row and column held fast, as a name wants it: `Bids!$F$2:$F$61`. */
+export function absoluteAddress(address: string | Area): string {
+  const area = typeof address === "string" ? parseAddress(address) : address;
+  if (!area) throw new Error(`"${String(address)}" is no address`);
+  const cell = (row: number, column: number) => `$${columnLetters(column)}$${row + 1}`;
+  const first = cell(area.top, area.left);
+  const last = cell(area.bottom, area.right);
+  const inFront = area.sheet === undefined ? "" : `${formatSheetName(area.sheet)}!`;
+  return inFront + (first === last ? first : `${first}:${last}`);
+}
+
 /** A sheet's name as a formula wants it: in quotes unless it is a plain word that can't be taken for an address. */
 export function formatSheetName(name: string): string {
   const plain =

@@ -128,6 +128,18 @@ describe("weirmark plan", () => {
     expect(curve.cell(30, 8)).toEqual(expect.any(Number));
   });
 
+  test.each([2, 3, 5, 5001])("with %d scores no cell fails but those that say so in words", async (count) => {
+    const csv = ["score", ...Array.from({ length: count }, (_, i) => 50 + ((i * 7919) % 1000) / 50)].join("\n");
+    const { code, out } = await commandLine(PLAN, { "bids.csv": csv });
+    expect(code).toBe(0);
+    expect(out).not.toMatch(/no answer/);
+  });
+
+  test("a sheet whose name no host takes gets one that all take", async () => {
+    const { written: made } = await commandLine(["plan", "'a[b].csv", ...PLAN.slice(2)], { "'a[b].csv": CSV });
+    expect(readXlsx(made.get("plan.xlsx")!).sheets[1]!.name).toBe("a b");
+  });
+
   test("takes the sheet of an .xlsx that is named, its values alone, with headings further down", async () => {
     const first = await written([...PLAN.slice(0, -1), "plan.xlsx"]);
     const again = await commandLine(
@@ -190,6 +202,12 @@ describe("weirmark plan refuses, with what to do next", () => {
     ["no scores", PLAN, /There are no scores below “score”/, { "bids.csv": "bid,score\n1,\n2,\n" }],
     ["one score", PLAN, /at least 2 numbers/, { "bids.csv": "bid,score\n1,4\n" }],
     ["a text among the scores", PLAN, /“score”.*n\/a/, { "bids.csv": "bid,score\n1,4\n2,n/a\n3,5\n" }],
+    [
+      "a shape that can't hold the scores",
+      [...PLAN, "--shape", "lognormal"],
+      /numbers above 0 for the shape "lognormal"/,
+      { "bids.csv": "bid,score\n1,-4\n2,4\n3,5\n" },
+    ],
     ["scores all alike", PLAN, /all 2 are 4/, { "bids.csv": "bid,score\n1,4\n2,4\n" }],
     ["two columns of one heading", PLAN, /stands above 2 columns/, { "bids.csv": "score,score\n1,4\n2,5\n" }],
   ])("%s", async (_, args, message, files = FILES) => {

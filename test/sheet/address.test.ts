@@ -1,5 +1,12 @@
 import { describe, expect, test } from "vitest";
-import { columnIndex, columnLetters, formatAddress, formatSheetName, parseAddress } from "../../src/sheet/address";
+import {
+  absoluteAddress,
+  columnIndex,
+  columnLetters,
+  formatAddress,
+  formatSheetName,
+  parseAddress,
+} from "../../src/sheet/address";
 
 describe("addresses", () => {
   test.each([
@@ -42,4 +49,11 @@ describe("addresses", () => {
       "'rc'",
     ]);
   });
+});
+
+test("an address held fast, as a name wants it, keeps its sheet's quotes; what is none is refused", () => {
+  expect(absoluteAddress("Bids!F2:F61")).toBe("Bids!$F$2:$F$61");
+  expect(absoluteAddress("'Round 2'!A1")).toBe("'Round 2'!$A$1");
+  expect(absoluteAddress({ top: 0, left: 26, bottom: 1, right: 26 })).toBe("$AA$1:$AA$2");
+  expect(() => absoluteAddress("nowhere")).toThrow("is no address");
 });

@@ -5,11 +5,12 @@ import { chartTable, type ChartTable, type PlanSeries } from "../../plan/chartTa
 import { layPlan } from "../../plan/layPlan";
 import type { PlanName, PlanQuestion } from "../../plan/planModel";
 import { SERIES_LOOKS } from "../../plan/seriesLooks";
-import { columnLetters, formatAddress, formatSheetName } from "../../sheet/address";
+import { absoluteAddress, formatAddress } from "../../sheet/address";
 import { isCellError, type Cell } from "../../sheet/cell";
 import { gridMark, scoreDecimals } from "../../sheet/scoreGrid";
 import { readShape } from "../../sheet/readShape";
 import { Sheet, type DefinedName, type Workbook } from "../../sheet/workbook";
+import { Stop } from "../io";
 import { calculateCells, numberAt, type Failed } from "./calculateCells";
 import type { PlanColumn } from "./readPlanColumn";
 
@@ -44,6 +45,8 @@ export function planBook(
   };
   const range = scores.range(column.area);
   const outcome = callFunction("TOP_FRACTION_CUTOFF", [range, asked.fraction, asked.shape, asked.better])!;
+  // A shape that can't hold these scores makes a plan full of errors: better none.
+  if ("error" in outcome && outcome.error === "#VALUE!") throw new Stop(outcome.message);
   const cutoff = "value" in outcome && typeof outcome.value === "number" ? outcome.value : undefined;
   const { sorted } = column;
   const spread = sorted[sorted.length - 1]! - sorted[0]!;
@@ -89,7 +92,7 @@ export function planBook(
 
 /** Values alone: what the other file calculated stays what it was. */
 function copyOf(source: Sheet): Sheet {
-  const copy = new Sheet(source.name.replace(/[[\]:*?/\\]/g, " ").slice(0, 31) || "Scores");
+  const copy = new Sheet(sheetName(source.name));
   for (let row = 0; row <= source.lastRow; row++)
     for (let column = 0; column <= source.lastColumn; column++) {
       const cell = source.cell(row, column);
@@ -98,20 +101,22 @@ function copyOf(source: Sheet): Sheet {
   return copy;
 }
 
+/** A name that every host takes: up to 31 letters, none of those that addresses are made of, no apostrophe at the ends. */
+function sheetName(name: string): string {
+  const plain = name
+    .replace(/[[\]:*?/\\]/g, " ")
+    .slice(0, 31)
+    .replace(/^[\s']+|[\s']+$/g, "");
+  return plain === "" || plain.toLowerCase() === "history" ? "Scores" : plain;
+}
+
 function freeNames(taken: string): { plan: string; chart: string } {
   const free = (name: string) => (name.toLowerCase() === taken.toLowerCase() ? `${name} 2` : name);
   return { plan: free("Plan"), chart: free("Plan chart") };
 }
 
 function namesOn(sheet: string, names: readonly PlanName[]): DefinedName[] {
-  return names.map(({ name, area }) => ({ name, formula: absolute({ ...area, sheet: area.sheet ?? sheet }) }));
-}
-
-function absolute({ sheet, top, left, bottom, right }: PlanName["area"]): string {
-  const cell = (row: number, column: number) => `$${columnLetters(column)}$${row + 1}`;
-  const first = cell(top, left);
-  const last = cell(bottom, right);
-  return `${formatSheetName(sheet!)}!${first === last ? first : `${first}:${last}`}`;
+  return names.map(({ name, area }) => ({ name, formula: absoluteAddress({ ...area, sheet: area.sheet ?? sheet }) }));
 }
 
 function asRows(cells: readonly (readonly (CellToWrite | undefined)[])[]): (readonly (Cell | CellToWrite)[])[] {
@@ -151,7 +156,7 @@ function planChart(
 
 function seriesOf({ name, column, first, last, look }: PlanSeries, sheet: Sheet): SeriesToWrite {
   const at = (c: number, top: number, bottom: number) =>
-    absolute({ sheet: sheet.name, top, left: c, bottom, right: c });
+    absoluteAddress({ sheet: sheet.name, top, left: c, bottom, right: c });
   const numbers = (c: number) => Array.from({ length: last - first + 1 }, (_, i) => numberAt(sheet, first + i, c));
   return {
     name,

@@ -1,4 +1,4 @@
-import { formatAddress, parseAddress } from "../../sheet/address";
+import { absoluteAddress, formatAddress, parseAddress } from "../../sheet/address";
 import type { NamedCells } from "../port";
 
 export type RangeAt = (context: Excel.RequestContext, address: string) => Excel.Range;
@@ -23,8 +23,16 @@ export async function defineNames(
   const known = list.map(({ name }) => names.getItemOrNullObject(name));
   known.forEach((one) => one.load("isNullObject"));
   await context.sync();
-  // A name can't be led elsewhere in all builds: the old one goes, the new one comes.
-  known.forEach((one) => one.isNullObject || one.delete());
-  for (const { name, address } of list) names.add(name, rangeAt(context, address));
+  const canLead = Office.context.requirements.isSetSupported("ExcelApi", "1.7");
+  list.forEach(({ name, address }, index) => {
+    const one = known[index]!;
+    if (!one.isNullObject && canLead) {
+      // Led elsewhere instead of made anew: formulas that speak of it never see it missing.
+      one.formula = `=${absoluteAddress(address)}`;
+      return;
+    }
+    if (!one.isNullObject) one.delete();
+    names.add(name, rangeAt(context, address));
+  });
   await context.sync();
 }

@@ -1,5 +1,5 @@
 import type { FWorkbook } from "@univerjs/preset-sheets-core";
-import { columnLetters, formatAddress, formatSheetName, parseAddress } from "../../sheet/address";
+import { absoluteAddress, formatAddress, parseAddress } from "../../sheet/address";
 import type { NamedCells } from "../port";
 
 /** Names that lead to cells; one whose cells were deleted leads nowhere, and is left out. */
@@ -14,9 +14,7 @@ export function defineNames(book: FWorkbook, names: readonly NamedCells[]): void
   for (const { name, address } of names) {
     const area = parseAddress(address);
     if (area?.sheet === undefined) throw new Error(`"${address}" is no address with its sheet`);
-    const cell = (row: number, column: number) => `$${columnLetters(column)}$${row + 1}`;
-    const [first, last] = [cell(area.top, area.left), cell(area.bottom, area.right)];
-    const ref = `${formatSheetName(area.sheet)}!${first === last ? first : `${first}:${last}`}`;
+    const ref = absoluteAddress(area);
     const known = book.getDefinedName(name);
     if (known) {
       if (known.getFormulaOrRefString() !== ref) known.setRef(ref);

@@ -3,6 +3,8 @@ import type { PlanLine } from "../planModel";
 import { result } from "./result";
 
 const { decimals, fine, whole } = NUMBER_FORMATS;
+/** More scores the test doesn't take. */
+const MOST_SHAPIRO = 5000;
 const FEW = '"too few scores"';
 
 /** Whether the scores follow the curve that is taken for them. */
@@ -34,14 +36,14 @@ export function curveCheck(): PlanLine[] {
     result(
       "normal_p",
       "p-value of a normal curve",
-      `IF(weir_count<3,${FEW},WEIR.NORMALITY_CHECK(weir_scores,,"p-value"))`,
+      `IF(weir_count<3,${FEW},WEIR.NORMALITY_CHECK(weir_scores,IF(weir_count>${MOST_SHAPIRO},"anderson-darling","shapiro-wilk"),"p-value"))`,
       fine,
-      "Shapiro-Wilk, whatever shape is taken above.",
+      "Shapiro-Wilk (above 5,000 scores Anderson-Darling), whatever shape is taken above.",
     ),
     result(
       "best_shape",
       "Shape that fits best",
-      "INDEX(WEIR.SHAPE_RANKING(weir_scores),2,1)",
+      `IF(weir_count<5,${FEW},INDEX(WEIR.SHAPE_RANKING(weir_scores),2,1))`,
       undefined,
       "By AICc, of normal, lognormal and boxcox. Picked by looking, it makes the limits too narrow.",
     ),
