@@ -1,6 +1,6 @@
 import type { Workbook } from "../sheet/workbook";
 import { callCells } from "./callCells";
-import { newSharedWork } from "./evaluation";
+import { newSharedWork, type OwnCall } from "./evaluation";
 import { fileRevision } from "./fileRevision";
 import { judgeCall } from "./judgeCall";
 import type { Judgement, Notice, Verdict } from "./judgement";
@@ -10,7 +10,7 @@ import { allDataLeftOut, rangesOutOfLine } from "./notices/dataLeftOut";
 import { fixedMarks } from "./notices/fixedMarks";
 import { hiddenRowsInside, totalTakenIn } from "./notices/totalTakenIn";
 import { typedOver } from "./notices/typedOver";
-import { loadSecondOpinion, type SecondOpinion } from "./opinion/secondOpinion";
+import { loadSecondOpinion, type Heard, type SecondOpinion } from "./opinion/secondOpinion";
 
 export interface Audit {
   readonly judgements: readonly Judgement[];
@@ -34,11 +34,17 @@ export async function auditWorkbook(workbook: Workbook, { tolerance }: AuditOpti
   const judgements: Judgement[] = [];
   const doubts: Notice[] = [];
   for (const call of calls) {
-    const judged = judgeCall(call, setting);
+    const { judgement, calls: worked } = judgeCall(call, setting);
     // Beside a value that nobody could judge it would pass for a verdict.
-    const heard = opinion && judged.verdict !== "not checkable" ? withOpinion(judged, opinion) : undefined;
-    judgements.push(withoutRanges(heard?.judgement ?? judged));
-    doubts.push(...(heard?.doubts ?? []));
+    const heard = opinion && judgement.verdict !== "not checkable" ? heardOf(worked, opinion) : undefined;
+    judgements.push(heard ? { ...judgement, why: `${judgement.why} ${heard.sentence}` } : judgement);
+    if (heard && !heard.agrees)
+      doubts.push({
+        sheet: judgement.sheet.name,
+        address: judgement.address,
+        kind: "second opinion differs",
+        why: heard.sentence,
+      });
   }
   const ranges = withinReach(callRanges(judgements));
   const notices = [
@@ -55,15 +61,6 @@ export async function auditWorkbook(workbook: Workbook, { tolerance }: AuditOpti
   return { judgements, notices, counts, fileRevision: revision };
 }
 
-/** What was judged, without the cells that its calls were given: of many calls on many ranges nobody could keep them all. */
-function withoutRanges(judgement: Judgement): Judgement {
-  const calls = judgement.calls.map((call) => ({
-    ...call,
-    given: call.given.map((argument) => (Array.isArray(argument) ? undefined : argument)),
-  }));
-  return { ...judgement, calls };
-}
-
 /** Cells that are looked through for what is wrong beside the calls, in all ranges together. */
 const MOST_CELLS_LOOKED_AT = 500_000_000;
 
@@ -76,19 +73,11 @@ function withinReach(ranges: readonly CallRange[]): CallRange[] {
   });
 }
 
-/** Adds what the other library says of the first call that it can speak on. */
-function withOpinion(
-  judgement: Judgement,
-  opinion: SecondOpinion,
-): { judgement: Judgement; doubts: Notice[] } | undefined {
-  for (const call of judgement.calls) {
+/** What the other library says of the first call that it can speak on. */
+function heardOf(calls: readonly OwnCall[], opinion: SecondOpinion): Heard | undefined {
+  for (const call of calls) {
     const heard = opinion.of(call);
-    if (!heard) continue;
-    const { sheet, address } = judgement;
-    const doubts: Notice[] = heard.agrees
-      ? []
-      : [{ sheet: sheet.name, address, kind: "second opinion differs", why: heard.sentence }];
-    return { judgement: { ...judgement, why: `${judgement.why} ${heard.sentence}` }, doubts };
+    if (heard) return heard;
   }
   return undefined;
 }

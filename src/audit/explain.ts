@@ -72,7 +72,8 @@ function blanksSentence(calls: readonly OwnCall[]): string {
 function usualSentence({ stored, recomputed }: Comparison): string {
   if (typeof stored === "number" && typeof recomputed === "number")
     for (let decimals = 0; decimals <= 8; decimals++)
-      if (Number(recomputed.toFixed(decimals)) === stored)
+      // A single digit left would fit by chance.
+      if (Number(recomputed.toFixed(decimals)) === stored && Math.abs(stored) * 10 ** decimals >= 10)
         return `It is that value rounded to ${counted(decimals, "decimal")}: the file may be set to calculate with the precision shown.`;
   return "Either the value was changed by hand, or an input was changed after it was last calculated: calculate the file anew, and ask for the reason if it still differs.";
 }

@@ -9,9 +9,9 @@ import type { OwnCall, SharedWork } from "./evaluation";
 import { isReleaseCell } from "./fileRevision";
 import { explainAgreement, explainDifference } from "./explain";
 import { storedFormula, typedFormula } from "./formulaText";
-import type { Judgement } from "./judgement";
+import type { JudgedCall, Judgement } from "./judgement";
 import { LAST_ROW } from "./reference";
-import { Reference } from "./value";
+import { isArray, Reference } from "./value";
 
 export interface JudgeSetting {
   readonly workbook: Workbook;
@@ -36,10 +36,29 @@ const NO_ANSWER: Readonly<Record<string, readonly [why: string, next: string]>> 
   ],
 };
 
-/** Judges one cell: its stored value against the one that comes out of the stored inputs. */
-export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSetting): Judgement {
-  const { row, column, array } = cell;
+/** Judges one cell: its stored value against the one that comes out of the stored inputs. Hands on the calls as they were worked out. */
+export function judgeCall(call: CallCell, setting: JudgeSetting): { judgement: Judgement; calls: readonly OwnCall[] } {
   const calls: OwnCall[] = [];
+  const judgement = judgedBy(call, setting, calls);
+  return { judgement: { ...judgement, calls: calls.map(judgedCall) }, calls };
+}
+
+function judgedCall({ entry, values, given, outcome }: OwnCall): JudgedCall {
+  const single = given.map((argument) => (Array.isArray(argument) ? undefined : argument));
+  return {
+    entry,
+    values: values.map((value) => (isArray(value ?? null) ? undefined : value)),
+    given: single,
+    answered: "value" in outcome,
+  };
+}
+
+function judgedBy(
+  { sheet, cell, unknown }: CallCell,
+  setting: JudgeSetting,
+  calls: OwnCall[],
+): Omit<Judgement, "calls"> {
+  const { row, column, array } = cell;
   const stored = array ? sheet.range(array) : [[sheet.cell(row, column)]];
   const place: FormulaPlace = {
     workbook: setting.workbook,
@@ -59,7 +78,6 @@ export function judgeCall({ sheet, cell, unknown }: CallCell, setting: JudgeSett
     formula: typedFormula(storedFormula(cell)),
     stored: oneOrRows(stored),
     recomputed: "value" in answer && unknown.length === 0 ? shownOf(answer.value, !array) : undefined,
-    calls,
   };
   const hindrance = cell.calculated
     ? whatHinders(answer, stored[0]![0], unknown)

@@ -4,6 +4,9 @@ import type { OwnCall } from "./evaluation";
 
 export type Verdict = "agrees" | "differs" | "not checkable";
 
+/** What is kept of a call: not its formula, nor the cells of the ranges it was given. Of many calls nobody could keep them all. */
+export type JudgedCall = Pick<OwnCall, "entry" | "values" | "given"> & { readonly answered: boolean };
+
 /** What was found about one cell that calls a function of ours. */
 export interface Judgement {
   readonly sheet: Sheet;
@@ -19,7 +22,7 @@ export interface Judgement {
   /** One or more sentences. */
   readonly why: string;
   /** The calls of ours that took part. */
-  readonly calls: readonly OwnCall[];
+  readonly calls: readonly JudgedCall[];
 }
 
 /** Something beside a wrong value that an auditor should look at. */

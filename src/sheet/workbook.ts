@@ -47,6 +47,8 @@ export interface Workbook {
 const COLUMNS = 16_384;
 const MOST_COLUMNS_IN_TURN = 256;
 const MOST_REMEMBERED_CELLS = 1_000_000;
+/** Ranges of no more cells are read anew each time: there may be one a row. */
+const SMALL = 8;
 
 /** One sheet: the stored values by row, the formulas beside them, and what of it is hidden. */
 export class Sheet {
@@ -109,11 +111,26 @@ export class Sheet {
     }
   }
 
-  /** The stored values of an area, row by row, null for a blank. The same area gives the same array: it must not be changed. */
+  /** The stored values of an area, row by row, null for a blank. The same area gives the same array, but for a small one: it must not be changed. */
   range({ top, left, bottom, right }: Area): Range {
+    const size = (bottom - top + 1) * (right - left + 1);
+    if (size <= SMALL) return Object.freeze(this.#read(top, left, bottom, right));
     const name = `${top},${left},${bottom},${right}`;
     const known = this.#ranges.get(name);
     if (known) return known;
+    const cells = this.#read(top, left, bottom, right);
+    if (this.#remembered + size > MOST_REMEMBERED_CELLS) {
+      this.#ranges.clear();
+      this.#remembered = 0;
+    }
+    // What reads a frozen range may remember what it read.
+    Object.freeze(cells);
+    this.#ranges.set(name, cells);
+    this.#remembered += size;
+    return cells;
+  }
+
+  #read(top: number, left: number, bottom: number, right: number): Cell[][] {
     const cells: Cell[][] = [];
     // One and the same blank row throughout: a range may claim millions of them.
     const blank = Array<Cell>(right - left + 1).fill(null);
@@ -127,15 +144,6 @@ export class Sheet {
       for (let column = left; column <= right; column++) line.push(stored[column] ?? null);
       cells.push(line);
     }
-    const size = (bottom - top + 1) * (right - left + 1);
-    if (this.#remembered + size > MOST_REMEMBERED_CELLS) {
-      this.#ranges.clear();
-      this.#remembered = 0;
-    }
-    // What reads a frozen range may remember what it read.
-    Object.freeze(cells);
-    this.#ranges.set(name, cells);
-    this.#remembered += size;
     return cells;
   }
 }

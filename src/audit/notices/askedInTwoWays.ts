@@ -18,9 +18,9 @@ interface Asked {
 export function askedInTwoWays(judgements: readonly Judgement[]): Notice[] {
   const asked = new Map<string, Asked>();
   for (const judgement of judgements) {
-    for (const { entry, values, given, outcome } of judgement.calls) {
+    for (const { entry, values, given, answered } of judgement.calls) {
       // A fraction of 1000% was refused: it judged nothing.
-      if ("error" in outcome) continue;
+      if (!answered) continue;
       const at = entry.parameters.findIndex(({ name }) => name === "scores");
       const place = at < 0 ? undefined : values[at];
       if (!(place instanceof Reference) || place.places.length !== 1) continue;
