@@ -1,9 +1,9 @@
-import { BorderStyleTypes, HorizontalAlign, VerticalAlign, WrapStrategy, type IStyleData } from "@univerjs/core";
+import { VerticalAlign, type IStyleData } from "@univerjs/core";
 import type { FWorksheet } from "@univerjs/preset-sheets-core";
 import { ROLE_LOOKS, type CellRole } from "../../sheet/cellLook";
 import type { SheetLook } from "../port";
+import { styleOfLook } from "./styles";
 
-const ALIGN = { left: HorizontalAlign.LEFT, center: HorizontalAlign.CENTER, right: HorizontalAlign.RIGHT } as const;
 /** CSS pixels to a letter and to a point. */
 const LETTER = 7.6;
 const POINT = 4 / 3;
@@ -28,22 +28,5 @@ export function dressSheet(sheet: FWorksheet, { cells, widths, heights, merged }
 }
 
 function styleOf(role: CellRole, format: string | undefined): IStyleData {
-  const { size, bold, italic, ink, fill, rule, wrap, align } = ROLE_LOOKS[role];
-  const line = rule && {
-    s: rule.thick ? BorderStyleTypes.MEDIUM : BorderStyleTypes.THIN,
-    cl: { rgb: `#${rule.colour}` },
-  };
-  const sides = { bottom: { b: line }, left: { l: line }, box: { b: line, l: line, r: line, t: line } } as const;
-  return {
-    vt: VerticalAlign.TOP,
-    ...(size && { fs: size }),
-    ...(bold && { bl: 1 }),
-    ...(italic && { it: 1 }),
-    ...(ink && { cl: { rgb: `#${ink}` } }),
-    ...(fill && { bg: { rgb: `#${fill}` } }),
-    ...(rule && { bd: sides[rule.side] as IStyleData["bd"] }),
-    ...(wrap && { tb: WrapStrategy.WRAP }),
-    ...(align && { ht: ALIGN[align] }),
-    ...(format && { n: { pattern: format } }),
-  };
+  return { ...styleOfLook({ look: ROLE_LOOKS[role], ...(format && { format }) }), vt: VerticalAlign.TOP };
 }

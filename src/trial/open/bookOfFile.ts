@@ -4,7 +4,7 @@ import type { CellStyle, SheetLook } from "../../hosts/file/sheetLook";
 import type { Workbook } from "../../sheet/workbook";
 import { cellsOfSheet, type Differences } from "./cellsOfSheet";
 import { frameOfSheet } from "./frameOfSheet";
-import { styleOfLook } from "../styles";
+import { styleOfLook } from "../../hosts/trial/styles";
 import { namesResource } from "./namesResource";
 
 /** A file as read: cells, and where it is a workbook with looks also those. */

@@ -3,7 +3,7 @@ import type { BookToWrite, CellToWrite, SheetToWrite } from "../../hosts/file/wr
 import { cellOfData } from "../../hosts/trial/cellOfData";
 import type { SavedBook } from "../../hosts/trial/savedBook";
 import { frameToWrite } from "./frameToWrite";
-import { lookOfStyle } from "../styles";
+import { lookOfStyle } from "../../hosts/trial/styles";
 
 type ByCell<What> = Readonly<Record<number, Readonly<Record<number, What>>>>;
 

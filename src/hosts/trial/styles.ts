@@ -1,5 +1,5 @@
 import type { IBorderData, IStyleData, Nullable } from "@univerjs/core";
-import type { RoleLook } from "../sheet/cellLook";
+import type { RoleLook } from "../../sheet/cellLook";
 
 /** How a cell looks and how its number is shown, as files have it. */
 export interface Styled {

@@ -1,9 +1,9 @@
 import { BorderStyleTypes, HorizontalAlign, WrapStrategy } from "@univerjs/core";
 import fc from "fast-check";
 import { expect, test } from "vitest";
-import type { RoleLook } from "../../src/sheet/cellLook";
-import { CELL_ROLES, ROLE_LOOKS } from "../../src/sheet/cellLook";
-import { lookOfStyle, styleOfLook } from "../../src/trial/styles";
+import type { RoleLook } from "../../../src/sheet/cellLook";
+import { CELL_ROLES, ROLE_LOOKS } from "../../../src/sheet/cellLook";
+import { lookOfStyle, styleOfLook } from "../../../src/hosts/trial/styles";
 
 test("a look is styled by the engine's own numbers", () => {
   const rule = { side: "box", colour: "0B4A6B", thick: true } as const;
