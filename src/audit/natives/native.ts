@@ -1,5 +1,5 @@
 import { DomainError, NoAnswerError, UnsettledError } from "../../core/domain";
-import { isCellError, type Cell, type CellError } from "../../sheet/cell";
+import { isCellError, type Cell, type CellError, type Range } from "../../sheet/cell";
 import { broadcast } from "../broadcast";
 import { toNumber, toText } from "../coerce";
 import type { Evaluation } from "../evaluation";
@@ -62,7 +62,19 @@ export function numberOrError(answer: () => number | CellError): number | CellEr
  * The numbers that a function of many takes from its arguments: of cells and arrays only numbers, of a value typed in also TRUE and a
  * text that is one. The first error is handed back instead.
  */
-export function numbersOf(args: readonly Value[], at: Evaluation): number[] | CellError {
+export function numbersOf(args: readonly Value[], at: Evaluation): readonly number[] | CellError {
+  const [only] = args;
+  if (args.length > 1 || !(only instanceof Reference) || only.places.length !== 1) return gathered(args, at);
+  const rows = at.rows(only);
+  let known = numbersIn.get(rows);
+  if (!known) numbersIn.set(rows, (known = gathered(args, at)));
+  return known;
+}
+
+/** The numbers of a range that was read before: many formulas take the same one. */
+const numbersIn = new WeakMap<Range, readonly number[] | CellError>();
+
+function gathered(args: readonly Value[], at: Evaluation): readonly number[] | CellError {
   const numbers: number[] = [];
   for (const arg of args) {
     if (!(arg instanceof Reference) && !isArray(arg)) {
@@ -89,7 +101,7 @@ export function areasOf(value: Value, at: Evaluation): (readonly (readonly Cell[
 
 /** A function of many numbers; fewer than `least` of them is an error. */
 export function ofNumbers(
-  answer: (numbers: number[]) => number | CellError,
+  answer: (numbers: readonly number[]) => number | CellError,
   fewest = 0,
   without = errorCell("#DIV/0!"),
 ): Native {

@@ -1,5 +1,5 @@
 import { compensatedSum } from "../../core/numeric/compensatedSum";
-import { Sample } from "../../core/sample/sample";
+import type { Sample } from "../../core/sample/sample";
 import { sampleQuantile } from "../../core/sample/sampleQuantile";
 import { isCellError, type CellError } from "../../sheet/cell";
 import { broadcast } from "../broadcast";
@@ -7,6 +7,7 @@ import { toNumber } from "../coerce";
 import type { Evaluation } from "../evaluation";
 import { errorCell, firstError, type Value } from "../value";
 import { numberOrError, numbersOf, ofNumbers, oneNumber, type Native, type NativeTable } from "./native";
+import { sampleOf } from "./sampleOf";
 
 const NUM = errorCell("#NUM!");
 const quartile = ordered((sample, part) => inclusive(sample, Math.trunc(part) / 4));
@@ -15,7 +16,7 @@ const rank = ranked((above) => above + 1);
 
 /** What depends on the order of many cells. */
 export const order: NativeTable = {
-  MEDIAN: ofNumbers((numbers) => sampleQuantile(new Sample(Float64Array.from(numbers)), 0.5), 1, NUM),
+  MEDIAN: ofNumbers((numbers) => sampleQuantile(sampleOf(numbers), 0.5), 1, NUM),
   "QUARTILE.INC": quartile,
   QUARTILE: quartile,
   "QUARTILE.EXC": ordered((sample, part) => exclusive(sample, Math.trunc(part) / 4)),
@@ -39,7 +40,7 @@ function ordered(answer: (sample: Sample, place: number) => number | CellError):
       const numbers = numbersOf([many!], at);
       if (!Array.isArray(numbers)) return numbers as CellError;
       if (numbers.length === 0) return NUM;
-      const sample = new Sample(Float64Array.from(numbers));
+      const sample = sampleOf(numbers);
       return broadcast([at.operand(places!)], (cells) => {
         const place = firstError(cells) ?? toNumber(cells[0]!);
         return typeof place === "number" ? numberOrError(() => answer(sample, place)) : place;

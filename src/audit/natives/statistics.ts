@@ -1,11 +1,11 @@
 import { compensatedSum } from "../../core/numeric/compensatedSum";
 import { moments } from "../../core/sample/moments";
-import { Sample } from "../../core/sample/sample";
+import type { Sample } from "../../core/sample/sample";
 import type { CellError } from "../../sheet/cell";
 import { errorCell } from "../value";
 import { ofNumbers, type NativeTable } from "./native";
+import { sampleOf } from "./sampleOf";
 
-const sampleOf = (numbers: readonly number[]) => new Sample(Float64Array.from(numbers));
 const variance = ofNumbers((numbers) => sampleOf(numbers).sumOfSquares / (numbers.length - 1), 2);
 const wholeVariance = ofNumbers((numbers) => sampleOf(numbers).sumOfSquares / numbers.length, 1);
 const deviation = ofNumbers((numbers) => sampleOf(numbers).sd, 2);
