@@ -36,7 +36,7 @@ export function layPlan(question: PlanQuestion, { count, mark: held }: PlanFacts
     ...scoreFirst(),
     ...curveCheck(),
     ...mark(),
-    ...search(),
+    ...search(question),
     ...settle(question, held, count),
     ...words(question),
   ];

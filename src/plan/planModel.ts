@@ -15,6 +15,18 @@ export interface PlanQuestion {
   readonly shape: string;
   /** The day it is written, as 2025-03-14. */
   readonly day: string;
+  /** What was already said of the search; usual values stand where nothing was. */
+  readonly search?: PlanSearch;
+}
+
+export interface PlanSearch {
+  readonly hits?: number;
+  readonly chance?: number;
+  readonly arrivals?: number;
+  readonly lookCost?: number;
+  readonly looks?: number;
+  /** Share of the entries that gets to each stage, and what it costs there. */
+  readonly stages?: readonly { readonly label?: string; readonly reach: number; readonly cost: number }[];
 }
 
 /** A cell of the plan: a constant, or a formula as it is typed. */

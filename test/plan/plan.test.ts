@@ -67,13 +67,37 @@ describe("the plan", () => {
   test.each([0.01, 0.05, 0.2, 0.6, 0.99])(
     "offers stages that fit a fraction of %d: falling, none below it",
     (fraction) => {
-      const reach = usualStages(fraction).map((line) => (line.kind === "stage" ? line.reach : NaN));
+      const reach = usualStages(fraction).map((stage) => stage.reach);
       expect(reach[0]).toBe(1);
       expect(reach[1]).toBeLessThanOrEqual(reach[0]!);
       expect(reach[2]).toBeLessThanOrEqual(reach[1]!);
       expect(reach[2]).toBeGreaterThanOrEqual(fraction);
     },
   );
+});
+
+test("what was already said of the search stands in the inputs, and isn't called assumed", () => {
+  const search = {
+    hits: 3,
+    chance: 0.8,
+    arrivals: 12,
+    lookCost: 0.5,
+    looks: 40,
+    stages: [
+      { reach: 1, cost: 1 },
+      { reach: 0.2, cost: 4 },
+    ],
+  };
+  const { rows, names } = layPlan({ ...QUESTION, search }, { count: 60, mark: 77.6 });
+  const line = (name: string) => rows[names.find((one) => one.name === `weir_${name}`)!.area.top]!;
+  expect(["hits", "chance", "arrivals", "look_cost", "looks"].map((name) => line(name)[1]!.value)).toEqual([
+    3, 0.8, 12, 0.5, 40,
+  ]);
+  expect(String(line("chance")[3]!.value)).not.toMatch(/assumed/i);
+  const reach = names.find((one) => one.name === "weir_stage_reach")!.area;
+  expect([rows[reach.top]![1]!.value, rows[reach.bottom]![1]!.value]).toEqual([1, 0.2]);
+  expect(names.some(({ name }) => name === "weir_stage_2")).toBe(true);
+  expect(names.some(({ name }) => name === "weir_stage_3")).toBe(false);
 });
 
 describe("the numbers of the chart", () => {

@@ -1,12 +1,20 @@
 import { NUMBER_FORMATS } from "../../sheet/cellLook";
 import { SCORES } from "../names";
 import type { PlanLine, PlanQuestion } from "../planModel";
-import { usualStages } from "./usualStages";
+import { stageLines, usualStages } from "./usualStages";
 
 const { percent, whole } = NUMBER_FORMATS;
 
 /** What the user may put in. What isn't asked for has a usual value, and says so. */
-export function inputs({ scores, heading, fraction, confidence, better, shape }: PlanQuestion): PlanLine[] {
+export function inputs({
+  scores,
+  heading,
+  fraction,
+  confidence,
+  better,
+  shape,
+  search = {},
+}: PlanQuestion): PlanLine[] {
   const given = (
     name: string,
     label: string,
@@ -55,33 +63,44 @@ export function inputs({ scores, heading, fraction, confidence, better, shape }:
       percent,
       "Assumed: the most that is still good enough.",
     ),
-    given("hits", "Hits wanted", 1, whole, "How many entries are to be found that clear the mark."),
-    given("chance", "Chance wanted", 0.9, percent, "Assumed: with this chance looks, time and money are to be enough."),
+    given("hits", "Hits wanted", search.hits ?? 1, whole, "How many entries are to be found that clear the mark."),
+    given(
+      "chance",
+      "Chance wanted",
+      search.chance ?? 0.9,
+      percent,
+      assumed(search.chance, "with this chance looks, time and money are to be enough."),
+    ),
     given(
       "looks",
       "Looks you can afford",
-      Math.ceil(3 / fraction),
+      search.looks ?? Math.ceil(3 / fraction),
       whole,
-      "Assumed: three times what a hit takes on average.",
+      search.looks === undefined ? "Assumed: three times what a hit takes on average." : "How many are left at most.",
     ),
     given(
       "arrivals",
       "Entries a week",
-      5,
+      search.arrivals ?? 5,
       undefined,
-      "Assumed: how many entries come by on average. For another unit of time, count in that.",
+      assumed(search.arrivals, "how many entries come by on average. For another unit of time, count in that."),
     ),
     {
       kind: "input",
       name: "weir_look_cost",
       label: "Cost of one look, in score points",
-      cell: { value: null },
-      meaning: "Left empty: there is no reserve then. How many points of score one more look is worth to you.",
+      cell: { value: search.lookCost ?? null },
+      meaning: "How many points of score one more look is worth to you. Left empty there is no reserve.",
     },
     {
       kind: "heading",
-      texts: ["Stages of a look", "reach", "cost", "In any unit of cost, such as hours. Assumed: put in your own."],
+      texts: ["Stages of a look", "reach", "cost", assumed(search.stages, "in any unit of cost, such as hours.")],
     },
-    ...usualStages(fraction),
+    ...stageLines(search.stages ?? usualStages(fraction)),
   ];
+}
+
+/** A value that nobody gave is marked as such, so that it is looked at. */
+function assumed(given: unknown, meaning: string): string {
+  return given === undefined ? `Assumed: ${meaning}` : meaning.charAt(0).toUpperCase() + meaning.slice(1);
 }

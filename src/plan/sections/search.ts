@@ -1,14 +1,16 @@
 import { NUMBER_FORMATS } from "../../sheet/cellLook";
-import type { PlanLine } from "../planModel";
+import type { PlanLine, PlanQuestion } from "../planModel";
 import { STAGE_COSTS, STAGE_REACH } from "../names";
 import { result } from "./result";
+import { usualStages } from "./usualStages";
 
 const { percent, decimals, whole } = NUMBER_FORMATS;
 const NORMAL_ONLY = '"not this shape"';
 const LOAD = `WEIR.STAGE_LOAD(${STAGE_REACH},${STAGE_COSTS},weir_fraction,weir_count,weir_hits)`;
 
 /** How many more looks it takes, how long, through which stages and at what cost. */
-export function search(): PlanLine[] {
+export function search({ fraction, search: asked }: PlanQuestion): PlanLine[] {
+  const stages = asked?.stages ?? usualStages(fraction);
   return [
     { kind: "section", text: "What the search takes", newPage: true },
     result(
@@ -50,7 +52,7 @@ export function search(): PlanLine[] {
       kind: "heading",
       texts: ["Work by stage", "looks", "cost", "Learning on the scores at hand and searching, on average."],
     },
-    ...["First stage", "Second stage", "Third stage"].map((label, index): PlanLine => stageLoad(label, index + 1)),
+    ...stages.map(({ label }, index) => stageLoad(label ?? `Stage ${index + 1}`, index + 1)),
     result(
       "cost_average",
       "Cost on average",

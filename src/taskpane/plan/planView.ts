@@ -1,4 +1,4 @@
-import type { PlanQuestion } from "../../plan/planModel";
+import type { PlanQuestion, PlanSearch } from "../../plan/planModel";
 import { formatAddress, parseAddress } from "../../sheet/address";
 import { svgText } from "../../plot/svgText";
 import type { PaneContext } from "../context";
@@ -7,6 +7,7 @@ import { scoresPicture } from "../cutoff/scoresPicture";
 import { button } from "../dom/choice";
 import { element } from "../dom/element";
 import { fold } from "../dom/part";
+import { keptSearch, type SearchQuestion } from "../search/searchQuestion";
 import { today } from "../today";
 import type { PlanOutcome } from "./planOutcome";
 import { NamesTaken, writePlan } from "./writePlan";
@@ -56,11 +57,13 @@ export function planView(context: PaneContext): HTMLElement {
 async function write(context: PaneContext, current: CutoffAnswer): Promise<PlanOutcome> {
   const { port } = context;
   const { column, question, report } = current;
+  const kept = await port.readSetting("search");
   const asked: PlanQuestion = {
     ...question,
     scores: column.address,
     heading: column.heading === "" ? "scores" : column.heading,
     day: today(),
+    ...(kept !== undefined && { search: searchOf(keptSearch(kept)) }),
   };
   const outcome = await writePlan(port, asked, {
     sorted: column.sorted,
@@ -81,6 +84,12 @@ async function write(context: PaneContext, current: CutoffAnswer): Promise<PlanO
     });
   }
   return outcome;
+}
+
+/** What the user told the pane of the search; one stage that costs 1 is what the pane begins with, and says nothing. */
+function searchOf({ hits, chance, arrivals, lookCost, looksLeft, stages }: SearchQuestion): PlanSearch {
+  const told = stages.length > 1 || stages[0]!.cost !== 1;
+  return { hits, chance, arrivals, lookCost, looks: looksLeft, ...(told && { stages }) };
 }
 
 function doneWords({ texts }: PaneContext, { sheet, updated, left }: PlanOutcome): string {
