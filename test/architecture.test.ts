@@ -15,9 +15,10 @@ const LAYERS: Record<string, readonly string[]> = {
   plot: ["core", "sheet"],
   plan: ["core", "sheet", "plot"],
   hosts: ["sheet"],
-  taskpane: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts"],
-  trial: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts", "taskpane"],
-  cli: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts"],
+  report: ["core", "sheet", "audit", "hosts"],
+  taskpane: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts", "report"],
+  trial: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts", "report", "taskpane"],
+  cli: ["core", "sheet", "workings", "functions", "audit", "plot", "plan", "hosts", "report"],
 };
 /** Packages that a layer may load; the pure layers get by without any but these. */
 const PACKAGES: Record<string, RegExp> = {

@@ -4,12 +4,12 @@ import { formatSheetName } from "../sheet/address";
 import { isCellError, type Cell } from "../sheet/cell";
 import { Stop, type Command, type Io } from "./io";
 import { loadWorkbook } from "./loadWorkbook";
-import { plainCell, printable } from "./plainText";
+import { plainCell, printable } from "../report/plainText";
 import { readArguments } from "./readArguments";
-import { auditReport, summarySentence, type AuditReport } from "./report/auditReport";
-import { csvReport } from "./report/csvReport";
-import { htmlReport } from "./report/htmlReport";
-import { xlsxReport } from "./report/xlsxReport";
+import { auditReport, summarySentence, type AuditReport } from "../report/auditReport";
+import { csvReport } from "../report/csvReport";
+import { htmlReport } from "../report/htmlReport";
+import { xlsxReport } from "../report/xlsxReport";
 
 const OPTIONS = { tolerance: "string", json: "boolean", strict: "boolean", report: "string", help: "boolean" } as const;
 const USUAL_TOLERANCE = 1e-9;

@@ -4,7 +4,7 @@ import { UnusableFile } from "../hosts/file/unusableFile";
 import { describeAnswer, type Calculated } from "./calculated";
 import { Stop, type Command, type Io } from "./io";
 import { chooseSheet, loadWorkbook } from "./loadWorkbook";
-import { alignedRows, plainCell, printable } from "./plainText";
+import { alignedRows, plainCell, printable } from "../report/plainText";
 import { readArguments } from "./readArguments";
 
 const OPTIONS = { formulas: "string", sheet: "string", json: "boolean", help: "boolean" } as const;

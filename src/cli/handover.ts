@@ -8,9 +8,9 @@ import { isCellError, type Cell } from "../sheet/cell";
 import { Sheet } from "../sheet/workbook";
 import { Stop, type Command, type Io } from "./io";
 import { parseWorkbook } from "./loadWorkbook";
-import { printable } from "./plainText";
+import { printable } from "../report/plainText";
 import { readArguments } from "./readArguments";
-import { inOneLine } from "./report/auditReport";
+import { inOneLine } from "../report/auditReport";
 
 const OPTIONS = { out: "string", json: "boolean", help: "boolean" } as const;
 const TOLERANCE = 1e-9;

@@ -6,7 +6,7 @@ import { functions } from "./functions";
 import { handover } from "./handover";
 import { Stop, type Command, type Io } from "./io";
 import { plan } from "./plan";
-import { printable } from "./plainText";
+import { printable } from "../report/plainText";
 
 const COMMANDS: readonly Command[] = [calc, plan, audit, handover, functions];
 

@@ -1,5 +1,5 @@
 import { formatAddress } from "../../sheet/address";
-import { printable, readableNumber } from "../plainText";
+import { printable, readableNumber } from "../../report/plainText";
 import type { PlannedBook } from "./planBook";
 import type { PlanColumn } from "./readPlanColumn";
 

@@ -5,7 +5,7 @@ import { isBlank, type Cell } from "../../sheet/cell";
 import { readScores } from "../../sheet/readScores";
 import type { Sheet } from "../../sheet/workbook";
 import { Stop } from "../io";
-import { printable } from "../plainText";
+import { printable } from "../../report/plainText";
 
 /** Headings are looked for down to here. */
 const FIRST_ROWS = 50;

@@ -1,6 +1,6 @@
-import { escapeXml } from "../../hosts/file/write/xmlText";
-import type { Cell } from "../../sheet/cell";
-import { plainCell } from "../plainText";
+import { escapeXml } from "../hosts/file/write/xmlText";
+import type { Cell } from "../sheet/cell";
+import { plainCell } from "./plainText";
 import { CALL_HEADINGS, callRow, NOTICE_HEADINGS, noticeRow, type AuditReport } from "./auditReport";
 
 /** Ink on paper with one accent; a printed page says the same as the screen. */

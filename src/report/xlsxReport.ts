@@ -1,5 +1,5 @@
-import { listSheet } from "../../hosts/file/write/listSheet";
-import { writeXlsx } from "../../hosts/file/writeXlsx";
+import { listSheet } from "../hosts/file/write/listSheet";
+import { writeXlsx } from "../hosts/file/writeXlsx";
 import { CALL_HEADINGS, callRow, NOTICE_HEADINGS, noticeRow, type AuditReport } from "./auditReport";
 
 /** The report as a workbook: a summary, the calls, and what else was noticed. */

@@ -1,4 +1,4 @@
-import type { Cell } from "../../sheet/cell";
+import type { Cell } from "../sheet/cell";
 import { CALL_HEADINGS, callRow, noticeRow, type AuditReport } from "./auditReport";
 
 /** The report as CSV in UTF-8: calls first, then what else was noticed, in the same columns. */

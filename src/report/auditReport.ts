@@ -1,8 +1,8 @@
-import type { Audit } from "../../audit/auditWorkbook";
-import type { Judgement, Notice } from "../../audit/judgement";
-import { isCellError, type Cell } from "../../sheet/cell";
-import { NUMBERS_REVISION, RELEASE_NAME, RELEASE_VERSION } from "../../core/release";
-import { plainCell } from "../plainText";
+import type { Audit } from "../audit/auditWorkbook";
+import type { Judgement, Notice } from "../audit/judgement";
+import { isCellError, type Cell } from "../sheet/cell";
+import { NUMBERS_REVISION, RELEASE_NAME, RELEASE_VERSION } from "../core/release";
+import { plainCell } from "./plainText";
 
 /** What every form of the report says. */
 export interface AuditReport {
@@ -17,12 +17,13 @@ export const CALL_HEADINGS = ["sheet", "cell", "formula", "stored", "recomputed"
 export const NOTICE_HEADINGS = ["sheet", "cell", "what", "why"] as const;
 const LONGEST_TABLE = 500;
 
-export function auditReport(path: string, audit: Audit, tolerance: number): AuditReport {
+/** `checked` is the date and time of the check, where the report tells it. */
+export function auditReport(path: string, audit: Audit, tolerance: number, checked = ""): AuditReport {
   return {
     file: path.replace(/^.*[/\\]/, ""),
     summary: summarySentence(audit),
     audit,
-    by: `${RELEASE_NAME} ${RELEASE_VERSION}, revision ${NUMBERS_REVISION} of the numbers; tolerance ${tolerance}`,
+    by: `${RELEASE_NAME} ${RELEASE_VERSION}, revision ${NUMBERS_REVISION} of the numbers; tolerance ${tolerance}${checked && `; checked ${checked}`}`,
   };
 }
 
