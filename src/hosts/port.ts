@@ -1,6 +1,7 @@
 import type { Area } from "../sheet/address";
 import type { Cell } from "../sheet/cell";
 import type { CellRole } from "../sheet/cellLook";
+import type { Workbook } from "../sheet/workbook";
 
 /**
  * What the pane may ask of the world it stands in, and nothing more: the same pane runs in Excel and in the trial page, each behind one
@@ -69,6 +70,12 @@ export interface Separators {
   readonly argument: "," | ";";
 }
 
+/** All sheets with their values, formulas and hidden rows, as they stand at this moment. */
+export interface OpenWorkbook extends Workbook {
+  /** The file's name where the host tells it, else "". */
+  readonly title: string;
+}
+
 export interface Port {
   readonly kind: "excel" | "trial";
   /** The selected range cut to its used part; undefined where nothing readable is selected (a shape, several areas). */
@@ -94,6 +101,7 @@ export interface Port {
   dress(sheet: string, look: SheetLook): Promise<void>;
   /** All cells of the workbook that call one of our functions. */
   calls(): Promise<CallCell[]>;
+  workbook(): Promise<OpenWorkbook>;
   theme(): "light" | "dark";
   separators(): Separators;
   /** A setting kept with the workbook; undefined where none was kept. Values are plain JSON. */

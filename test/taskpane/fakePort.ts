@@ -1,6 +1,7 @@
 import type { Block, NamedCells, Port, Separators, SheetLook } from "../../src/hosts/port";
 import { formatAddress, parseAddress } from "../../src/sheet/address";
 import type { Cell } from "../../src/sheet/cell";
+import { Sheet } from "../../src/sheet/workbook";
 
 export interface FakePort extends Port {
   /** Selects without telling the pane anything else than a host would. */
@@ -11,6 +12,8 @@ export interface FakePort extends Port {
   readonly names: Map<string, string>;
   readonly dressed: { sheet: string; look: SheetLook }[];
   readonly pictures: { address: string; name: string }[];
+  /** Formulas by the address of their cell, without the "="; the values that they gave stand in the sheets. */
+  readonly formulas: Map<string, string>;
   readonly writes: { address: string; cells: readonly (readonly Cell[])[] }[];
 }
 
@@ -19,6 +22,7 @@ export function fakePort(sheets: Record<string, Cell[][]>, selected: string, sep
   const listeners = new Set<(what: "selection" | "cells") => void>();
   const settings = new Map<string, unknown>();
   const reads: string[] = [];
+  const formulas = new Map<string, string>();
   const writes: FakePort["writes"] = [];
   const names = new Map<string, string>();
   const dressed: FakePort["dressed"] = [];
@@ -51,6 +55,7 @@ export function fakePort(sheets: Record<string, Cell[][]>, selected: string, sep
     names,
     dressed,
     pictures,
+    formulas,
     pick(address) {
       selection = address;
       for (const listener of listeners) listener("selection");
@@ -90,6 +95,26 @@ export function fakePort(sheets: Record<string, Cell[][]>, selected: string, sep
     defineNames: async (list) => list.forEach(({ name, address }) => names.set(name, address)),
     dress: async (sheet, look) => void dressed.push({ sheet, look }),
     calls: async () => [],
+    workbook: async () => ({
+      title: "Bids of spring.xlsx",
+      sheets: Object.entries(sheets).map(([name, cells]) => {
+        const sheet = new Sheet(name);
+        cells.forEach((line, row) =>
+          line.forEach((cell, column) => {
+            if (cell !== null && cell !== undefined) sheet.set(row, column, cell);
+          }),
+        );
+        for (const [address, formula] of formulas) {
+          const { sheet: home, ...array } = parseAddress(address)!;
+          const cell = { row: array.top, column: array.left, formula, array, dynamic: true, calculated: true };
+          if (home === name) sheet.addFormula(cell);
+        }
+        return sheet;
+      }),
+      names: [...names].map(([name, formula]) => ({ name, formula })),
+      tables: [],
+      date1904: false,
+    }),
     theme: () => "light",
     separators: () => separators ?? { decimal: ".", argument: "," },
     readSetting: async (key) => settings.get(key),

@@ -7,6 +7,7 @@ import type { Block, CallCell, Picture, Port, Separators } from "../port";
 import { followChanges } from "./followChanges";
 import { insertChart } from "./charts";
 import { cellsForHost, cellsFromHost } from "./cells";
+import { readBook } from "./readBook";
 
 /** Office.js reads at most 5 million cells at once; a score column is never that long. */
 const MOST_CELLS = 2_000_000;
@@ -52,6 +53,7 @@ export async function excelPort(): Promise<Port> {
     defineNames: (names) => Excel.run((context) => defineNames(context, rangeAt, names)),
     dress: (sheet, look) => Excel.run((context) => dress(context, sheet, look)),
     calls: () => Excel.run(readCalls),
+    workbook: () => Excel.run(readBook),
     theme,
     separators: () => separators,
     readSetting: async (key) => Office.context.document.settings.get(key) ?? undefined,

@@ -1,9 +1,9 @@
 import type { ICellData, IWorkbookData, Nullable } from "@univerjs/core";
 import { FormulaDataModel } from "@univerjs/preset-sheets-core";
+import type { ByCell } from "./eachCell";
 import type { TrialSheet } from "./startSheet";
 
 type BySheet<What> = Readonly<Record<string, What>>;
-type ByCell<What> = Readonly<Record<number, Readonly<Record<number, What>>>>;
 
 /** Everything that a saved workbook needs, as plain data that can be handed to a background. */
 export interface SavedBook {

@@ -17,6 +17,8 @@ import { defineNames, readNames } from "./names";
 import type { PictureLayer } from "./pictureLayer";
 import { readArea, type ReadFrom } from "./readArea";
 import { selectedArea } from "./selectedArea";
+import { openWorkbook } from "./openWorkbook";
+import { savedBook } from "./savedBook";
 import { settledAfterChanges } from "./settled";
 
 export interface TrialHost {
@@ -108,6 +110,10 @@ export function trialPort({ api, univer, messages, pictures, dark }: TrialHost):
     async calls() {
       await settled();
       return book.getSheets().flatMap((sheet) => callCells(from, sheet));
+    },
+    async workbook() {
+      await settled();
+      return openWorkbook(savedBook({ api, univer }));
     },
     theme: () => (dark() ? "dark" : "light"),
     separators: () => ({ decimal: ".", argument: "," }),

@@ -1,11 +1,10 @@
-import type { ICellData, Nullable } from "@univerjs/core";
+import type { ICellData } from "@univerjs/core";
 import type { BookToWrite, CellToWrite, SheetToWrite } from "../../hosts/file/write/book";
 import { cellOfData } from "../../hosts/trial/cellOfData";
+import { eachCell } from "../../hosts/trial/eachCell";
 import type { SavedBook } from "../../hosts/trial/savedBook";
 import { frameToWrite } from "./frameToWrite";
 import { lookOfStyle } from "../../hosts/trial/styles";
-
-type ByCell<What> = Readonly<Record<number, Readonly<Record<number, What>>>>;
 
 /** The workbook of the trial sheet as a file takes it. `settings` are the pane's own, kept with it. */
 export function bookToWrite(saved: SavedBook, settings: Readonly<Record<string, unknown>>): BookToWrite {
@@ -52,12 +51,4 @@ function sheetToWrite(saved: SavedBook, id: string): SheetToWrite {
     if (filled && rows[row]?.[column]?.formula !== undefined) put(row, column, { spills });
   });
   return { name: sheet.name ?? id, rows, ...frameToWrite(sheet) };
-}
-
-function eachCell<What>(
-  cells: ByCell<Nullable<What>> | undefined,
-  visit: (row: number, column: number, what: What) => void,
-): void {
-  for (const [row, line] of Object.entries(cells ?? {}))
-    for (const [column, what] of Object.entries(line ?? {})) if (what) visit(Number(row), Number(column), what);
 }
