@@ -3,6 +3,7 @@ import { mkdtempSync, readFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { read as readIndependently } from "@e965/xlsx";
+import { strFromU8, unzipSync } from "fflate";
 import { OPENED_BOOK } from "../support/openedBook";
 import { runWeirmark, withoutBrowser } from "./browser";
 import { startTrial, type TrialBrowser, type TrialPage } from "./trialPage";
@@ -250,6 +251,26 @@ describe.skipIf(withoutBrowser)("a workbook saved from the trial page", () => {
       asked: "“5 %” & <so on>",
     });
     expect([...sheet.problems, ...other.problems]).toEqual([]);
+  });
+
+  test("takes pictures along, drawn as PNG", async () => {
+    const sheet = await trial.open();
+    await sheet.page.evaluate(() =>
+      weirmarkTrial.port.insertPicture("Bids!O9", {
+        name: "a blue square",
+        svg: '<svg xmlns="http://www.w3.org/2000/svg" width="40" height="20"><rect width="40" height="20" fill="#0000ff"/></svg>',
+        width: 40,
+        height: 20,
+      }),
+    );
+    const { path } = await save(sheet);
+    const parts = unzipSync(readFileSync(path));
+    // Begins as every PNG does (W3C PNG, 5.2), and is drawn at two dots a pixel: 80 wide, at byte 16.
+    const png = parts["xl/media/image1.png"]!;
+    expect([...png.slice(0, 8)]).toEqual([137, 80, 78, 71, 13, 10, 26, 10]);
+    expect(new DataView(png.buffer, png.byteOffset).getUint32(16)).toBe(80);
+    expect(strFromU8(parts["xl/drawings/drawing1.xml"]!)).toContain('descr="a blue square"');
+    expect(sheet.problems).toEqual([]);
   });
 
   test("100,000 rows are written in the background", async () => {

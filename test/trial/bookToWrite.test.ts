@@ -29,7 +29,7 @@ async function saved(): Promise<SavedBook> {
 
 test("a workbook opened, saved and opened again is laid out the same", async () => {
   const first = await saved();
-  const bytes = writeXlsx(bookToWrite(first, { cutoff: { fraction: 0.05 } }));
+  const bytes = writeXlsx(bookToWrite({ book: first, settings: { cutoff: { fraction: 0.05 } }, pictures: [] }));
   const again = await readFile(bytes, "bids.xlsx", FUNCTIONS);
   expect(again.settings).toEqual({ cutoff: { fraction: 0.05 } });
   expect(again.summary.extras).toEqual([]);
@@ -51,7 +51,7 @@ test("a workbook opened, saved and opened again is laid out the same", async () 
 });
 
 test("ours are stored in the spelling of files, a table with its cells marked as one that spills", async () => {
-  const { workbook } = openXlsx(writeXlsx(bookToWrite(await saved(), {})));
+  const { workbook } = openXlsx(writeXlsx(bookToWrite({ book: await saved(), settings: {}, pictures: [] })));
   const bids = workbook.sheets[0]!;
   expect(bids.formulaAt(1, 3)).toMatchObject({ formula: "_xldudf_WEIR_SAMPLES_FOR_SD_PRECISION(fraction)" });
   expect(bids.cell(1, 3)).toBe(193);
@@ -73,4 +73,19 @@ test("settings that are none, or are damaged, are left aside", () => {
     expect(text).not.toBe(part);
     expect(openXlsx(zipSync({ ...parts, "customXml/item1.xml": strToU8(text) })).settings).toEqual({});
   }
+});
+
+test("a picture goes along at its cell, in its size, as a part of its own", async () => {
+  const png = Uint8Array.of(0x89, 0x50, 0x4e, 0x47);
+  const picture = { sheetId: "sheet-1", name: "scores & cutoff", png, row: 9, column: 3, width: 288, height: 216 };
+  const parts = unzipSync(writeXlsx(bookToWrite({ book: await saved(), settings: {}, pictures: [picture] })));
+  expect(parts["xl/media/image1.png"]).toEqual(png);
+  const drawing = strFromU8(parts["xl/drawings/drawing1.xml"]!);
+  expect(drawing).toContain("<xdr:col>3</xdr:col>");
+  expect(drawing).toContain("<xdr:row>9</xdr:row>");
+  // 914,400 to the inch (ECMA-376 part 1, 20.1.2.1), 96 pixels to the inch: 288 pixels are three inches.
+  expect(drawing).toContain(`cx="${3 * 914_400}" cy="${2.25 * 914_400}"`);
+  expect(drawing).toContain('name="scores &amp; cutoff"');
+  expect(strFromU8(parts["xl/worksheets/_rels/sheet1.xml.rels"]!)).toContain("drawings/drawing1.xml");
+  expect(strFromU8(parts["xl/worksheets/sheet2.xml"]!)).not.toContain("<drawing");
 });

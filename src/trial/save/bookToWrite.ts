@@ -3,15 +3,19 @@ import type { BookToWrite, CellToWrite, SheetToWrite } from "../../hosts/file/wr
 import { cellOfData } from "../../hosts/trial/cellOfData";
 import { eachCell } from "../../hosts/trial/eachCell";
 import type { SavedBook } from "../../hosts/trial/savedBook";
+import type { SaveRequest } from "./saveProtocol";
 import { frameToWrite } from "./frameToWrite";
 import { lookOfStyle } from "../../hosts/trial/styles";
 
 /** The workbook of the trial sheet as a file takes it. `settings` are the pane's own, kept with it. */
-export function bookToWrite(saved: SavedBook, settings: Readonly<Record<string, unknown>>): BookToWrite {
+export function bookToWrite({ book: saved, settings, pictures }: SaveRequest): BookToWrite {
   const { snapshot, names } = saved;
   const order = snapshot.sheetOrder;
   return {
-    sheets: order.map((id) => sheetToWrite(saved, id)),
+    sheets: order.map((id) => ({
+      ...sheetToWrite(saved, id),
+      pictures: pictures.filter(({ sheetId }) => sheetId === id),
+    })),
     names: names.map(({ name, formula, sheetId }) => ({
       name,
       formula,

@@ -1,9 +1,11 @@
 import { readSettings } from "../../hosts/trial/keptSettings";
-import { savedBook } from "../../hosts/trial/savedBook";
+import type { PlacedPicture } from "../../hosts/trial/pictureLayer";
+import { pngOfSvg } from "../../hosts/pngOfSvg";
+import { savedBook, type SavedBook } from "../../hosts/trial/savedBook";
 import type { TrialSheet } from "../../hosts/trial/startSheet";
 import { hideMessage, showMessage } from "../message";
 import type { TrialTexts } from "../texts/en";
-import type { SaveAnswer, SaveRequest } from "./saveProtocol";
+import type { DrawnPicture, SaveAnswer, SaveRequest } from "./saveProtocol";
 
 const TYPE = "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet";
 /** Long enough for the browser to have begun the download. */
@@ -32,11 +34,25 @@ export async function saveFile(sheet: TrialSheet, texts: TrialTexts): Promise<vo
     if (data.kind === "failed") return failed(data.message);
     end();
     download(name, data.bytes);
-    const pictures = (book.snapshot.custom?.["pictures"] as unknown[] | undefined) ?? [];
-    const more = pictures.length > 0 ? [texts.picturesLeftOut(pictures.length)] : [];
-    showMessage({ kind: "done", text: texts.saved(name), more, actions: [[texts.close, hideMessage]] });
+    showMessage({ kind: "done", text: texts.saved(name), actions: [[texts.close, hideMessage]] });
   };
-  worker.postMessage({ book, settings: readSettings() } satisfies SaveRequest);
+  try {
+    const pictures = await Promise.all(picturesOn(book).map(drawn));
+    worker.postMessage({ book, settings: readSettings(), pictures } satisfies SaveRequest);
+  } catch (failure) {
+    failed((failure as Error).message);
+  }
+}
+
+function picturesOn({ snapshot }: SavedBook): readonly PlacedPicture[] {
+  return (snapshot.custom?.["pictures"] as PlacedPicture[] | undefined) ?? [];
+}
+
+async function drawn({ sheetId, row, column, picture }: PlacedPicture): Promise<DrawnPicture> {
+  const address = await pngOfSvg(picture);
+  const png = Uint8Array.from(atob(address.slice(address.indexOf(",") + 1)), (sign) => sign.charCodeAt(0));
+  const { name, width, height } = picture;
+  return { sheetId, row, column, name, width, height, png };
 }
 
 function download(name: string, bytes: Uint8Array<ArrayBuffer>): void {

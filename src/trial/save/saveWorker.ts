@@ -4,9 +4,9 @@ import type { SaveAnswer, SaveRequest } from "./saveProtocol";
 
 /* The entry of the background that writes files: see saveProtocol.ts. */
 
-function answerTo({ book, settings }: SaveRequest): SaveAnswer {
+function answerTo(request: SaveRequest): SaveAnswer {
   try {
-    return { kind: "written", bytes: writeXlsx(bookToWrite(book, settings)) as Uint8Array<ArrayBuffer> };
+    return { kind: "written", bytes: writeXlsx(bookToWrite(request)) as Uint8Array<ArrayBuffer> };
   } catch (failure) {
     return { kind: "failed", message: (failure as Error).message };
   }

@@ -51,8 +51,6 @@ export const de: TrialTexts = {
   saving: (file) => `${file} wird geschrieben …`,
   saved: (file) => `${file} ist dem Browser übergeben, der die Datei zu den Downloads legt.`,
   notSaved: "Die Mappe ließ sich nicht schreiben; hier ist nichts von ihr verloren.",
-  picturesLeftOut: (count) =>
-    `${count === 1 ? "Das Bild" : `Die ${count} Bilder`} auf dem Blatt lassen sich nicht in eine Datei schreiben: Der Bereich speichert jedes als PNG oder SVG.`,
 
   extra: {
     charts: counted("Diagramm", "Diagramme"),

@@ -55,8 +55,6 @@ export const en = {
   saving: (file: string) => `Writing ${file} …`,
   saved: (file: string) => `${file} is handed to your browser, which puts it where downloads go.`,
   notSaved: "The workbook could not be written; nothing of it is lost here.",
-  picturesLeftOut: (count: number) =>
-    `${count === 1 ? "The picture" : `The ${count} pictures`} on the sheet can’t be written into a file: the pane saves each as PNG or SVG.`,
 
   // What a file may hold that is not shown
   extra: {

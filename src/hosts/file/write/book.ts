@@ -56,6 +56,18 @@ export interface SheetToWrite {
   readonly gridLines?: boolean;
   readonly print?: PrintSetup;
   readonly charts?: readonly ChartToWrite[];
+  readonly pictures?: readonly PictureToWrite[];
+}
+
+/** A picture whose upper left corner stands on a cell, in CSS pixels. */
+export interface PictureToWrite {
+  /** What it shows, also said to those who can't see it. */
+  readonly name: string;
+  readonly png: Uint8Array;
+  readonly row: number;
+  readonly column: number;
+  readonly width: number;
+  readonly height: number;
 }
 
 export interface PrintSetup {

@@ -37,7 +37,7 @@ export function packageXml({ title }: BookToWrite, names: readonly string[]): Re
   ];
   if (title !== undefined) relations.push([`${PACKAGE}/relationships/metadata/core-properties`, core]);
   return {
-    "[Content_Types].xml": `${HEAD}<Types xmlns="${PACKAGE}/content-types"><Default Extension="rels" ContentType="application/vnd.openxmlformats-package.relationships+xml"/><Default Extension="xml" ContentType="application/xml"/>${overrides.join("")}</Types>`,
+    "[Content_Types].xml": `${HEAD}<Types xmlns="${PACKAGE}/content-types"><Default Extension="rels" ContentType="application/vnd.openxmlformats-package.relationships+xml"/><Default Extension="xml" ContentType="application/xml"/><Default Extension="png" ContentType="image/png"/>${overrides.join("")}</Types>`,
     "_rels/.rels": relationsXml(relations),
     [program]: `${HEAD}<Properties xmlns="http://schemas.openxmlformats.org/officeDocument/2006/extended-properties"><Application>${PROGRAM}</Application></Properties>`,
     ...(title !== undefined && {
