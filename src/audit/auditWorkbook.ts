@@ -23,17 +23,20 @@ export interface Audit {
 export interface AuditOptions {
   /** How far two numbers may lie apart, as a part of the larger. */
   readonly tolerance: number;
+  /** Awaited between two calls, so that a window can draw meanwhile. What it throws ends the audit. */
+  readonly between?: (done: number, calls: number) => Promise<void> | void;
 }
 
 /** Judges every cell that calls a function of ours on the values the file itself holds, and looks for what is wrong beside them. */
-export async function auditWorkbook(workbook: Workbook, { tolerance }: AuditOptions): Promise<Audit> {
+export async function auditWorkbook(workbook: Workbook, { tolerance, between }: AuditOptions): Promise<Audit> {
   const calls = callCells(workbook);
   const revision = fileRevision(calls);
   const opinion = calls.length > 0 ? await loadSecondOpinion() : undefined;
   const setting = { workbook, tolerance, fileRevision: revision, work: newSharedWork() };
   const judgements: Judgement[] = [];
   const doubts: Notice[] = [];
-  for (const call of calls) {
+  for (const [done, call] of calls.entries()) {
+    await between?.(done, calls.length);
     const { judgement, calls: worked } = judgeCall(call, setting);
     // Beside a value that nobody could judge it would pass for a verdict.
     const heard = opinion && judgement.verdict !== "not checkable" ? heardOf(worked, opinion) : undefined;

@@ -4,11 +4,9 @@ import type { CallCell } from "./callCells";
 export function fileRevision(calls: readonly CallCell[]): number | undefined {
   for (const { sheet, cell } of calls) {
     if (!isReleaseCell(cell.formula)) continue;
-    if (!cell.array) {
-      const value = sheet.cell(cell.row, cell.column);
-      if (typeof value === "number") return value;
-      continue;
-    }
+    const value = sheet.cell(cell.row, cell.column);
+    if (typeof value === "number") return value;
+    if (!cell.array) continue;
     const row = sheet
       .range(cell.array)
       .find(([label]) => typeof label === "string" && label.toLowerCase() === "revision");
