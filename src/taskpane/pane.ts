@@ -13,6 +13,7 @@ import type { PanePart } from "./dom/part";
 import { functionsPart } from "./functions/functionsPart";
 import { numbersFor } from "./numbers";
 import { observable } from "./observable";
+import { proofPart } from "./proof/proofPart";
 import { searchPart } from "./search/searchPart";
 import { keptSearch } from "./search/searchQuestion";
 import type { Texts } from "./texts/en";
@@ -53,16 +54,18 @@ async function open(root: HTMLElement, port: Port, inHand?: Column): Promise<voi
   };
   const selection = observable<Selection>({ kind: "reading" });
   const follower = followSelection(port, context.column, context.selected, selection);
-  const parts = [
+  const parts: PanePart[] = [
     columnPart(context, follower),
     cutoffPart(context),
     usePart(context),
     searchPart(context, observable(keptSearch(searched))),
     watchPart(context),
+    proofPart(context),
     functionsPart(context),
   ];
   const speak = (code: string) => {
     follower.stop();
+    for (const one of parts) one.leave?.();
     const again = () => open(root, port, context.column.get());
     port.keepSetting("language", code).then(again, again);
   };

@@ -5,6 +5,8 @@ export interface PanePart {
   readonly root: HTMLElement;
   /** Brings the part into view and puts the keyboard there: only on the user's own request. */
   goTo(): void;
+  /** Stops what it listens to: called when the pane is built anew. */
+  leave?(): void;
 }
 
 /** A part of the pane: a section under its heading. */

@@ -2,6 +2,7 @@ import { svgText } from "../../plot/svgText";
 import type { PictureModel, Size } from "../../plot/picture";
 import { formatAddress, parseAddress } from "../../sheet/address";
 import type { PaneContext } from "../context";
+import { download } from "../dom/download";
 import { button } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { fold } from "../dom/part";
@@ -129,10 +130,4 @@ async function pngBlob({ svg, width, height }: { svg: string; width: number; hei
   return new Promise((resolve, reject) =>
     canvas.toBlob((blob) => (blob ? resolve(blob) : reject(new Error("PNG"))), "image/png"),
   );
-}
-
-function download(blob: Blob, name: string): void {
-  const link = element("a", { href: URL.createObjectURL(blob), download: name.replace(/[\\/:*?"<>|]+/g, "-") });
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(link.href), 10_000);
 }

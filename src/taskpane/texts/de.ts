@@ -3,6 +3,7 @@ import { deFunctions } from "./de.functions";
 import { dePane } from "./de.pane";
 import { dePictures } from "./de.pictures";
 import { dePlan } from "./de.plan";
+import { deProof } from "./de.proof";
 import { deSearch } from "./de.search";
 import { deUse } from "./de.use";
 import { deWatch } from "./de.watch";
@@ -17,4 +18,5 @@ export const de: Texts = {
   ...deUse,
   ...deWatch,
   ...dePlan,
+  ...deProof,
 };

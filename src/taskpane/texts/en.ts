@@ -3,6 +3,7 @@ import { enFunctions } from "./en.functions";
 import { enPane } from "./en.pane";
 import { enPictures } from "./en.pictures";
 import { enPlan } from "./en.plan";
+import { enProof } from "./en.proof";
 import { enSearch } from "./en.search";
 import { enUse } from "./en.use";
 import { enWatch } from "./en.watch";
@@ -17,6 +18,7 @@ export const en = {
   ...enUse,
   ...enWatch,
   ...enPlan,
+  ...enProof,
 };
 
 export type Texts = Translated<typeof en>;
