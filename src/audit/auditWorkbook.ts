@@ -8,6 +8,7 @@ import { askedInTwoWays } from "./notices/askedInTwoWays";
 import { callRanges, type CallRange } from "./notices/callRanges";
 import { allDataLeftOut, rangesOutOfLine } from "./notices/dataLeftOut";
 import { fixedMarks } from "./notices/fixedMarks";
+import { rowsSkipped } from "./notices/rowsSkipped";
 import { hiddenRowsInside, totalTakenIn } from "./notices/totalTakenIn";
 import { typedOver } from "./notices/typedOver";
 import { loadSecondOpinion, type Heard, type SecondOpinion } from "./opinion/secondOpinion";
@@ -30,7 +31,7 @@ export interface AuditOptions {
 /** Judges every cell that calls a function of ours on the values the file itself holds, and looks for what is wrong beside them. */
 export async function auditWorkbook(workbook: Workbook, { tolerance, between }: AuditOptions): Promise<Audit> {
   const calls = callCells(workbook);
-  const revision = fileRevision(calls);
+  const revision = fileRevision(calls, workbook);
   const opinion = calls.length > 0 ? await loadSecondOpinion() : undefined;
   const setting = { workbook, tolerance, fileRevision: revision, work: newSharedWork() };
   const judgements: Judgement[] = [];
@@ -54,7 +55,7 @@ export async function auditWorkbook(workbook: Workbook, { tolerance, between }: 
     ...typedOver(judgements, setting),
     ...allDataLeftOut(ranges),
     ...ranges.flatMap((range) => [...totalTakenIn(range), ...hiddenRowsInside(range)]),
-    ...judgements.flatMap(rangesOutOfLine),
+    ...judgements.flatMap((one) => [...rangesOutOfLine(one), ...rowsSkipped(one, workbook)]),
     ...askedInTwoWays(judgements),
     ...fixedMarks(workbook, tolerance),
     ...doubts,

@@ -36,7 +36,7 @@ export function explainDifference(compared: Comparison, stored: readonly (readon
   if (causes.blanksAsZero) sentences.push(blanksSentence(causes.calls));
   else if (causes.olderRevision !== undefined)
     sentences.push(
-      `The file was computed by revision ${causes.olderRevision} of the numbers; this is revision ${NUMBERS_REVISION}. The change log says what changed; calculate the file anew to bring it up to date.`,
+      `The file was computed by revision ${causes.olderRevision} of the numbers; this is revision ${NUMBERS_REVISION}, which may be the reason. The change log says what changed; calculate the file anew to bring it up to date.`,
     );
   else sentences.push(usualSentence(compared));
   return sentences.join(" ");

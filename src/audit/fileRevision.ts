@@ -1,7 +1,17 @@
+import type { Workbook } from "../sheet/workbook";
 import type { CallCell } from "./callCells";
+import { marksOn } from "./notices/marksOn";
 
-/** The revision of the numbers that a file says it was computed by, in a cell that calls RELEASE; undefined where none does. */
-export function fileRevision(calls: readonly CallCell[]): number | undefined {
+/**
+ * The revision of the numbers that a file says it was computed by: in a cell that calls RELEASE, else in the newest of its fixed marks;
+ * undefined where it says nothing.
+ */
+export function fileRevision(calls: readonly CallCell[], workbook: Workbook): number | undefined {
+  const marks = workbook.sheets.flatMap((sheet) => marksOn(sheet).map(({ mark }) => mark.revision));
+  return releaseRevision(calls) ?? (marks.length > 0 ? Math.max(...marks) : undefined);
+}
+
+function releaseRevision(calls: readonly CallCell[]): number | undefined {
   for (const { sheet, cell } of calls) {
     if (!isReleaseCell(cell.formula)) continue;
     const value = sheet.cell(cell.row, cell.column);

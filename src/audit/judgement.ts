@@ -38,6 +38,7 @@ export interface Notice {
 export type NoticeKind =
   | "typed over"
   | "leaves data out"
+  | "skips rows"
   | "ranges out of line"
   | "takes in a total"
   | "hidden rows"

@@ -30,7 +30,7 @@ the reason in a sentence. Nothing is changed, nothing is sent.
   --report OUT      the same as a report to keep: OUT ends in .xlsx, .html or .csv
 
 Beside wrong values it names: a number typed over where the neighbours call a function, a range that leaves out data below or above it,
-takes in a total or has hidden rows, one column judged in two ways, and fixed marks that no longer follow from their scores.
+skips rows, takes in a total or has hidden rows, one column judged in two ways, and fixed marks that no longer follow from their scores.
 
 Exit code: 0 none differs, 1 any differs, 2 the file or an option can't be used. A notice changes no exit code.`,
   run: runAudit,

@@ -66,6 +66,13 @@ describe("what the calls became", () => {
     });
   });
 
+  test("a formula that asks for a newer edition of the host says for which", async () => {
+    const { calls } = await handedOver(foreignBook("xlsxWriter"));
+    const note = (cell: string) => calls.find((one) => one.cell === cell)!.note;
+    expect(note("J4")).toMatch(/^The host's own functions, of 2021 or later, give the same value/);
+    expect(note("J3")).toMatch(/^The host's own functions give the same value/);
+  });
+
   test("a link to the add-in's file goes with the call; a refused call keeps its error, and the note says so", async () => {
     const { calls } = await handedOver(foreignBook("byHand"));
     const at = (cell: string) => calls.find((one) => one.cell === cell)!;

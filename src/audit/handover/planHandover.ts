@@ -9,8 +9,9 @@ import { newSharedWork, type OwnCall, type SharedWork } from "../evaluation";
 import { storedFormula, typedFormula } from "../formulaText";
 import { mayCallOurs } from "../functionName";
 import type { Judgement } from "../judgement";
+import { hostNeeded } from "./hostNeeded";
 import { nativeCall } from "./nativeCall";
-import { needsNewHost, storedSpelling } from "./storedSpelling";
+import { storedSpelling } from "./storedSpelling";
 
 /** What becomes of one cell in a copy that is to work without the add-in. */
 export interface Replacement {
@@ -56,7 +57,8 @@ function replacementOf(judgement: Judgement, workbook: Workbook, work: SharedWor
   const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook, work);
   const differs = judgement.verdict === "differs" ? ` Mind: ${judgement.why}` : "";
   if (formula !== undefined) {
-    const asks = needsNewHost(formula) ? ", of 2021 or later," : "";
+    const year = hostNeeded(`=${formula}`);
+    const asks = year === undefined ? "" : `, of ${year} or later,`;
     const held = heldNumber(formula, judgement.formula);
     const follow = held
       ? `, for as many scores as there are now: ${held} in it was worked out from their number and the other arguments when the copy was made.`

@@ -6,8 +6,6 @@ const NEWER =
 const NEWEST = /^(FILTER|SORT)$/;
 /** With a point, but as old as the format. */
 const OLD_WITH_POINT = /^(ERROR\.TYPE|NETWORKDAYS\.INTL|WORKDAY\.INTL|ISO\.CEILING)$/;
-const NEEDS_NEW_HOST =
-  /^(LET|LAMBDA|MAP|REDUCE|SCAN|BYROW|BYCOL|MAKEARRAY|SEQUENCE|UNIQUE|SORTBY|SORT|FILTER|XLOOKUP|XMATCH)$/;
 
 /** A formula as typed, in the spelling of files: prefixes before newer functions and before the names that LET and LAMBDA give. */
 export function storedSpelling(typed: string): string {
@@ -44,12 +42,4 @@ function givenNames(tokens: readonly Token[]): ReadonlySet<string> {
       names.add(value.toLowerCase());
   });
   return names;
-}
-
-/** True where the formula asks for a host of 2021 or later. */
-export function needsNewHost(formula: string): boolean {
-  return tokenize(formula).some(
-    ({ type, value }) =>
-      type === "func" && NEEDS_NEW_HOST.test(value.replace(/^(_xlfn\.|_xlws\.)+/i, "").toUpperCase()),
-  );
 }

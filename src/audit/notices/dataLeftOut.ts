@@ -1,4 +1,5 @@
 import { formatAddress } from "../../sheet/address";
+import { isBlank } from "../../sheet/cell";
 import type { Sheet } from "../../sheet/workbook";
 import { mayCallOurs } from "../functionName";
 import type { Judgement, Notice } from "../judgement";
@@ -32,14 +33,14 @@ export function allDataLeftOut(ranges: readonly CallRange[]): Notice[] {
 /** A range that ends above the last number of its column, or begins below the first. */
 export function dataLeftOut(range: CallRange): Notice[] {
   const { area, judgement, others } = range;
-  const below = area.bottom === LAST_ROW ? 0 : run(range, area.bottom + 1, 1);
+  const below = area.bottom === LAST_ROW ? { rows: 0, last: 0 } : run(range, area.bottom + 1, 1);
   const above = run(range, area.top - 1, -1);
-  if (below + above === 0) return [];
+  if (below.rows + above.rows === 0) return [];
   const parts: string[] = [];
-  if (below > 0)
-    parts.push(`ends at row ${area.bottom + 1}, but ${goesOn(below)} below it, to row ${area.bottom + 1 + below}`);
-  if (above > 0)
-    parts.push(`begins at row ${area.top + 1}, but ${goesOn(above)} above it, from row ${area.top + 1 - above}`);
+  if (below.rows > 0)
+    parts.push(`ends at row ${area.bottom + 1}, but ${goesOn(below.rows)} below it, to row ${below.last + 1}`);
+  if (above.rows > 0)
+    parts.push(`begins at row ${area.top + 1}, but ${goesOn(above.rows)} above it, from row ${above.last + 1}`);
   const also = others > 0 ? ` (${counted(others, "more cell")} take${others === 1 ? "s" : ""} the same range)` : "";
   const why = `The range ${rangeAddress(range)} ${parts.join(", and ")}: left out, on purpose or by mistake${also}. Take them into the range if they are scores too.`;
   return [{ sheet: judgement.sheet.name, address: judgement.address, kind: "leaves data out", why }];
@@ -47,26 +48,59 @@ export function dataLeftOut(range: CallRange): Notice[] {
 
 const goesOn = (rows: number) => `${counted(rows, "row")} of numbers ${rows === 1 ? "stands" : "stand"}`;
 
-/** Stretches of numbers found so far: many ranges of one column would walk the same rows again and again. */
-const stretches = new WeakMap<Sheet, Map<string, { top: number; bottom: number }>>();
-
-/** How many rows in one piece from `row` on hold numbers in the columns of the range and are no total. */
-function run({ sheet, area }: CallRange, row: number, step: 1 | -1): number {
-  const known = stretches.get(sheet) ?? new Map<string, { top: number; bottom: number }>();
-  stretches.set(sheet, known);
-  const columns = `${area.left}:${area.right}`;
-  let stretch = known.get(columns);
-  if (!stretch || row < stretch.top || row > stretch.bottom) {
-    if (row < 0 || !holdsNumber(sheet, row, area.left, area.right)) return 0;
-    stretch = { top: row, bottom: row };
-    while (stretch.top > 0 && holdsNumber(sheet, stretch.top - 1, area.left, area.right)) stretch.top--;
-    while (holdsNumber(sheet, stretch.bottom + 1, area.left, area.right)) stretch.bottom++;
-    known.set(columns, stretch);
-  }
-  return step === 1 ? stretch.bottom - row + 1 : row - stretch.top + 1;
+/** Rows of one table that hang together: numbers, and between them entries that have no score yet. */
+interface Stretch {
+  readonly top: number;
+  readonly bottom: number;
+  /** How many rows hold numbers, from `top` to each row. */
+  readonly upTo: readonly number[];
 }
 
-function holdsNumber(sheet: Sheet, row: number, left: number, right: number): boolean {
+/** Stretches found so far: many ranges of one column would walk the same rows again and again. */
+const stretches = new WeakMap<Sheet, Map<string, Stretch>>();
+
+/** How many rows from `row` on, down or up, belong to the same table, hold numbers in the columns of the range and are no total; and the last of them. */
+function run({ sheet, area: { left, right } }: CallRange, row: number, step: 1 | -1): { rows: number; last: number } {
+  const known = stretches.get(sheet) ?? new Map<string, Stretch>();
+  stretches.set(sheet, known);
+  const columns = `${left}:${right}`;
+  let stretch = known.get(columns);
+  if (!stretch || row < stretch.top || row > stretch.bottom) {
+    if (row < 0 || !belongs(sheet, row, left, right)) return { rows: 0, last: row };
+    known.set(columns, (stretch = stretchAt(sheet, row, left, right)));
+  }
+  const { top, upTo } = stretch;
+  const before = upTo[row - top - 1] ?? 0;
+  if (step === 1) return { rows: upTo[upTo.length - 1]! - before, last: stretch.bottom };
+  return { rows: upTo[Math.min(row, stretch.bottom) - top] ?? 0, last: top };
+}
+
+function stretchAt(sheet: Sheet, row: number, left: number, right: number): Stretch {
+  let [top, bottom] = [row, row];
+  while (top > 0 && belongs(sheet, top - 1, left, right)) top--;
+  while (belongs(sheet, bottom + 1, left, right)) bottom++;
+  while (top < bottom && !holdsScore(sheet, top, left, right)) top++;
+  while (bottom > top && !holdsScore(sheet, bottom, left, right)) bottom--;
+  let count = 0;
+  const upTo: number[] = [];
+  for (let at = top; at <= bottom; at++) upTo.push((count += holdsScore(sheet, at, left, right) ? 1 : 0));
+  return { top, bottom, upTo };
+}
+
+/** A row with a score, or one of an entry that has none yet: blank here, with a text in the cell to the left, and a score within two rows below. */
+function belongs(sheet: Sheet, row: number, left: number, right: number): boolean {
+  if (holdsScore(sheet, row, left, right)) return true;
+  return isUnscored(sheet, row, left, right) && [1, 2].some((down) => holdsScore(sheet, row + down, left, right));
+}
+
+function isUnscored(sheet: Sheet, row: number, left: number, right: number): boolean {
+  if (left === 0 || row > sheet.lastRow || typeof sheet.cell(row, left - 1) !== "string") return false;
+  for (let column = left; column <= right; column++) if (!isBlank(sheet.cell(row, column))) return false;
+  return !sheet.formulaAt(row, left) && !namesTotal(sheet, row, left);
+}
+
+/** A number that is neither worked out by a call of ours nor a sum or mean of others. */
+export function holdsScore(sheet: Sheet, row: number, left: number, right: number): boolean {
   for (let column = left; column <= right; column++) {
     if (typeof sheet.cell(row, column) !== "number") continue;
     const formula = sheet.formulaAt(row, column);

@@ -2,16 +2,14 @@ import { NUMBERS_REVISION } from "../../core/release";
 import { callFunction } from "../../functions/call";
 import { formatAddress, parseAddress } from "../../sheet/address";
 import type { Cell } from "../../sheet/cell";
-import { isFixedMarkHeading, readFixedMark, type FixedMark } from "../../sheet/fixedMark";
-import { sheetNamed, type Sheet, type Workbook } from "../../sheet/workbook";
+import type { FixedMark } from "../../sheet/fixedMark";
+import { sheetNamed, type Workbook } from "../../sheet/workbook";
 import { compareStored } from "../compareStored";
 import type { Notice } from "../judgement";
 import { usedPart } from "../reference";
 import { counted, showCell } from "../showCell";
+import { marksOn } from "./marksOn";
 
-const COLUMNS = 14;
-const ROWS_LOOKED_AT = 50;
-const MOST_MARKS = 1_000;
 const MOST_CELLS = 2_000_000;
 /** The functions that make the three promises. */
 const FUNCTION_OF = { plain: "TOP_FRACTION_CUTOFF", safe: "SAFE_CUTOFF", "next-score": "NEXT_SCORE_CUTOFF" } as const;
@@ -19,14 +17,10 @@ const FUNCTION_OF = { plain: "TOP_FRACTION_CUTOFF", safe: "SAFE_CUTOFF", "next-s
 /** The fixed marks of a workbook that no longer follow from the scores they were worked out from. */
 export function fixedMarks(workbook: Workbook, tolerance: number): Notice[] {
   return workbook.sheets.flatMap((sheet) => {
-    const heading = headingRow(sheet);
-    if (heading === undefined) return [];
     const notices: Notice[] = [];
-    for (let row = heading + 1; row <= Math.min(sheet.lastRow, heading + MOST_MARKS); row++) {
-      const cells = sheet.range({ top: row, left: 0, bottom: row, right: COLUMNS - 1 })[0]!;
-      const mark = readFixedMark(cells);
-      const fault = mark && faultOf(mark, workbook, tolerance);
-      if (!mark || !fault) continue;
+    for (const { row, mark } of marksOn(sheet)) {
+      const fault = faultOf(mark, workbook, tolerance);
+      if (!fault) continue;
       const older =
         mark.revision < NUMBERS_REVISION
           ? ` It was written by revision ${mark.revision} of the numbers; this is revision ${NUMBERS_REVISION}.`
@@ -42,12 +36,6 @@ export function fixedMarks(workbook: Workbook, tolerance: number): Notice[] {
     }
     return notices;
   });
-}
-
-function headingRow(sheet: Sheet): number | undefined {
-  for (let row = 0; row <= Math.min(sheet.lastRow, ROWS_LOOKED_AT); row++)
-    if (isFixedMarkHeading(sheet.range({ top: row, left: 0, bottom: row, right: COLUMNS - 1 })[0]!)) return row;
-  return undefined;
 }
 
 interface Fault {

@@ -86,6 +86,22 @@ describe("a range that leaves data out", () => {
       /ends at row 10, but 3 rows of numbers stand below it, to row 13/,
     );
   });
+  test("stops short where an entry has no score yet and others follow, but not at the next thing on the sheet", async () => {
+    const names = Object.fromEntries(SCORES.map((_, i) => [`A${i + 2}`, `flat ${i + 1}`]));
+    expect((await only({ ...scoreCells(), ...names, D2: call("B2:B6") }, "leaves data out")).why).toMatch(
+      /ends at row 6, but 6 rows of numbers stand below it, to row 13/,
+    );
+    const below: Cells = { ...scoreCells(), ...names, A15: "rooms", B16: 4, D2: call("B2:B13") };
+    expect(await kinds(below)).toEqual([]);
+  });
+  test("takes the column in pieces and passes over rows between them", async () => {
+    const pieces = { f: "_xldudf_WEIR_TOP_FRACTION_CUTOFF(_xlfn.VSTACK(B2:B5,$B$9:$B$13),0.1)", v: CUTOFF };
+    expect((await only({ ...scoreCells(), D2: pieces }, "skips rows")).why).toBe(
+      "Between Flats!B2:B5 and Flats!B9:B13 2 rows of numbers are passed over: left out, on purpose or by mistake. Take them into the range if they are scores too.",
+    );
+    const whole = { f: "_xldudf_WEIR_TOP_FRACTION_CUTOFF(_xlfn.VSTACK(B2:B6,B7:B13),0.1)", v: CUTOFF };
+    expect(await kinds({ ...scoreCells(), D2: whole })).toEqual([]);
+  });
   test("begins below the first", async () => {
     expect((await only({ ...scoreCells(), D2: call("B4:B13") }, "leaves data out")).why).toMatch(
       /begins at row 4, but 2 rows of numbers stand above it, from row 2/,
@@ -207,6 +223,12 @@ describe("a fixed mark", () => {
   test("that follows from its scores gives no notice, also once more scores have come", async () => {
     expect(await kinds(scoreCells(), book(mark({ mark: strict })))).toEqual([]);
     expect(await kinds({ ...scoreCells(), B14: 20, B15: 99 }, book(mark({ mark: strict })))).toEqual([]);
+  });
+  test("tells the revision of the file where no cell calls RELEASE, and a value that differs is named as one of it", async () => {
+    const differs = { f: "_xldudf_WEIR_TOP_FRACTION_CUTOFF(B2:B13,0.1)", v: 70 };
+    const audit = await auditOf({ ...scoreCells(), D2: differs }, book(mark({ mark: strict, revision: 0 })));
+    expect(audit.fileRevision).toBe(0);
+    expect(audit.judgements[0]!.why).toContain("computed by revision 0 of the numbers");
   });
   test.each<[string, Partial<FixedMark>, Cells, RegExp]>([
     ["a score was changed", {}, { B3: 99 }, /give a plain cutoff of .* was written down/],
