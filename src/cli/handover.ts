@@ -3,6 +3,7 @@ import { storedFormula } from "../audit/formulaText";
 import { endedSpills, planHandover, type Replacement } from "../audit/handover/planHandover";
 import { NUMBERS_REVISION, RELEASE_NAME, RELEASE_VERSION } from "../core/release";
 import type { CellPatch } from "../hosts/file/patchSheet";
+import { UnusableFile } from "../hosts/file/unusableFile";
 import { formatSheetName } from "../sheet/address";
 import { isCellError, type Cell } from "../sheet/cell";
 import { Sheet } from "../sheet/workbook";
@@ -42,18 +43,22 @@ async function runHandover(args: readonly string[], io: Io): Promise<number> {
   if (!/\.xlsx$/i.test(path)) throw new Stop(`Only an .xlsx file can be handed over; ${path} was given.`);
   const { judgements } = await auditWorkbook(workbook, { tolerance: TOLERANCE });
   const replacements = planHandover(judgements, workbook);
-  const { patchXlsx } = await import("../hosts/file/patchXlsx");
-  await io.write(
-    out,
-    patchXlsx(bytes, {
-      cells: cellPatches(replacements),
-      notes: cellNotes(replacements),
-      endedSpill: endedSpills(replacements),
-      sheet: listSheet(replacements),
-    }),
-  );
+  await io.write(out, await patched(bytes, path, replacements));
   io.out(values["json"] ? jsonLines(replacements) : plainLines(out, replacements));
   return 0;
+}
+
+async function patched(bytes: Uint8Array, path: string, replacements: readonly Replacement[]): Promise<Uint8Array> {
+  const { patchXlsx } = await import("../hosts/file/patchXlsx");
+  const cells = cellPatches(replacements);
+  const notes = cellNotes(replacements);
+  try {
+    return patchXlsx(bytes, { cells, notes, endedSpill: endedSpills(replacements), sheet: listSheet(replacements) });
+  } catch (failure) {
+    // A part that the audit had no need to read may be refused when it is copied.
+    if (failure instanceof UnusableFile) throw new Stop(`${path}: ${failure.message}`);
+    throw failure;
+  }
 }
 
 function bySheet<Entry>(

@@ -7,6 +7,8 @@ export interface HostileFile {
   readonly make: () => Uint8Array;
   /** The sentence it is refused with; left out where the file is read and its calls are judged for what they are. */
   readonly refusal?: RegExp;
+  /** The sentence with which only a copy of it is refused. */
+  readonly copyRefusal?: RegExp;
   /** What the audit says of the call in D2. */
   readonly verdict?: RegExp;
 }
@@ -45,6 +47,12 @@ export const HOSTILE_FILES: readonly HostileFile[] = [
     name: "a part that bursts",
     make: packed(9, SHEET, new Uint8Array(300 * 2 ** 20).fill(32)),
     refusal: /made to burst/,
+  },
+  {
+    name: "a picture that bursts",
+    make: packed(9, "xl/media/image1.png", new Uint8Array(300 * 2 ** 20).fill(32)),
+    verdict: /stored inputs give 4/,
+    copyRefusal: /made to burst/,
   },
   { name: "a claim of 2 GB", make: () => withClaim(24, 2 ** 31), refusal: /claims to unpack to 2048 MB/ },
   { name: "cut off", make: () => xlsxFile(book(cell(CALL))).slice(0, 900), refusal: /cut off or damaged/ },

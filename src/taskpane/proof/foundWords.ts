@@ -9,6 +9,7 @@ export function foundWords(found: Finding["found"], texts: Texts): string {
     "not checkable": texts.foundNotCheckable,
     "typed over": texts.foundTypedOver,
     "leaves data out": texts.foundLeavesOut,
+    "skips rows": texts.foundSkipsRows,
     "ranges out of line": texts.foundOutOfLine,
     "takes in a total": texts.foundTotal,
     "hidden rows": texts.foundHidden,

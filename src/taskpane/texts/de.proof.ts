@@ -28,6 +28,7 @@ export const deProof: Translated<typeof enProof> = {
   foundNotCheckable: "nicht prüfbar",
   foundTypedOver: "überschrieben",
   foundLeavesOut: "lässt Daten aus",
+  foundSkipsRows: "überspringt Zeilen",
   foundOutOfLine: "Bereiche versetzt",
   foundTotal: "nimmt eine Summe mit",
   foundHidden: "ausgeblendete Zeilen",

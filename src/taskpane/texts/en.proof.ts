@@ -27,6 +27,7 @@ export const enProof = {
   foundNotCheckable: "not checkable",
   foundTypedOver: "typed over",
   foundLeavesOut: "leaves data out",
+  foundSkipsRows: "skips rows",
   foundOutOfLine: "ranges out of line",
   foundTotal: "takes in a total",
   foundHidden: "hidden rows",
