@@ -34,7 +34,7 @@ export async function openTrial(): Promise<void> {
 
   await api.getFormula().onCalculationResultApplied();
   performance.mark("computed");
-  const keep = keepChanges(api, (worked) => {
+  const keep = keepChanges(sheet, (worked) => {
     const place = document.getElementById("kept")!;
     place.dataset["text"] = worked ? "kept" : "notKept";
     place.textContent = worked ? frameTexts().kept : frameTexts().notKept;

@@ -6,6 +6,7 @@ import { read as readIndependently } from "@e965/xlsx";
 import { strFromU8, unzipSync } from "fflate";
 import { OPENED_BOOK } from "../support/openedBook";
 import { runWeirmark, withoutBrowser } from "./browser";
+import { axeFindings } from "./paneOf";
 import { startTrial, type TrialBrowser, type TrialPage } from "./trialPage";
 
 const file = (name: string, bytes: Uint8Array | string) => ({
@@ -73,6 +74,7 @@ describe.skipIf(withoutBrowser)("files of the user's own in the trial page", () 
     expect(words).toMatch(/bids\.xlsx: 20 cells on 2 sheets/);
     expect(words).toMatch(/takes the place of the workbook here/);
     expect(words).toMatch(/1 chart, 1 picture/);
+    expect(await axeFindings(sheet.page)).toEqual([]);
     await sheet.page.getByRole("button", { name: "Keep what is here" }).click();
     expect(await message.isVisible()).toBe(false);
     expect((await sheet.read("scores!B2")).values).toEqual([[50.5]]);

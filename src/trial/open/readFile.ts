@@ -7,7 +7,7 @@ import type { FileSummary } from "./openProtocol";
 
 const MOST_BYTES = 200 * 2 ** 20;
 /** What the sheet still scrolls and calculates without the page standing still. */
-const MOST_CELLS = 1_500_000;
+const MOST_CELLS = 1_000_000;
 
 export interface OpenedFile {
   readonly book: IWorkbookData;
