@@ -181,6 +181,16 @@ describe.skipIf(withoutBrowser)("working in the pane", () => {
     await use.getByRole("textbox", { name: "Column that names the groups" }).fill("B2");
     await use.locator("figcaption", { hasText: /north: \d/ }).waitFor();
     expect(await use.innerText()).toContain("Where the entries are people");
+    // What can't be groups is said, and not warned of sixty times.
+    const names = use.getByRole("textbox", { name: "Column that names the groups" });
+    await names.fill("Nowhere!B2");
+    await use.getByText("There is no sheet “Nowhere”.").waitFor();
+    await sheet.write(
+      "Ropes!D2",
+      Array.from({ length: 60 }, (_, row) => [`bid ${row}`]),
+    );
+    await names.fill("D2");
+    await use.getByText("That column names 57 groups for 57 entries").waitFor();
   });
 
   test("what was asked is kept with the workbook, and a mere look changes nothing in it", async () => {

@@ -1,6 +1,7 @@
 import type { Port } from "../../hosts/port";
 import { formatAddress, parseAddress, type Area } from "../../sheet/address";
 import type { Formula } from "../formula";
+import { hasSheet } from "./hasSheet";
 import { overlap } from "./overlap";
 import { isBlank, isCellError, type Cell } from "../../sheet/cell";
 
@@ -21,10 +22,6 @@ export type TargetCheck =
 
 const LAST_ROW = 1_048_575;
 const LAST_COLUMN = 16_383;
-
-async function hasSheet(port: Port, wanted: string): Promise<boolean> {
-  return (await port.sheetNames()).some((name) => name.toLowerCase() === wanted.toLowerCase());
-}
 
 /** Looks at the cells that a formula would fill, before anything is written. */
 export async function checkTarget(

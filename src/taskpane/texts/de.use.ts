@@ -49,6 +49,8 @@ export const deUse: Translated<typeof enUse> = {
   groupsPick: "Spalte, die die Gruppen nennt",
   groupsPickHint: "Irgendeine Zelle der Spalte genügt: gelesen werden die Zeilen neben den Werten.",
   groupsOneColumn: "Nennen Sie eine Spalte, etwa B2:B61.",
+  groupsTooMany: (groups, entries) =>
+    `Diese Spalte nennt ${groups} Gruppen für ${entries} Einträge, also eher die Einträge selbst. Wählen Sie eine, in der ein Wort für viele steht.`,
   groupsNone: "Keine Gruppe besteht zu weniger als vier Fünfteln der höchsten Quote.",
   groupsBelow: (names, one) =>
     `${names} ${one ? "besteht" : "bestehen"} zu weniger als vier Fünfteln der höchsten Quote: sehen Sie nach, woran das liegt, bevor die Schwelle gilt.`,

@@ -47,6 +47,8 @@ export const enUse = {
   groupsPick: "Column that names the groups",
   groupsPickHint: "Any cell or part of the column will do: its rows beside the scores are read.",
   groupsOneColumn: "Give one column, such as B2:B61.",
+  groupsTooMany: (groups: string, entries: string) =>
+    `That column names ${groups} groups for ${entries} entries: rather the entries themselves. Choose a column in which one word stands for many.`,
   groupsNone: "No group passes at less than four fifths of the highest rate.",
   groupsBelow: (names: string, one: boolean) =>
     `${names} ${one ? "passes" : "pass"} at less than four fifths of the highest rate: look into why before the mark is used.`,

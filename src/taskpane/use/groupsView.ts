@@ -1,4 +1,5 @@
 import { passRates } from "../../plot/passRates";
+import { parseAddress } from "../../sheet/address";
 import type { Cell } from "../../sheet/cell";
 import type { PaneContext } from "../context";
 import { afterPaint } from "../afterPaint";
@@ -8,6 +9,7 @@ import { rangeField } from "../dom/rangeField";
 import { figure, table } from "../dom/table";
 import { listed } from "../column/listed";
 import { pictureFigure, type DrawnPicture } from "../picture/pictureFigure";
+import { hasSheet } from "../target/hasSheet";
 import { formulaChooser } from "../target/formulaChooser";
 import { askPassRates, groupRates, groupsAddress, passRatesFormula, type GroupRate } from "./passRatesOf";
 
@@ -30,12 +32,19 @@ export function groupsView(context: PaneContext): HTMLElement {
     if (picked.trim() === "" || !current?.report) return nothing("");
     const address = groupsAddress(picked, current.column.address);
     if (address === undefined) return nothing(texts.groupsOneColumn);
+    const sheet = parseAddress(address)?.sheet;
+    if (sheet !== undefined && !(await hasSheet(port, sheet)))
+      return mine === turn && nothing(texts.targetNoSheet(sheet));
     const { values } = await port.read(address);
     if (mine !== turn) return;
     const outcome = askPassRates(call, current, values);
     if (!outcome) return nothing(texts.missingFunction("GROUP_PASS_RATES"));
     if ("error" in outcome) return nothing(`${outcome.error} ${outcome.message}`);
     const groups = groupRates(outcome.value as Cell[][]);
+    // A column of names or numbers of the entries would give a rate of 0 or 1 to each, and all of them a warning.
+    const assessed = groups.reduce((sum, group) => sum + group.assessed, 0);
+    if (groups.length > assessed / 2)
+      return nothing(texts.groupsTooMany(numbers.count(groups.length), numbers.count(assessed)));
     fill(words, ...groupWords(context, groups));
     picture.show(ratesPicture(context, groups));
     const formula = { text: passRatesFormula(current, address), rows: groups.length + 1, columns: 8 };
