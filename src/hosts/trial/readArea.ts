@@ -31,12 +31,11 @@ function cellReader({ formulas, messages }: ReadFrom, sheet: FWorksheet): (row: 
   };
 }
 
-/** The cells of an area, cut to the rows and columns that the sheet has; with `used` also to the part that holds something. */
+/** The cells of an area, cut at the end of the sheet; with `used` to the part that holds something. What lies beyond the sheet is blank. */
 export function readArea(from: ReadFrom, sheet: FWorksheet, area: Area, used: boolean): Block {
-  const bottom = Math.min(area.bottom, sheet.getMaxRows() - 1);
-  const right = Math.min(area.right, sheet.getMaxColumns() - 1);
-  const top = Math.min(area.top, bottom);
-  const left = Math.min(area.left, right);
+  const { top, left } = area;
+  const bottom = Math.max(top, Math.min(area.bottom, sheet.getMaxRows() - 1));
+  const right = Math.max(left, Math.min(area.right, sheet.getMaxColumns() - 1));
   const read = cellReader(from, sheet);
   const values: Cell[][] = [];
   for (let row = top; row <= bottom; row++) {

@@ -21,6 +21,10 @@ import { openWorkbook } from "./openWorkbook";
 import { savedBook } from "./savedBook";
 import { settledAfterChanges } from "./settled";
 
+/** Where a whole column and a whole row end. */
+const LAST_ROW = 1_048_575;
+const LAST_COLUMN = 16_383;
+
 export interface TrialHost {
   readonly api: FUniver;
   readonly univer: Univer;
@@ -63,8 +67,7 @@ export function trialPort({ api, univer, messages, pictures, dark }: TrialHost):
     async read(address) {
       await settled();
       const { sheet, area } = place(address);
-      const whole = area.bottom >= sheet.getMaxRows() || area.right >= sheet.getMaxColumns();
-      return readArea(from, sheet, area, whole);
+      return readArea(from, sheet, area, area.bottom === LAST_ROW || area.right === LAST_COLUMN);
     },
     async write(address, cells) {
       const { sheet, area } = place(address);
