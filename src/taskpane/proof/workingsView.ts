@@ -39,12 +39,19 @@ export function workingsView(context: PaneContext, reader: BookReader): HTMLElem
   const take = (next: WorkedCell | undefined, sentence: string) => {
     words.textContent = sentence;
     fill(ask);
-    const same = next !== undefined && JSON.stringify(next) === JSON.stringify(worked);
+    const before = worked;
+    const same = next !== undefined && JSON.stringify(next) === JSON.stringify(before);
     worked = next;
     // Cells changed elsewhere, perhaps by the very workings just written: what was said of it stays.
     if (same) return;
-    which.root.hidden = (next?.calls.length ?? 0) < 2;
-    which.offer(next?.calls.map(({ text }, index) => [String(index), text] as const) ?? [], "0");
+    const texts = next?.calls.map(({ text }) => text) ?? [];
+    which.root.hidden = texts.length < 2;
+    const kept = next?.address === before?.address ? before?.calls[Number(which.select.value)]?.text : undefined;
+    const chosen = kept === undefined ? 0 : Math.max(0, texts.indexOf(kept));
+    which.offer(
+      texts.map((text, index) => [String(index), text] as const),
+      String(chosen),
+    );
     draw();
   };
   const look = async (asked: boolean) => {
