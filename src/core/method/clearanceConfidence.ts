@@ -17,7 +17,7 @@ export interface ClearanceConfidence {
  *
  * Domain     count ≥ 2 whole; sd > 0; fraction in (0, 1); scores finite. With better "low" the mirror image.
  * Method     It is the confidence at which the safe mark would fall on this score. One curve serves the whole column (noncentralTCurve.ts).
- * Accuracy   1e-12 relative, both tails; test/core/method/clearanceConfidence.test.ts.
+ * Accuracy   For fractions from 1e-9 1e-12 relative, both tails, down to 1e-30; 1e-11 down to 1e-280; test/core/method/clearanceConfidence.test.ts.
  * Reference  Owen (1968), A survey of properties and applications of the noncentral t-distribution, Technometrics 10.
  *
  * @throws {DomainError}
