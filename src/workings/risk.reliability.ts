@@ -33,7 +33,7 @@ export function SCORE_RELIABILITY(call: WorkingsCall): readonly Step[] {
   const degrees = `LET(s,${two},a,k*s*j/e,d,n*(1+(k-1)*s)-k*s,IF(a=0,(k-1)*(n-1),(k-1)*(n-1)*(a+d)^2/((n-1)*a^2+d^2)))`;
   const twoWay = (f: string) => `LET(v,${degrees},f,b/e*${f},n*(f-1)/(k*j/e+k*n-k-n+n*f))`;
   const [low, high] = [twoWay(quantile("v", "n-1")), twoWay(`1/${quantile("n-1", "v")}`)];
-  const steppedUp = (limit: string) => `LET(s,${limit},k*s/(1+(k-1)*s))`;
+  const steppedUp = (limit: string) => `LET(h,${limit},k*h/(1+(k-1)*h))`;
   const formulas: Record<string, readonly [string, string, string, string]> = {
     "ICC(1,1)": [single("(b/w)"), ...both(single, one), SHROUT],
     "ICC(2,1)": [two, low, high, McGRAW],
