@@ -91,7 +91,7 @@ describe.skipIf(withoutBrowser)("proof in the pane", () => {
     const fold = proof.locator("details", { hasText: "Workings of the selected cell" }).first();
     await fold.locator("summary").first().click();
     await sheet.select("Ropes!B9");
-    await fold.getByText("Ropes!B9 calls none of these functions.").waitFor();
+    await fold.getByText("No call in Ropes!B9 has workings.").waitFor();
     await sheet.select("Ropes!C2");
     await fold.getByText("How the value of Ropes!C2 comes about:").waitFor();
     await fold.getByLabel("Which call").selectOption({ label: call });
@@ -99,9 +99,9 @@ describe.skipIf(withoutBrowser)("proof in the pane", () => {
     // The last step is the value of the call: 81.95271223532491, test/reference/cases/cutoff.json.
     expect(await fold.locator(".steps .value").last().innerText()).toMatch(/^81\.95271223532/);
     await fold.getByRole("button", { name: "Write the workings beside it" }).click();
-    const said = fold.getByText("The workings stand in E2:I8, their formulas live.");
+    const said = fold.getByText("The workings stand in E2:I8.");
     await said.waitFor();
-    expect(await said.innerText()).toContain("All 5 formulas give the values beside them.");
+    expect(await said.innerText()).toContain("All 5 formulas are live and give the values beside them.");
     const { values } = await sheet.read("Ropes!E8:H8");
     expect(values[0]![3]).toBeCloseTo(81.95271223532491, 9);
     // Live: it follows the cell that it reads.
@@ -158,7 +158,7 @@ describe.skipIf(withoutBrowser)("proof in the pane", () => {
     await proof.getByText(/^\d+ of \d+ calls$/).waitFor();
     expect(await proof.locator("progress").isVisible()).toBe(true);
     await cancel.click();
-    await proof.getByText("Cancelled. Nothing was found out.").waitFor();
+    await proof.getByText("Cancelled: this check gave no result.").waitFor();
     expect(await cancel.isVisible()).toBe(false);
     await sheet.page.waitForTimeout(500);
     expect(await proof.locator(".findings li").count()).toBe(0);

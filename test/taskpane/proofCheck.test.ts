@@ -88,6 +88,33 @@ describe("the reading of the workbook", () => {
     expect(await reader.current()).not.toBe(first);
   });
 
+  test("cells that change before it ends are read once more, so that it holds afterwards", async () => {
+    const port = ropes();
+    const workbook = port.workbook;
+    let readings = 0;
+    port.workbook = async () => {
+      if (++readings === 1) port.changed();
+      return workbook();
+    };
+    const reader = bookReader(port);
+    expect((await reader.read()).upTo).toBe(1);
+    expect(readings).toBe(2);
+    await reader.current();
+    expect(readings).toBe(2);
+  });
+
+  test("of cells that never rest it takes what it has, and knows that it no longer holds", async () => {
+    const port = ropes();
+    const workbook = port.workbook;
+    port.workbook = async () => {
+      port.changed();
+      return workbook();
+    };
+    const reader = bookReader(port);
+    const { upTo } = await reader.read();
+    expect(upTo).toBeLessThan(reader.edits.get());
+  });
+
   test("one that took long is not repeated unasked", async () => {
     let time = 0;
     const port = ropes();
@@ -106,7 +133,7 @@ describe("the reading of the workbook", () => {
     const reader = bookReader(port);
     await expect(reader.current()).rejects.toThrow("protected view");
     port.workbook = workbook;
-    expect((await reader.current()).title).toBe("Bids of spring.xlsx");
+    expect((await reader.current()).book.title).toBe("Bids of spring.xlsx");
     reader.stop();
     port.changed();
     expect(reader.edits.get()).toBe(0);

@@ -104,6 +104,13 @@ describe("workings as cells", () => {
       off: ["D6"],
       lacking: ["D7"],
     });
+    // A residual that should be 0 is rounding; an error that the step itself has is none of the sheet's.
+    const residual = [step(0, "=A1-A2"), step({ code: "#N/A" }, "=NA()"), step(4, "=REFUSED()")];
+    expect(liveAnswers(residual, [2e-11, { code: "#N/A" }, { code: "#REF!" }], area)).toEqual({
+      formulas: 3,
+      off: [],
+      lacking: ["D7"],
+    });
   });
 });
 

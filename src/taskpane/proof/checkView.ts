@@ -4,6 +4,7 @@ import { button } from "../dom/choice";
 import { element, fill } from "../dom/element";
 import { timeOfDay, today } from "../today";
 import type { BookReader } from "./bookReader";
+import { checkSummary } from "./checkSummary";
 import { findings } from "./findings";
 import { findingsView } from "./findingsView";
 import { loadProof } from "./loadProof";
@@ -19,6 +20,7 @@ export function checkView(context: PaneContext, reader: BookReader): HTMLElement
   const progress = element("progress", { max: 1, "aria-label": texts.checkAll });
   const counted = element("p", { class: "quiet" });
   const message = element("p", { "aria-live": "polite" });
+  const summary = element("p", { "aria-live": "polite" });
   const result = element("div");
   const stale = element("p", { class: "notice", "aria-live": "polite", hidden: true });
   const list = findingsView(context);
@@ -31,8 +33,8 @@ export function checkView(context: PaneContext, reader: BookReader): HTMLElement
     if (on && here === start) cancel.focus();
     if (!on && here === cancel) start.focus();
   };
-  const check = async (mine: { cancelled: boolean }): Promise<Checked> => {
-    const [book, { checkBook }] = await Promise.all([reader.read(), loadProof()]);
+  const check = async (mine: { cancelled: boolean }): Promise<Checked & { upTo: number }> => {
+    const [{ book, upTo }, { checkBook }] = await Promise.all([reader.read(), loadProof()]);
     const audit = await checkBook(book, {
       progress(done, calls) {
         progress.value = done / calls;
@@ -40,22 +42,21 @@ export function checkView(context: PaneContext, reader: BookReader): HTMLElement
       },
       cancelled: () => mine.cancelled,
     });
-    return { audit, title: book.title, at: new Date() };
+    return { audit, title: book.title, at: new Date(), upTo };
   };
   const run = async () => {
+    if (running) return;
     const mine = (running = { cancelled: false });
     fill(message);
     progress.removeAttribute("value");
     counted.textContent = texts.checkReading;
     const late = setTimeout(() => busy(true), QUICK_MS);
-    start.disabled = true;
-    const edits = reader.edits.get();
     try {
       const checked = await check(mine);
       if (mine !== running) return;
       show(checked);
-      checkedUpTo = edits;
-      stale.hidden = reader.edits.get() === edits;
+      checkedUpTo = checked.upTo;
+      stale.hidden = reader.edits.get() === checkedUpTo;
     } catch (failure) {
       if (mine !== running) return;
       const reason = failure instanceof Error ? failure.message : String(failure);
@@ -64,29 +65,13 @@ export function checkView(context: PaneContext, reader: BookReader): HTMLElement
       clearTimeout(late);
       if (mine === running) {
         running = undefined;
-        start.disabled = false;
         busy(false);
       }
     }
   };
   const show = (checked: Checked) => {
-    const { counts, notices } = checked.audit;
-    const calls = counts.agrees + counts.differs + counts["not checkable"];
-    const count = numbers.count;
-    message.textContent = [
-      calls === 0
-        ? ""
-        : texts.checkCounts(count(calls), count(counts.agrees), count(counts.differs), count(counts["not checkable"])),
-      notices.length === 0
-        ? ""
-        : notices.length === 1
-          ? texts.checkOneNotice
-          : texts.checkNotices(count(notices.length)),
-      calls === 0 && notices.length === 0 ? texts.checkNoCalls : "",
-    ]
-      .filter((words) => words !== "")
-      .join(" ");
-    const when = texts.checkedAt(today(checked.at), timeOfDay(checked.at), count(NUMBERS_REVISION));
+    summary.textContent = checkSummary(context, checked.audit);
+    const when = texts.checkedAt(today(checked.at), timeOfDay(checked.at), numbers.count(NUMBERS_REVISION));
     list.show(findings(checked.audit));
     fill(result, element("p", { class: "quiet" }, when), stale, list.root, reportView(context, checked));
     start.textContent = texts.checkAgain;
@@ -97,7 +82,6 @@ export function checkView(context: PaneContext, reader: BookReader): HTMLElement
     if (!running) return;
     running.cancelled = true;
     running = undefined;
-    start.disabled = false;
     busy(false);
     message.textContent = texts.checkCancelled;
   });
@@ -113,6 +97,7 @@ export function checkView(context: PaneContext, reader: BookReader): HTMLElement
     element("p", { class: "actions" }, start, cancel, progress),
     counted,
     message,
+    summary,
     result,
   );
 }

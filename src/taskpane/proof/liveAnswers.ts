@@ -1,15 +1,17 @@
 import { compareStored } from "../../audit/compareStored";
 import { formatAddress, type Area } from "../../sheet/address";
 import { isCellError, type Cell } from "../../sheet/cell";
-import { TOLERANCE } from "./checkBook";
 import type { WorkedStep } from "./workingsOf";
+
+/** The formulas of the workings are proven to this: of the value, and of 1 where it is smaller (a check that comes to 0 never does quite). */
+const LARGEST_ERROR = 1e-9;
 
 /** What the formulas of written workings have come to, each held against the value of its step. */
 export interface LiveAnswers {
   readonly formulas: number;
   /** Cells where something else came out. */
   readonly off: readonly string[];
-  /** Cells whose formula this sheet doesn't know. */
+  /** Cells whose formula this sheet can't work out. */
   readonly lacking: readonly string[];
 }
 
@@ -22,10 +24,16 @@ export function liveAnswers(steps: readonly WorkedStep[], answers: readonly Cell
     if (formula === "") return;
     formulas++;
     const answer = answers[index];
-    if (compareStored([[answer]], [[value]], TOLERANCE).same) return;
+    if (same(answer, value)) return;
     const row = area.top + index;
     const cell = formatAddress({ top: row, left: area.left, bottom: row, right: area.left });
-    (isCellError(answer) && answer.code === "#NAME?" ? lacking : off).push(cell);
+    (isCellError(answer) ? lacking : off).push(cell);
   });
   return { formulas, off, lacking };
+}
+
+function same(answer: Cell, value: Cell): boolean {
+  if (typeof answer === "number" && typeof value === "number")
+    return Math.abs(answer - value) <= LARGEST_ERROR * Math.max(1, Math.abs(value));
+  return compareStored([[answer]], [[value]], LARGEST_ERROR).same;
 }

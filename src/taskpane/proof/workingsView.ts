@@ -65,7 +65,7 @@ export function workingsView(context: PaneContext, reader: BookReader): HTMLElem
         button(texts.workingsShow(address), () => tell(true)),
       );
     }
-    const [book, { workingsOf }] = await Promise.all([reader.current(), loadProof()]);
+    const [{ book }, { workingsOf }] = await Promise.all([reader.current(), loadProof()]);
     if (mine !== turn) return;
     const found = workingsOf(book, address);
     take(found, found ? texts.workingsOf(found.address) : texts.workingsNone(address));

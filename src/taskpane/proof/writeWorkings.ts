@@ -28,6 +28,7 @@ export async function writeWorkings(context: PaneContext, cell: WorkedCell, call
     texts.workingsDone(formatAddress({ ...place, sheet: undefined })),
     off.length > 0 && texts.workingsOff(listed(off, texts, numbers)),
     lacking.length > 0 && texts.workingsLacking(listed(lacking, texts, numbers)),
+    off.length + lacking.length > 0 && port.kind === "trial" && texts.workingsTrial,
     off.length + lacking.length === 0 &&
       formulas > 0 &&
       (formulas === 1 ? texts.workingsOneLive : texts.workingsLive(numbers.count(formulas))),

@@ -10,7 +10,7 @@ export const deProof: Translated<typeof enProof> = {
   checkReading: "Die Blätter werden gelesen …",
   checkProgress: (done, calls) => `${done} von ${calls} Aufrufen`,
   checkCancel: "Abbrechen",
-  checkCancelled: "Abgebrochen. Es gibt kein Ergebnis.",
+  checkCancelled: "Abgebrochen: Diese Prüfung hat kein Ergebnis.",
   checkFailed: (message) => `Die Prüfung ist nicht gelungen: ${message}`,
   checkNoCalls: "Keine Zelle ruft eine dieser Funktionen auf, und auch sonst ist nichts aufgefallen.",
   checkCounts: (calls, agree, differ, unchecked) =>
@@ -46,7 +46,7 @@ export const deProof: Translated<typeof enProof> = {
   workingsHeading: "Rechenweg der gewählten Zelle",
   workingsSelect: "Wählen Sie eine Zelle, die eine dieser Funktionen aufruft.",
   workingsNone: (address) =>
-    `${address} ruft keine dieser Funktionen auf. Wählen Sie eine Zelle, die es tut oder die ihr Ergebnis füllt.`,
+    `Kein Aufruf in ${address} hat einen Rechenweg. Wählen Sie eine Zelle, die eine dieser Funktionen aufruft oder die ihr Ergebnis füllt.`,
   workingsOf: (address) => `So entsteht der Wert von ${address}:`,
   workingsShow: (address) => `Den Rechenweg von ${address} zeigen`,
   workingsFailed: (message) => `Der Rechenweg ließ sich nicht darlegen: ${message}`,
@@ -56,9 +56,11 @@ export const deProof: Translated<typeof enProof> = {
   workingsNoFormula: "Keine Formel: Das Programm hat für diesen Schritt keine Funktion.",
   workingsWrite: "Den Rechenweg daneben schreiben",
   workingsNoRoom: (address) => `Rechts von ${address} sind nicht genug Zellen frei. Es wurde nichts geschrieben.`,
-  workingsDone: (area) => `Der Rechenweg steht in ${area}, mit lebenden Formeln.`,
-  workingsOneLive: "Seine eine Formel ergibt den Wert daneben.",
-  workingsLive: (count) => `Alle ${count} Formeln ergeben die Werte daneben.`,
+  workingsDone: (area) => `Der Rechenweg steht in ${area}.`,
+  workingsOneLive: "Seine eine Formel rechnet mit und ergibt den Wert daneben.",
+  workingsLive: (count) => `Alle ${count} Formeln rechnen mit und ergeben die Werte daneben.`,
   workingsOff: (where) => `Achtung: Etwas anderes als der Wert des Schrittes ergibt sich in ${where}.`,
-  workingsLacking: (where) => `Diesem Blatt fehlt eine Funktion, die die Formel braucht, in ${where}.`,
+  workingsLacking: (where) => `Dieses Blatt kann die Formel nicht ausrechnen in ${where}.`,
+  workingsTrial:
+    "Das Probeblatt rechnet nicht jede Formel wie Excel: Speichern Sie die Mappe und sehen Sie sich diese dort an.",
 };

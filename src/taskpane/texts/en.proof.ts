@@ -8,7 +8,7 @@ export const enProof = {
   checkReading: "Reading the sheets…",
   checkProgress: (done: string, calls: string) => `${done} of ${calls} calls`,
   checkCancel: "Cancel",
-  checkCancelled: "Cancelled. Nothing was found out.",
+  checkCancelled: "Cancelled: this check gave no result.",
   checkFailed: (message: string) => `The check could not be made: ${message}`,
   checkNoCalls: "No cell calls one of these functions, and nothing else was noticed.",
   checkCounts: (calls: string, agree: string, differ: string, unchecked: string) =>
@@ -45,7 +45,7 @@ export const enProof = {
   workingsHeading: "Workings of the selected cell",
   workingsSelect: "Select a cell that calls one of these functions.",
   workingsNone: (address: string) =>
-    `${address} calls none of these functions. Select a cell that does, or one that its result fills.`,
+    `No call in ${address} has workings. Select a cell that calls one of these functions, or one that its result fills.`,
   workingsOf: (address: string) => `How the value of ${address} comes about:`,
   workingsShow: (address: string) => `Show the workings of ${address}`,
   workingsFailed: (message: string) => `The workings could not be laid out: ${message}`,
@@ -55,9 +55,11 @@ export const enProof = {
   workingsNoFormula: "No formula: the host has no function for this step.",
   workingsWrite: "Write the workings beside it",
   workingsNoRoom: (address: string) => `There are not enough free cells right of ${address}. Nothing was written.`,
-  workingsDone: (area: string) => `The workings stand in ${area}, their formulas live.`,
-  workingsOneLive: "Its one formula gives the value beside it.",
-  workingsLive: (count: string) => `All ${count} formulas give the values beside them.`,
+  workingsDone: (area: string) => `The workings stand in ${area}.`,
+  workingsOneLive: "Its one formula is live and gives the value beside it.",
+  workingsLive: (count: string) => `All ${count} formulas are live and give the values beside them.`,
   workingsOff: (where: string) => `Mind: another value than the step's comes out in ${where}.`,
-  workingsLacking: (where: string) => `This sheet lacks a function that the formula needs in ${where}.`,
+  workingsLacking: (where: string) => `This sheet can't work out the formula in ${where}.`,
+  workingsTrial:
+    "The trial sheet doesn't compute every formula as Excel does: save the workbook, and look at these there.",
 } as const;
