@@ -21,6 +21,7 @@ export function workingsView(context: PaneContext, reader: BookReader): HTMLElem
   const message = element("p", { "aria-live": "polite" });
   const chosen = () => worked?.calls[Number(which.select.value)] ?? worked?.calls[0];
   const which = choice(texts.workingsWhich, [], "", () => draw());
+  const choosing = element("div", { class: "fields one" }, which.root);
   const write = button(texts.workingsWrite, () => {
     const call = chosen();
     if (!worked || !call) return;
@@ -44,12 +45,12 @@ export function workingsView(context: PaneContext, reader: BookReader): HTMLElem
     worked = next;
     // Cells changed elsewhere, perhaps by the very workings just written: what was said of it stays.
     if (same) return;
-    const texts = next?.calls.map(({ text }) => text) ?? [];
-    which.root.hidden = texts.length < 2;
+    const typed = next?.calls.map(({ text }) => text) ?? [];
+    choosing.hidden = typed.length < 2;
     const kept = next?.address === before?.address ? before?.calls[Number(which.select.value)]?.text : undefined;
-    const chosen = kept === undefined ? 0 : Math.max(0, texts.indexOf(kept));
+    const chosen = kept === undefined ? 0 : Math.max(0, typed.indexOf(kept));
     which.offer(
-      texts.map((text, index) => [String(index), text] as const),
+      typed.map((text, index) => [String(index), text] as const),
       String(chosen),
     );
     draw();
@@ -73,16 +74,7 @@ export function workingsView(context: PaneContext, reader: BookReader): HTMLElem
   const tell = (asked: boolean) => {
     look(asked).catch((failure) => take(undefined, texts.workingsFailed(String(failure?.message ?? failure))));
   };
-  const made = lazyFold(
-    texts.workingsHeading,
-    () => tell(false),
-    words,
-    ask,
-    element("div", { class: "fields one" }, which.root),
-    steps,
-    action,
-    message,
-  );
+  const made = lazyFold(texts.workingsHeading, () => tell(false), words, ask, choosing, steps, action, message);
   const later = afterPaint(made.refresh);
   selected.watch(later);
   reader.edits.watch(later);

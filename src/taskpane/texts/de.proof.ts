@@ -51,7 +51,7 @@ export const deProof: Translated<typeof enProof> = {
   workingsShow: (address) => `Den Rechenweg von ${address} zeigen`,
   workingsFailed: (message) => `Der Rechenweg ließ sich nicht darlegen: ${message}`,
   workingsWhich: "Welcher Aufruf",
-  workingsLong: (characters) => `Formel ohne das Add-in (${characters} Zeichen)`,
+  workingsLong: (characters) => `Formel mit ${characters} Zeichen`,
   workingsAll: (count) => `Alle ${count} Schritte zeigen`,
   workingsNoFormula: "Keine Formel: Das Programm hat für diesen Schritt keine Funktion.",
   workingsWrite: "Den Rechenweg daneben schreiben",

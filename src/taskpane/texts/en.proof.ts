@@ -50,7 +50,7 @@ export const enProof = {
   workingsShow: (address: string) => `Show the workings of ${address}`,
   workingsFailed: (message: string) => `The workings could not be laid out: ${message}`,
   workingsWhich: "Which call",
-  workingsLong: (characters: string) => `Formula without the add-in (${characters} characters)`,
+  workingsLong: (characters: string) => `Formula of ${characters} characters`,
   workingsAll: (count: string) => `Show all ${count} steps`,
   workingsNoFormula: "No formula: the host has no function for this step.",
   workingsWrite: "Write the workings beside it",
