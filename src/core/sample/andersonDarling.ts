@@ -29,9 +29,9 @@ export function andersonDarling(sample: Sample): AndersonDarling {
   return result;
 }
 
-function compute({ sorted, count, mean, sd }: Sample): AndersonDarling {
+function compute({ sorted, count, mean, meanRest, sd }: Sample): AndersonDarling {
   const termAt = (i: number) => {
-    const z = (sorted[i]! - mean) / sd;
+    const z = (sorted[i]! - mean - meanRest) / sd;
     const half = (z * z) / 2;
     const scaled = erfcx(Math.abs(z) * Math.SQRT1_2) / 2;
     const logSmall = Math.log(scaled) - half;

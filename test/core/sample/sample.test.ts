@@ -26,6 +26,15 @@ describe("the mean and the standard deviation of a sample", () => {
     expect(relativeError(sd, 0.1)).toBeLessThanOrEqual(1e-9);
   });
 
+  // mpmath, 40 digits.
+  test.each([
+    ["1e9 + 1, 2, 4", 1e9, [1, 2, 4], 1.5275252316519467],
+    ["1e12 + 1, 2, 4, 8, 9", 1e12, [1, 2, 4, 8, 9], 3.5637059362410923],
+    ["1e15 + 1, 2, 4, 8, 9, 11, 12, 40", 1e15, [1, 2, 4, 8, 9, 11, 12, 40], 12.449182417216918],
+  ])("%s: the deviation keeps its digits where the last digit of the mean is a part of it", (_, origin, parts, sd) => {
+    expect(relativeError(sampleOf(parts.map((part) => origin + part)).sd, sd)).toBeLessThanOrEqual(1e-15);
+  });
+
   test("law: a sample carried through a rising function is in rising order, without sorting anew", () => {
     const sample = sampleOf([3, 1, 2]).mapped((x) => x * x);
     expect(sample.values).toBe(sample.sorted);
