@@ -111,6 +111,14 @@ describe.skipIf(withoutBrowser)("proof in the pane", () => {
     await settled(sheet.page);
     await fold.getByRole("button", { name: "Write the workings beside it" }).click();
     await fold.getByText("The workings stand in K2:").waitFor();
+    // Where the user wants it, but never over something.
+    const first = fold.getByLabel("First cell for the table");
+    await first.fill("F7");
+    await fold.getByRole("button", { name: "Write the workings beside it" }).click();
+    await fold.getByText(/^\S+ holds .+, and is not written over\. Choose another cell\.$/).waitFor();
+    await first.fill("E20");
+    await fold.getByRole("button", { name: "Write the workings beside it" }).click();
+    await fold.getByText("The workings stand in E20:I26.").waitFor();
   });
 
   test("cells are read where they were asked for, however empty the first of them are", async () => {

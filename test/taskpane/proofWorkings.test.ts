@@ -153,6 +153,32 @@ describe("writing the workings beside a cell", () => {
     expect(said).toContain("another value than the step's comes out in H4");
   });
 
+  test("goes to the cell that was typed, on the sheet of the call where none is named", async () => {
+    const port = ropes(MARK);
+    const cell = (await worked(MARK))!;
+    const last = 10 + cell.calls[0]!.steps.length + 1;
+    await writeWorkings(contextOf(port), cell, cell.calls[0]!, " k10 ");
+    await writeWorkings(contextOf(port), cell, cell.calls[0]!, "Ropes!Q10");
+    expect(port.writes.map(({ address }) => address)).toEqual([`Ropes!K10:O${last}`, `Ropes!Q10:U${last}`]);
+  });
+
+  test.each([
+    ["somewhere", en.targetBad("somewhere")],
+    ["Gone!B2", en.targetNoSheet("Gone")],
+    ["XFD1", en.targetEdge],
+    ["C2", en.workingsInside],
+    ["A70", en.workingsInside],
+    ["E9", en.workingsTaken("Ropes!E9", "“mine”")],
+    ["E8", en.workingsTaken("E9", "“mine”")],
+    ["Other!D5", en.workingsOtherSheet("C2", "Ropes")],
+  ])("typed %j it says why not, and nothing is written", async (typed, refusal) => {
+    const port = ropes(MARK);
+    await port.write("Ropes!E9", [["mine"]]);
+    const cell = (await worked("WEIR.TOP_FRACTION_CUTOFF(A2:A200,5%)"))!;
+    expect(await writeWorkings(contextOf(port), cell, cell.calls[0]!, typed)).toBe(refusal);
+    expect(port.writes).toHaveLength(1);
+  });
+
   test("without room nothing is written", async () => {
     const port = ropes(MARK);
     const cell = (await worked(MARK))!;

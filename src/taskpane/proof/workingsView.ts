@@ -3,6 +3,7 @@ import type { PaneContext } from "../context";
 import { afterPaint } from "../afterPaint";
 import { button, choice } from "../dom/choice";
 import { element, fill } from "../dom/element";
+import { field } from "../dom/field";
 import { lazyFold } from "../dom/part";
 import type { BookReader } from "./bookReader";
 import { loadProof } from "./loadProof";
@@ -25,12 +26,18 @@ export function workingsView(context: PaneContext, reader: BookReader): HTMLElem
   const write = button(texts.workingsWrite, () => {
     const call = chosen();
     if (!worked || !call) return;
-    writeWorkings(context, worked, call).then(
+    writeWorkings(context, worked, call, where.input.value).then(
       (said) => (message.textContent = said),
       (failure) => (message.textContent = texts.writeFailed(String(failure?.message ?? failure))),
     );
   });
-  const action = element("p", { class: "actions" }, write);
+  const where = field(texts.workingsWhere, "", () => fill(message), texts.workingsWhereHint);
+  const action = element(
+    "div",
+    {},
+    element("div", { class: "fields one" }, where.root),
+    element("p", { class: "actions" }, write),
+  );
   const draw = () => {
     const call = chosen();
     fill(steps, call && stepsView(context, call));

@@ -1,21 +1,26 @@
-import { formatAddress, parseAddress } from "../../sheet/address";
+import { formatAddress } from "../../sheet/address";
 import type { PaneContext } from "../context";
 import { listed } from "../column/listed";
-import { freeBlock } from "../target/freeBlock";
 import { loadProof } from "./loadProof";
 import { workingsCells } from "./workingsCells";
 import type { WorkedCall, WorkedCell } from "./workingsOf";
+import { workingsPlace } from "./workingsPlace";
 
 /** The same words as in the workings that a cell shows. */
 const HEADINGS = ["step", "meaning", "value", "formula without the add-in, live", "source"] as const;
 
-/** Writes the workings into free cells right of theirs and reads what the formulas come to there. Returns what to say. */
-export async function writeWorkings(context: PaneContext, cell: WorkedCell, call: WorkedCall): Promise<string> {
+/** Writes the workings into free cells, from `typed` on or right of theirs, and reads what the formulas come to there. Returns what to say. */
+export async function writeWorkings(
+  context: PaneContext,
+  cell: WorkedCell,
+  call: WorkedCall,
+  typed = "",
+): Promise<string> {
   const { texts, numbers, port } = context;
-  const { address, touches } = cell;
-  const cells = workingsCells(`Workings of ${call.text}, ${address}`, HEADINGS, call.steps);
-  const place = await freeBlock(port, parseAddress(address)!, cells.length, HEADINGS.length, touches);
-  if (!place) return texts.workingsNoRoom(address);
+  const cells = workingsCells(`Workings of ${call.text}, ${cell.address}`, HEADINGS, call.steps);
+  const found = await workingsPlace(context, cell, { rows: cells.length, columns: HEADINGS.length }, typed);
+  if ("refusal" in found) return found.refusal;
+  const { place } = found;
   await port.write(formatAddress(place), cells);
   const column = { ...place, top: place.top + 2, left: place.left + 3, right: place.left + 3 };
   const [{ values }, { liveAnswers }] = await Promise.all([port.read(formatAddress(column)), loadProof()]);

@@ -54,8 +54,15 @@ export const deProof: Translated<typeof enProof> = {
   workingsLong: (characters) => `Formel mit ${characters} Zeichen`,
   workingsAll: (count) => `Alle ${count} Schritte zeigen`,
   workingsNoFormula: "Keine Formel: Das Programm hat für diesen Schritt keine Funktion.",
+  workingsWhere: "Erste Zelle der Tabelle",
+  workingsWhereHint: "Etwa H2. Bleibt es leer: die nächsten freien Zellen rechts.",
   workingsWrite: "Den Rechenweg daneben schreiben",
   workingsNoRoom: (address) => `Rechts von ${address} sind nicht genug Zellen frei. Es wurde nichts geschrieben.`,
+  workingsTaken: (cell, shown) =>
+    `${cell} enthält ${shown} und wird nicht überschrieben. Wählen Sie eine andere Zelle.`,
+  workingsInside: "Die Tabelle bedeckte den Aufruf selbst oder Zellen, die er liest. Wählen Sie eine andere Zelle.",
+  workingsOtherSheet: (cell, sheet) =>
+    `Die Formeln nennen Zellen so wie ${cell}: auf einem anderen Blatt als „${sheet}“ läsen sie andere Zellen.`,
   workingsDone: (area) => `Der Rechenweg steht in ${area}.`,
   workingsOneLive: "Seine eine Formel rechnet mit und ergibt den Wert daneben.",
   workingsLive: (count) => `Alle ${count} Formeln rechnen mit und ergeben die Werte daneben.`,

@@ -53,8 +53,15 @@ export const enProof = {
   workingsLong: (characters: string) => `Formula of ${characters} characters`,
   workingsAll: (count: string) => `Show all ${count} steps`,
   workingsNoFormula: "No formula: the host has no function for this step.",
+  workingsWhere: "First cell for the table",
+  workingsWhereHint: "Such as H2. Left empty: the nearest free cells to the right.",
   workingsWrite: "Write the workings beside it",
   workingsNoRoom: (address: string) => `There are not enough free cells right of ${address}. Nothing was written.`,
+  workingsTaken: (cell: string, shown: string) =>
+    `${cell} holds ${shown}, and is not written over. Choose another cell.`,
+  workingsInside: "The table would cover the call itself or cells that it reads. Choose another cell.",
+  workingsOtherSheet: (cell: string, sheet: string) =>
+    `The formulas speak of cells as ${cell} does: on another sheet than “${sheet}” they would read other cells.`,
   workingsDone: (area: string) => `The workings stand in ${area}.`,
   workingsOneLive: "Its one formula is live and gives the value beside it.",
   workingsLive: (count: string) => `All ${count} formulas are live and give the values beside them.`,
