@@ -27,7 +27,9 @@ try {
     target: "node20",
     logLevel: "warning",
     // Packages that still ask for require() find it.
-    banner: { js: 'import { createRequire as requireFor } from "node:module"; const require = requireFor(import.meta.url);' },
+    banner: {
+      js: 'import { createRequire as requireFor } from "node:module"; const require = requireFor(import.meta.url);',
+    },
   });
   await import(pathToFileURL(outfile).href);
 } finally {

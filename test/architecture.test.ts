@@ -1,4 +1,4 @@
-import { readFileSync, readdirSync, statSync } from "node:fs";
+import { existsSync, readFileSync, readdirSync, statSync } from "node:fs";
 import { dirname, join, relative, resolve, sep } from "node:path";
 import ts from "typescript";
 import { describe, expect, test } from "vitest";
@@ -117,5 +117,18 @@ describe("the layers", () => {
       return undefined;
     };
     expect([...graph.keys()].map((file) => circle(file, [])).filter(Boolean)).toEqual([]);
+  });
+});
+
+describe("the proof that a comment names", () => {
+  test("exists: every path of a test or reference in the sources and pages", () => {
+    const root = join(source, "..");
+    const pages = readdirSync(join(root, "docs"), { recursive: true })
+      .map(String)
+      .filter((file) => file.endsWith(".md"))
+      .map((file) => join("docs", file));
+    for (const file of [...files.map((one) => join("src", one)), ...pages])
+      for (const [path] of readFileSync(join(root, file), "utf8").matchAll(/\btest\/[\w./]+\.(test\.ts|json|py)\b/g))
+        expect(existsSync(join(root, path)), `${file} names ${path}`).toBe(true);
   });
 });

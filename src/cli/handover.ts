@@ -4,6 +4,7 @@ import { endedSpills, planHandover, type Replacement } from "../audit/handover/p
 import { NUMBERS_REVISION, RELEASE_NAME, RELEASE_VERSION } from "../core/release";
 import type { CellPatch } from "../hosts/file/patchSheet";
 import { UnusableFile } from "../hosts/file/unusableFile";
+import { storedSpelling } from "../hosts/file/write/storedSpelling";
 import { formatSheetName } from "../sheet/address";
 import { isCellError, type Cell } from "../sheet/cell";
 import { Sheet } from "../sheet/workbook";
@@ -42,7 +43,7 @@ async function runHandover(args: readonly string[], io: Io): Promise<number> {
   const workbook = await parseWorkbook(bytes, path);
   if (!/\.xlsx$/i.test(path)) throw new Stop(`Only an .xlsx file can be handed over; ${path} was given.`);
   const { judgements } = await auditWorkbook(workbook, { tolerance: TOLERANCE });
-  const replacements = planHandover(judgements, workbook);
+  const replacements = planHandover(judgements, workbook, storedSpelling);
   await io.write(out, await patched(bytes, path, replacements));
   io.out(values["json"] ? jsonLines(replacements) : plainLines(out, replacements));
   return 0;

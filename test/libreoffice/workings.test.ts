@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { formatAddress } from "../../src/sheet/address";
-import { storedSpelling } from "../../src/audit/handover/storedSpelling";
+import { storedSpelling } from "../../src/hosts/file/write/storedSpelling";
 import type { Cell } from "../../src/sheet/cell";
 import { isBlank, isCellError } from "../../src/sheet/cell";
 import { caseFiles, readCases, type CaseFile } from "../support/cases";
@@ -48,7 +48,7 @@ function bookOf(columns: CaseFile["columns"], formulas: readonly string[]): Uint
   );
   formulas.forEach((formula, index) => {
     const place = addressOf(index);
-    cells[place] = { f: storedSpelling(formula).replace(/^=/, ""), formulaAttributes: ` t="array" ref="${place}"` };
+    cells[place] = { f: storedSpelling(formula), formulaAttributes: ` t="array" ref="${place}"` };
   });
   return xlsxFile({ sheets: [{ name: "Sheet1", rows: sheetRows(cells) }] });
 }

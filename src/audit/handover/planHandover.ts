@@ -11,7 +11,6 @@ import { mayCallOurs } from "../functionName";
 import type { Judgement } from "../judgement";
 import { hostNeeded } from "./hostNeeded";
 import { nativeCall } from "./nativeCall";
-import { storedSpelling } from "./storedSpelling";
 
 /** What becomes of one cell in a copy that is to work without the add-in. */
 export interface Replacement {
@@ -28,10 +27,13 @@ export interface Replacement {
 const MOST_CALLS_IN_A_CELL = 20;
 const LONGEST_FORMULA = 8_192;
 
+/** Puts a formula as typed into the spelling of files, without its "=". */
+export type Spelling = (formula: string) => string;
+
 /** Decides for every judged cell: the host's own functions where they give the same value, else its value, else nothing. */
-export function planHandover(judgements: readonly Judgement[], workbook: Workbook): Replacement[] {
+export function planHandover(judgements: readonly Judgement[], workbook: Workbook, spelling: Spelling): Replacement[] {
   const work = newSharedWork();
-  const replacements = judgements.map((judgement) => replacementOf(judgement, workbook, work));
+  const replacements = judgements.map((judgement) => replacementOf(judgement, workbook, work, spelling));
   const ended = endedSpills(replacements);
   return replacements.map((one) => {
     if (one.stored === undefined) return one;
@@ -53,8 +55,8 @@ function spillKey(sheet: string, row: number, column: number): string {
   return `${row},${column},${sheet.toLowerCase()}`;
 }
 
-function replacementOf(judgement: Judgement, workbook: Workbook, work: SharedWork): Replacement {
-  const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook, work);
+function replacementOf(judgement: Judgement, workbook: Workbook, work: SharedWork, spelling: Spelling): Replacement {
+  const formula = judgement.recomputed === undefined ? undefined : nativeFormula(judgement, workbook, work, spelling);
   const differs = judgement.verdict === "differs" ? ` Mind: ${judgement.why}` : "";
   if (formula !== undefined) {
     const year = hostNeeded(`=${formula}`);
@@ -82,6 +84,7 @@ function nativeFormula(
   { sheet, cell, recomputed }: Judgement,
   workbook: Workbook,
   work: SharedWork,
+  spelling: Spelling,
 ): string | undefined {
   if (recomputed === undefined || Array.isArray(recomputed)) return undefined;
   const { row, column } = cell;
@@ -101,7 +104,7 @@ function nativeFormula(
     text = alone ? `=${native}` : `${before}(${native})${text.slice(to)}`;
   }
   if (mayCallOurs(text)) return undefined;
-  const stored = storedSpelling(text);
+  const stored = `=${spelling(text)}`;
   if (stored.length > LONGEST_FORMULA) return undefined;
   const answer = evaluate(stored, place);
   if (!("value" in answer) || Array.isArray(answer.value)) return undefined;

@@ -16,7 +16,7 @@ import { requireScored } from "./requireScored";
  * Method     One quadrature for T (estimatedMark.ts), on which the real root in ln m is found and rounded up. 1/fraction, or the
  *            geometric law with the fraction asked for, forgets that the mark is itself a guess: from 5 scores at 20 % it promises
  *            90 % in 11 looks where it takes 16.
- * Accuracy   the exact number, chances within 1e-12; test/core/method/looksForHitChance.test.ts.
+ * Accuracy   the exact number, chances within 1e-12; test/core/method/curveHitChance.test.ts.
  * Reference  Geisser (1993), Predictive Inference, ch. 2.
  *
  * @throws {DomainError}

@@ -7,7 +7,7 @@ import { requireReachable } from "./requireReachable";
  * Domain     relative_error in (0, 1).
  * Edges      an error met on paper counts as met: 20 % gives exactly 51, though 2/0.2² comes out just above or below 50.
  * Method     n = 1 + ⌈2/relative_error²⌉ with a guard of two roundings.
- * Accuracy   exact up to 1e15 scores; test/core/method/samplesForVarianceStandardError.test.ts.
+ * Accuracy   exact up to 1e15 scores; test/core/method/samplesForSdPrecision.test.ts.
  * Reference  the variance of s² is 2σ⁴/(n − 1): Cramér (1946), Mathematical Methods of Statistics, 27.4.
  *
  * @throws {DomainError} naming relative_error; {NoAnswerError} if no number of scores that a number can hold is enough.

@@ -10,7 +10,7 @@ import { requireScored } from "./requireScored";
  * Domain     count a whole number of at least 2; confidence in (0, 1).
  * Edges      the answer may exceed 1 (few scores, high confidence): then only the upper side binds.
  * Method     The root of the coverage in p, taken on the smaller of coverage and its complement; above 1 the chi-square quantile itself.
- * Accuracy   1e-12 relative up to a billion scores, 1e-10 up to 1e15 (the rounding of 1 + precision); test/core/method/sdPrecision.test.ts.
+ * Accuracy   1e-12 relative up to a billion scores, 1e-10 up to 1e15 (the rounding of 1 + precision); test/core/method/samplesForSdPrecision.test.ts.
  * Reference  as samplesForSdPrecision.
  *
  * @throws {DomainError} naming count or confidence.

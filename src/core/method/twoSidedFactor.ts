@@ -27,7 +27,7 @@ const LEAST_COVERAGE = 1e-100;
  * Domain     count ≥ 2 whole; coverage and confidence in (0, 1).
  * Method     Exact: E[P(χ² ≥ (n − 1)r²/k²)] = confidence over the error of the mean, z/√n, where x̄ ± r·σ just holds the coverage. Trapezoidal
  *            rule in z with step 1/8. Howe's closed formula is off by 9 % at 2 scores and 1 % at 20.
- * Accuracy   1e-13 relative; test/core/method/twoSidedFactor.test.ts.
+ * Accuracy   1e-13 relative; test/core/method/toleranceFactor.test.ts.
  * Reference  Eberhardt, Mee & Reeve (1989), Computing factors for exact two-sided tolerance limits, Commun. Statist. Simul. 18;
  *            ISO 16269-6.
  *

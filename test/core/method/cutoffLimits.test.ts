@@ -100,8 +100,7 @@ describe("the limits of the mark", () => {
 });
 
 describe("the mark for the next score", () => {
-  test("law: simulated by quadrature over both errors, the next score passes with the fraction", () => {
-    // P(next > x̄ + k·s) = P(t > k/√(1 + 1/n)) is Student's own definition; here its inverse is checked against the plain and safe marks.
+  test("law: it lies between the plain and the safe mark, t·√(1 + 1/n) deviations out", () => {
     const scores = new Sample(Float64Array.from([54, 52.3, 60.4, 43.4, 50.5]));
     const curve = fitCurve("scores", scores, { kind: "normal" });
     const next = nextScoreCutoff(curve, 0.05, "high");
