@@ -2,6 +2,7 @@ import { requireProbability, UnsettledError } from "../domain";
 import { noncentralTTails } from "../special/noncentralTTails";
 import { normalScore } from "../special/normalScore";
 import { requireNoncentral } from "./noncentralTChecks";
+import { studentTUpperTailQuantile } from "./studentTUpperTailQuantile";
 
 /**
  * The t with P(T > t) = p for T = (Z + ncp)/√(χ²/df), the noncentral t distribution.
@@ -18,6 +19,8 @@ export function noncentralTUpperTailQuantile(p: number, df: number, ncp: number)
   requireProbability("p", p);
   requireNoncentral(df, ncp);
   if (p === 0 || p === 1) return p === 0 ? Infinity : -Infinity;
+  // The middle is 0 then, and next to it the answer has digits of its own.
+  if (ncp === 0) return studentTUpperTailQuantile(p, df);
   const z = normalScore(p);
   if (df === Infinity) return ncp + z;
   const wantLower = p > 0.5;

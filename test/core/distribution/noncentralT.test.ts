@@ -13,6 +13,7 @@ import published from "../../reference/published/distribution_tables.json";
 import { randomRows } from "../../support/randomRows";
 import { relativeError } from "../../support/relativeError";
 import { testRefusals } from "../../support/refusals";
+import { studentTUpperTailQuantile } from "../../../src/core/distribution/studentTUpperTailQuantile";
 import { readVectors, worstRow } from "../../support/vectors";
 
 const { jStat } = jstat;
@@ -38,6 +39,14 @@ describe("the noncentral t distribution", () => {
   test.each([noncentralTCdf, noncentralTUpperTail])("$name agrees with mpmath at random points", (f) => {
     const worst = worstRow(randomRows(f.name), f);
     expect(worst.error, JSON.stringify(worst)).toBeLessThan(1e-13);
+  });
+
+  test("law: without noncentrality it is Student's t, whose middle is 0", () => {
+    for (const df of [1, 4, 30, 1e6])
+      for (const p of [1e-9, 0.2, 0.5, 0.5 + 1e-12, 0.99]) {
+        expect(noncentralTUpperTailQuantile(p, df, 0)).toBe(studentTUpperTailQuantile(p, df));
+        expect(noncentralTQuantile(0.5, df, 0)).toBe(0);
+      }
   });
 
   test("the printed table of published/distribution_tables.json, from Burkardt's collection (df, ncp, t, cdf)", () => {
